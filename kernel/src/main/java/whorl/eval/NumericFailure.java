@@ -1,0 +1,35 @@
+package whorl.eval;
+
+import whorl.diagnostic.Span;
+
+/**
+ * Why a part of a formula has no value.
+ *
+ * @param reason what happened
+ * @param span the part at fault: the divisor, the operand of the root, the operation that overflows
+ * @param inFunction name of the sheet's function in whose body the span stands, or empty
+ * @param operand the number at fault, in coherent SI units
+ */
+public record NumericFailure(Reason reason, Span span, String inFunction, double operand) {
+  /** The ways in which a part can have no value. */
+  public enum Reason {
+    /** A divisor is zero. */
+    DIVISION_BY_ZERO,
+    /** The result is too large for a double. */
+    OVERFLOW,
+    /** An even root, or a fractional power, of a negative number. */
+    ROOT_OF_NEGATIVE,
+    /** The logarithm of a number that is not positive. */
+    LOGARITHM_OF_NON_POSITIVE,
+    /** The arc sine or arc cosine of a number beyond ±1. */
+    ARC_OUT_OF_RANGE,
+    /** The direction of, or an angle with, a vector of length zero. */
+    DIRECTION_OF_ZERO,
+    /** Zero to a negative power. */
+    ZERO_TO_NEGATIVE_POWER,
+    /** The evaluation was interrupted. */
+    INTERRUPTED,
+    /** The evaluation took more operations than allowed. */
+    TOO_LONG
+  }
+}
