@@ -1,0 +1,229 @@
+package whorl.sheet;
+
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import whorl.diagnostic.Diagnostic;
+import whorl.syntax.Statement;
+
+/** What a statement left in the note: the material of one row of the ruled table. */
+public sealed interface Step {
+  /** Where its statement stands. */
+  Place place();
+
+  /** The statement as written. */
+  Statement statement();
+
+  /**
+   * The assumptions, as written, that fail now and on whose names this step depends; empty where
+   * the argument stands.
+   */
+  List<String> doubts();
+
+  /** Answers one question for every form of step. */
+  <R> R match(Cases<R> cases);
+
+  /**
+   * The forms of step, one method each.
+   *
+   * @param <R> type of the answer
+   */
+  interface Cases<R> {
+    R defined(Defined defined);
+
+    R function(Function function);
+
+    R shown(Shown shown);
+
+    R checked(Checked checked);
+
+    R reproduced(Reproduced reproduced);
+
+    R assumed(Assumed assumed);
+
+    R waiting(Waiting waiting);
+
+    R broken(Broken broken);
+  }
+
+  /**
+   * A definition with its result.
+   *
+   * @param input whether the right side is a bare number or vector
+   * @param with what went in, in the order of first mention; empty for an input
+   * @param gives the result in the declared unit
+   */
+  record Defined(
+      Place place,
+      Statement.Definition statement,
+      boolean input,
+      List<Given> with,
+      Quantity gives,
+      List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Defined {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.defined(this);
+    }
+  }
+
+  /**
+   * A function definition.
+   *
+   * @param resultKind the kind of its result in words, or empty
+   */
+  record Function(
+      Place place,
+      Statement.Function statement,
+      List<Given> with,
+      String resultKind,
+      List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Function {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.function(this);
+    }
+  }
+
+  /** A shown expression. A name shown alone has nothing in {@code with}. */
+  record Shown(
+      Place place, Statement.Show statement, List<Given> with, Quantity gives, List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Shown {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.shown(this);
+    }
+  }
+
+  /** A check of a condition. */
+  record Checked(
+      Place place,
+      Statement.Check statement,
+      List<Given> with,
+      Verdict verdict,
+      List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Checked {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.checked(this);
+    }
+  }
+
+  /**
+   * A hand-worked value reproduced.
+   *
+   * @param computed the value worked out here
+   * @param stated the value worked by hand
+   * @param deviation (computed − stated)/stated, a fraction
+   * @param within the largest deviation allowed, a fraction
+   */
+  record Reproduced(
+      Place place,
+      Statement.Reproduction statement,
+      List<Given> with,
+      Quantity computed,
+      Quantity stated,
+      double deviation,
+      double within,
+      boolean holds,
+      List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Reproduced {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.reproduced(this);
+    }
+  }
+
+  /** A condition the argument rests on. */
+  record Assumed(
+      Place place,
+      Statement.Assumption statement,
+      List<Given> with,
+      Verdict verdict,
+      List<String> doubts)
+      implements Step {
+    /** Copies the lists. */
+    public Assumed {
+      with = List.copyOf(with);
+      doubts = List.copyOf(doubts);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.assumed(this);
+    }
+  }
+
+  /**
+   * A statement that waits for names which have no definition, or none that stands.
+   *
+   * @param names what it waits for
+   * @param near for each name up to four defined names that are spelled alike
+   */
+  record Waiting(Place place, Statement statement, List<String> names, List<List<String>> near)
+      implements Step {
+    /** Copies the lists. */
+    public Waiting {
+      names = List.copyOf(names);
+      near = List.copyOf(near);
+    }
+
+    @Override
+    public List<String> doubts() {
+      return List.of();
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.waiting(this);
+    }
+  }
+
+  /**
+   * A statement that a change elsewhere broke; its text stays.
+   *
+   * @param diagnostic what is wrong, in the text of its cell
+   * @param last its last good result, now stale, or null
+   */
+  record Broken(Place place, Statement statement, Diagnostic diagnostic, @Nullable Quantity last)
+      implements Step {
+    @Override
+    public List<String> doubts() {
+      return List.of();
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.broken(this);
+    }
+  }
+}

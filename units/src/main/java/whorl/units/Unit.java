@@ -1,0 +1,4 @@
+package whorl.units;
+
+/** A unit of measurement. */
+public interface Unit {}
