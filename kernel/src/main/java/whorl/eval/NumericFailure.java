@@ -6,9 +6,12 @@ import whorl.diagnostic.Span;
  * Why a part of a formula has no value.
  *
  * @param reason what happened
- * @param span the part at fault: the divisor, the operand of the root, the operation that overflows
+ * @param span the part at fault: the divisor, the operand of the root, the operation that
+ *     overflows; the whole formula where the evaluation was ended
  * @param inFunction name of the sheet's function in whose body the span stands, or empty
- * @param operand the number at fault, in coherent SI units
+ * @param operand the number at fault, in coherent SI units: the divisor, the operand of the root,
+ *     and where a result is too large the last number that went in; where the evaluation was ended,
+ *     the number of operations or levels it had come to
  */
 public record NumericFailure(Reason reason, Span span, String inFunction, double operand) {
   /** The ways in which a part can have no value. */
@@ -23,13 +26,15 @@ public record NumericFailure(Reason reason, Span span, String inFunction, double
     LOGARITHM_OF_NON_POSITIVE,
     /** The arc sine or arc cosine of a number beyond ±1. */
     ARC_OUT_OF_RANGE,
-    /** The direction of, or an angle with, a vector of length zero. */
+    /** The direction of, or an angle with, a vector of length zero; the angle of the point 0, 0. */
     DIRECTION_OF_ZERO,
     /** Zero to a negative power. */
     ZERO_TO_NEGATIVE_POWER,
     /** The evaluation was interrupted. */
     INTERRUPTED,
     /** The evaluation took more operations than allowed. */
-    TOO_LONG
+    TOO_LONG,
+    /** Functions call functions more levels deep than allowed. */
+    TOO_DEEP
   }
 }

@@ -1,0 +1,16 @@
+package whorl.eval;
+
+import whorl.diagnostic.Span;
+
+/**
+ * A part of a formula, as a failure names it.
+ *
+ * @param span where it stands
+ * @param inFunction the function whose body it stands in, or empty
+ */
+record Site(Span span, String inFunction) {
+  /** What to throw where this part has no value. */
+  NoValue noValue(NumericFailure.Reason reason, double operand) {
+    return new NoValue(new NumericFailure(reason, span, inFunction, operand));
+  }
+}
