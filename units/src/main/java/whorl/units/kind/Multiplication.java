@@ -1,0 +1,238 @@
+package whorl.units.kind;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import org.jspecify.annotations.Nullable;
+import whorl.units.Dimension;
+import whorl.units.Rational;
+
+/**
+ * One product: sorts its factors into an exact coefficient, a power of π and quantities, and has
+ * the groupings of the quantities searched.
+ */
+final class Multiplication {
+  private static final Kind INERTIA = Kind.named("rotational_inertia");
+  private static final Kind FLYWHEEL_EFFECT = Kind.named("flywheel_effect");
+  private static final Kind TEMPERATURE = Kind.named("temperature");
+  private static final List<Kind> RATES =
+      List.of(Kind.named("angular_velocity"), Kind.named("frequency"));
+  private static final Rational FOUR = Rational.of(4);
+  private static final Rational QUARTER = Rational.of(1, 4);
+
+  /** Exponents of more bits than this make numbers of a size that no coefficient has. */
+  private static final int EXACT_BITS = 6;
+
+  /** Numbers of seconds in a minute, and of turns per minute in a hertz, put in by hand. */
+  private static final Set<Rational> CONVERSIONS = Set.of(Rational.of(60), Rational.of(30));
+
+  private final List<Powered> factors;
+  private final Map<Object, Powered> quantities = new LinkedHashMap<>();
+  private final List<Rational> numerals = new ArrayList<>();
+
+  /** Product of the numerals. */
+  private Rational coefficient = Rational.ONE;
+
+  /** Whether the coefficient holds all numbers but π. */
+  private boolean exact = true;
+
+  /** Net power of π. */
+  private int turn;
+
+  /** Whether there are numbers that are not numerals. */
+  private boolean hasNumbers;
+
+  private Multiplication(List<Powered> factors) {
+    this.factors = factors;
+  }
+
+  static Judgement of(List<Powered> factors) {
+    return new Multiplication(withInertiasOfFlywheelEffects(factors)).judgement();
+  }
+
+  /** Reads a flywheel effect with a 4 right behind the fraction bar as the inertia that it is. */
+  private static List<Powered> withInertiasOfFlywheelEffects(List<Powered> factors) {
+    List<Powered> read = new ArrayList<>(factors);
+    for (int i = 0; i + 1 < read.size(); i++) {
+      Powered effect = read.get(i);
+      Powered four = read.get(i + 1);
+      if (isFlywheelEffect(effect.operand())
+          && FOUR.equals(four.operand().literal())
+          && four.exponent().equals(effect.exponent().negate())) {
+        read.set(
+            i, new Powered(List.of(effect.key(), FOUR), Operand.of(INERTIA), effect.exponent()));
+        read.remove(i + 1);
+      }
+    }
+    return read;
+  }
+
+  private static boolean isFlywheelEffect(Operand operand) {
+    return operand.readings().all(reading -> reading.kind() == FLYWHEEL_EFFECT);
+  }
+
+  private Judgement judgement() {
+    for (Powered factor : factors) {
+      Readings readings = factor.operand().readings();
+      if (readings.all(reading -> reading.kind() == TEMPERATURE)) {
+        return Judgement.refused(new Refusal.TemperatureReading());
+      }
+      Optional<Refusal> power = Raising.refusal(readings, factor.exponent());
+      if (power.isPresent()) {
+        return Judgement.refused(power.get());
+      }
+      sort(factor);
+    }
+    quantities.values().removeIf(factor -> factor.exponent().isZero());
+    return refusal().map(Judgement::refused).orElseGet(this::accepted);
+  }
+
+  private void sort(Powered factor) {
+    @Nullable Rational literal = factor.operand().literal();
+    Readings readings = factor.operand().readings();
+    if (literal != null) {
+      numerals.add(literal);
+      multiply(literal, factor.exponent());
+    } else if (readings.all(Reading::isPlainNumber)) {
+      exact = exact && isPi(readings);
+      hasNumbers = hasNumbers || !isPi(readings);
+      turn += turns(readings, factor.exponent());
+    } else {
+      quantities.merge(factor.key(), factor, Multiplication::merged);
+    }
+  }
+
+  private static Powered merged(Powered first, Powered second) {
+    return new Powered(first.key(), first.operand(), first.exponent().plus(second.exponent()));
+  }
+
+  private void multiply(Rational literal, Rational exponent) {
+    boolean whole = exponent.isInteger() && exponent.numerator().bitLength() <= EXACT_BITS;
+    if (whole && !(literal.isZero() && exponent.signum() < 0)) {
+      coefficient = coefficient.times(literal.power(exponent.numerator().intValueExact()));
+    } else {
+      exact = false;
+    }
+  }
+
+  private Optional<Refusal> refusal() {
+    Set<Kind> kinds = kinds();
+    for (Rational numeral : numerals) {
+      Optional<Refusal> refusal = NumericValueFormulas.STANDARD.refusal(numeral, kinds);
+      if (refusal.isPresent()) {
+        return refusal;
+      }
+    }
+    return flywheelEffect();
+  }
+
+  /** All kinds for which a factor may stand. */
+  private Set<Kind> kinds() {
+    Set<Kind> kinds = new HashSet<>();
+    for (Powered factor : factors) {
+      kinds.addAll(factor.operand().readings().kinds());
+    }
+    return kinds;
+  }
+
+  /** A flywheel effect enters no product but those that a rule names. */
+  private Optional<Refusal> flywheelEffect() {
+    if (quantities.values().stream().noneMatch(factor -> isFlywheelEffect(factor.operand()))) {
+      return Optional.empty();
+    }
+    for (Powered factor : quantities.values()) {
+      for (Reading reading : factor.operand().readings().readings()) {
+        if (RuleBook.STANDARD.product(FLYWHEEL_EFFECT, reading.kind()).isEmpty()
+            && RuleBook.STANDARD.quotient(FLYWHEEL_EFFECT, reading.kind()).isEmpty()) {
+          return Optional.of(new Refusal.FlywheelEffect());
+        }
+      }
+    }
+    return Optional.empty();
+  }
+
+  private Judgement accepted() {
+    if (quantities.isEmpty()) {
+      boolean known = exact && turn == 0;
+      return judgement(new Operand(Readings.number(turn), known ? coefficient : null));
+    }
+    List<ProductSearch.Part> parts = parts();
+    if (parts.size() > ProductSearch.MOST_FACTORS) {
+      return Judgement.refused(
+          new Refusal.TooManyFactors(parts.size(), ProductSearch.MOST_FACTORS));
+    }
+    boolean untagged = parts.stream().anyMatch(part -> part.readings().isEmpty());
+    Set<Reading> found = untagged ? Set.of() : ProductSearch.readings(parts);
+    var readings = new Readings(dimension(), withFlywheelEffect(found));
+    return judgement(new Operand(readings, exact && coefficient.isZero() ? Rational.ZERO : null));
+  }
+
+  private List<ProductSearch.Part> parts() {
+    List<ProductSearch.Part> parts = new ArrayList<>();
+    for (Powered factor : quantities.values()) {
+      boolean below = factor.exponent().signum() < 0;
+      Rational size = below ? factor.exponent().negate() : factor.exponent();
+      Readings power = Raising.power(factor.operand().readings(), size);
+      parts.add(new ProductSearch.Part(power.readings(), below));
+    }
+    if (turn != 0 || hasNumbers || parts.stream().allMatch(ProductSearch.Part::below)) {
+      parts.add(new ProductSearch.Part(Readings.number(turn).readings(), false));
+    }
+    return parts;
+  }
+
+  private Dimension dimension() {
+    Dimension dimension = Dimension.ONE;
+    for (Powered factor : quantities.values()) {
+      Dimension power = factor.operand().readings().dimension().power(factor.exponent());
+      dimension = dimension.times(power);
+    }
+    return dimension;
+  }
+
+  /** GD² is four times the inertia: an exact factor tells that one is made of the other. */
+  private Set<Reading> withFlywheelEffect(Set<Reading> found) {
+    long quantitiesButNumbers =
+        quantities.values().stream()
+            .filter(factor -> !factor.operand().readings().all(r -> r.kind().isNumber()))
+            .count();
+    if (!exact || quantitiesButNumbers != 1) {
+      return found;
+    }
+    Set<Reading> both = new HashSet<>(found);
+    if (coefficient.equals(QUARTER) && found.equals(Set.of(Reading.of(FLYWHEEL_EFFECT)))) {
+      both.add(Reading.of(INERTIA));
+    }
+    if (coefficient.equals(FOUR) && found.contains(Reading.of(INERTIA))) {
+      both.add(Reading.of(FLYWHEEL_EFFECT));
+    }
+    return both;
+  }
+
+  private Judgement judgement(Operand operand) {
+    return new Judgement.Accepted(operand, remark());
+  }
+
+  private Optional<Remark> remark() {
+    Set<Kind> kinds = kinds();
+    return numerals.stream()
+        .filter(CONVERSIONS::contains)
+        .flatMap(numeral -> RATES.stream().filter(kinds::contains).map(k -> new Remark(numeral, k)))
+        .findFirst();
+  }
+
+  private static boolean isPi(Readings readings) {
+    return readings.equals(Readings.PI);
+  }
+
+  /** Turns of a power of a number; a root that does not divide them leaves a plain number. */
+  private static int turns(Readings number, Rational exponent) {
+    int turn = number.readings().stream().mapToInt(Reading::turn).max().orElse(0);
+    Rational turns = Rational.of(turn).times(exponent);
+    return turns.isInteger() ? turns.numerator().intValueExact() : 0;
+  }
+}
