@@ -79,7 +79,7 @@ public final class KindAlgebra {
   public static Judgement variablePower(Operand base, Operand exponent) {
     for (Operand operand : List.of(base, exponent)) {
       if (!isNumber(operand)) {
-        return wrong(Function.VARIABLE_POWER, operand);
+        return wrong(FunctionFamily.VARIABLE_POWER, operand);
       }
     }
     return Judgement.accepted(Readings.NUMBER);
@@ -89,12 +89,14 @@ public final class KindAlgebra {
   public static Judgement sineOf(Operand angle) {
     return angle.isZero() || angle.readings().canBe(ANGLE)
         ? Judgement.accepted(SINE)
-        : wrong(Function.SINE, angle);
+        : wrong(FunctionFamily.SINE, angle);
   }
 
   /** The angle whose sine, cosine or tangent is a number. */
   public static Judgement arcOf(Operand number) {
-    return isNumber(number) ? Judgement.accepted(Readings.of(ANGLE)) : wrong(Function.ARC, number);
+    return isNumber(number)
+        ? Judgement.accepted(Readings.of(ANGLE))
+        : wrong(FunctionFamily.ARC, number);
   }
 
   /**
@@ -106,21 +108,21 @@ public final class KindAlgebra {
     boolean cycles = readings.all(reading -> reading.tainted() && reading.turn() != 0);
     return !cycles && (isNumber(operand) || readings.canBe(ANGLE))
         ? Judgement.accepted(Readings.NUMBER)
-        : wrong(Function.EXPONENTIAL, operand);
+        : wrong(FunctionFamily.EXPONENTIAL, operand);
   }
 
   /** A logarithm of a number. */
   public static Judgement logarithmOf(Operand number) {
     return isNumber(number)
         ? Judgement.accepted(Readings.NUMBER)
-        : wrong(Function.LOGARITHM, number);
+        : wrong(FunctionFamily.LOGARITHM, number);
   }
 
   private static boolean isNumber(Operand operand) {
     return operand.readings().canBe(NUMBER);
   }
 
-  private static Judgement wrong(Function function, Operand found) {
+  private static Judgement wrong(FunctionFamily function, Operand found) {
     return Judgement.refused(new Refusal.WrongArgument(function, found.readings()));
   }
 

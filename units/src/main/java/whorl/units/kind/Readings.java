@@ -99,4 +99,42 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
     return dimension.equals(kind.dimension())
         && (isUntagged() || kinds().stream().anyMatch(kind::goesWith));
   }
+
+  /**
+   * What the quantity may be, in words, as {@code torque or energy}. Internal kinds have no words:
+   * where only those are left, or nothing is known, its unit in SI base units, as {@code kg·m²/s}.
+   */
+  public String words() {
+    List<Kind> named = namedKinds();
+    return named.isEmpty() ? unit() : joined(named.stream().map(Kind::words).toList());
+  }
+
+  /** The same as the object of a sentence: {@code a torque or an energy}. */
+  public String withArticle() {
+    List<Kind> named = namedKinds();
+    return named.isEmpty()
+        ? "a quantity in " + unit()
+        : joined(named.stream().map(Kind::withArticle).toList());
+  }
+
+  /** The unit of the quantity in SI base units and, where rotation took part, radians. */
+  public String unit() {
+    return CoherentUnit.text(this);
+  }
+
+  /** The kinds that have words; a special case of a kind that is itself there says nothing more. */
+  private List<Kind> namedKinds() {
+    List<Kind> kinds = kinds();
+    return kinds.stream()
+        .filter(kind -> !kind.isInternal())
+        .filter(kind -> kind.parent().filter(kinds::contains).isEmpty())
+        .toList();
+  }
+
+  private static String joined(List<String> words) {
+    int last = words.size() - 1;
+    return last == 0
+        ? words.get(0)
+        : String.join(", ", words.subList(0, last)) + " or " + words.get(last);
+  }
 }

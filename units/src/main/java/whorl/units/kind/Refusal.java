@@ -66,7 +66,7 @@ public sealed interface Refusal {
   }
 
   /** A function is given a quantity that it cannot take. */
-  record WrongArgument(Function function, Readings found) implements Refusal {
+  record WrongArgument(FunctionFamily function, Readings found) implements Refusal {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.wrongArgument(this);

@@ -216,6 +216,31 @@ final class RuleBook {
     return rules.turns();
   }
 
+  /**
+   * The turns with which a reading's kind would pass for a kind wanted. Kinds that differ by a turn
+   * but are quantities of their own, as torque and energy, count only where a turn is there
+   * already.
+   */
+  Set<Integer> turnsWanted(Reading reading, Kind wanted) {
+    Set<Integer> turns = new LinkedHashSet<>();
+    if (reading.kind().goesWith(wanted)) {
+      turns.add(0);
+    }
+    for (Rules.Turn turn : rules.turns()) {
+      if (turn.kind() == reading.kind()
+          && turn.readsAs().goesWith(wanted)
+          && (reading.turn() != 0 || !isOfItsOwn(turn))) {
+        turns.add(turn.turns());
+      }
+    }
+    return turns;
+  }
+
+  private boolean isOfItsOwn(Rules.Turn turn) {
+    return turn.kind() == number
+        || rules.turns().stream().anyMatch(back -> back.kind() == turn.readsAs() && back.written());
+  }
+
   /** As what a kind reads where it is a term of a power series. */
   Optional<Kind> inSeries(Kind kind) {
     return Optional.ofNullable(rules.inSeries().get(kind));

@@ -1,7 +1,7 @@
 package whorl.units.kind;
 
-/** Functions that take a quantity of one kind only. */
-public enum Function {
+/** Functions that take quantities of one kind only. */
+public enum FunctionFamily {
   /** Sine, cosine and tangent. */
   SINE,
   /** Arc sine, arc cosine and arc tangent. */
