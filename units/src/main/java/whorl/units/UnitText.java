@@ -1,5 +1,6 @@
 package whorl.units;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -14,17 +15,70 @@ public record UnitText(List<Power> over, List<Power> under) {
   /** The unit one, written {@code 1}. */
   public static final UnitText ONE = new UnitText(List.of(), List.of());
 
+  /** No unit of any trade has a larger exponent than this, of either sign. */
+  public static final int LARGEST_EXPONENT = 20;
+
   /**
    * A symbol with its exponent.
    *
-   * @param exponent not zero
+   * @param symbol not empty
+   * @param exponent not zero, at most {@value #LARGEST_EXPONENT} in size
    */
-  public record Power(String symbol, int exponent) {}
+  public record Power(String symbol, int exponent) {
+
+    /** Checks the exponent. */
+    public Power {
+      if (symbol.isEmpty()) {
+        throw new IllegalArgumentException("symbol must not be empty");
+      }
+      if (exponent == 0 || Math.abs((long) exponent) > LARGEST_EXPONENT) {
+        throw new IllegalArgumentException(
+            "exponent must be from 1 to "
+                + LARGEST_EXPONENT
+                + " in size, but that of "
+                + symbol
+                + " is "
+                + exponent);
+      }
+    }
+  }
 
   /** Copies the members. */
   public UnitText {
     over = List.copyOf(over);
     under = List.copyOf(under);
+  }
+
+  /** A text of one symbol. */
+  public static UnitText of(String symbol) {
+    return new UnitText(List.of(new Power(symbol, 1)), List.of());
+  }
+
+  /** All members in order, those behind the solidus with their exponents turned round. */
+  public List<Power> members() {
+    List<Power> members = new ArrayList<>(over);
+    for (Power member : under) {
+      members.add(new Power(member.symbol(), -member.exponent()));
+    }
+    return members;
+  }
+
+  /**
+   * The product of some powers, in their order; negative ones go behind the solidus.
+   *
+   * @param members with exponents of either sign
+   */
+  public static UnitText product(List<Power> members) {
+    List<Power> over = new ArrayList<>();
+    List<Power> under = new ArrayList<>();
+    for (Power member : members) {
+      if (member.exponent() > 0) {
+        over.add(member);
+      } else {
+        under.add(new Power(member.symbol(), -member.exponent()));
+      }
+    }
+    return new UnitText(over, under);
   }
 
   /** Canonical text for a plain keyboard, as {@code kg·m^2/s}, {@code W/(m^2·K)}, {@code 1/s}. */

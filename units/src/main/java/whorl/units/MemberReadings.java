@@ -1,0 +1,40 @@
+package whorl.units;
+
+import java.util.List;
+import whorl.units.kind.Judgement;
+import whorl.units.kind.KindAlgebra;
+import whorl.units.kind.Operand;
+import whorl.units.kind.Powered;
+import whorl.units.kind.Readings;
+
+/** Asks the rules of kinds what the product of a unit's members measures. */
+final class MemberReadings {
+
+  private MemberReadings() {}
+
+  /** The readings of a product; those of its dimension alone where the rules have no answer. */
+  static Readings of(Composition composition, Dimension dimension) {
+    List<Powered> factors =
+        composition.members().stream()
+            .map(
+                member ->
+                    new Powered(
+                        member.symbol(),
+                        Operand.of(member.row().kind()),
+                        Rational.of(member.exponent())))
+            .toList();
+    return KindAlgebra.product(factors)
+        .match(
+            new Judgement.Cases<>() {
+              @Override
+              public Readings accepted(Judgement.Accepted accepted) {
+                return accepted.operand().readings();
+              }
+
+              @Override
+              public Readings refused(Judgement.Refused refused) {
+                return Readings.untagged(dimension);
+              }
+            });
+  }
+}
