@@ -27,7 +27,7 @@ final class Combination {
     for (Reading a : first) {
       for (Reading b : second) {
         for (Result result : RULES.quotient(a.kind(), b.kind())) {
-          found.add(result.reading(a.turn() - b.turn(), a.tainted() || b.tainted()));
+          found.add(result.reading(a, b, -1));
         }
       }
     }
@@ -35,7 +35,7 @@ final class Combination {
 
   private static void addProduct(Reading first, Reading second, Set<Reading> found) {
     for (Result result : RULES.product(first.kind(), second.kind())) {
-      found.add(result.reading(first.turn() + second.turn(), first.tainted() || second.tainted()));
+      found.add(result.reading(first, second, 1));
     }
     addBareCycles(first, second, found);
     addBareCycles(second, first, found);
@@ -47,7 +47,7 @@ final class Combination {
       Reading reading = kept.getValue();
       if (cycles.kind() == reading.kind() && cycles.turn() == reading.turn()) {
         for (Result result : RULES.productOfJust(kept.getKey(), other.kind())) {
-          found.add(result.reading(other.turn(), other.tainted()));
+          found.add(result.reading(cycles, other, 1));
         }
       }
     }
@@ -70,7 +70,11 @@ final class Combination {
     Set<Reading> power = Set.of(base);
     for (int i = 1; i < exponent && !power.isEmpty(); i++) {
       Set<Reading> next = new HashSet<>();
-      addProducts(power, Set.of(base), next);
+      if (i == 1 && !RULES.square(base.kind()).isEmpty()) {
+        RULES.square(base.kind()).forEach(result -> next.add(result.reading(base, base, 1)));
+      } else {
+        addProducts(power, Set.of(base), next);
+      }
       power = next;
     }
     return power;

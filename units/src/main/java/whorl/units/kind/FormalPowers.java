@@ -1,6 +1,5 @@
 package whorl.units.kind;
 
-import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.HashMap;
 import java.util.List;
@@ -22,7 +21,8 @@ final class FormalPowers {
   private record Power(Kind base, int exponent) {}
 
   private final KindTable table;
-  private final List<Kind> formal = new ArrayList<>();
+  private final Map<Kind, Kind> roots = new HashMap<>();
+  private int formal;
   private final Map<Power, Kind> kinds = new HashMap<>();
   private final Map<Kind, Power> powers = new HashMap<>();
 
@@ -45,22 +45,35 @@ final class FormalPowers {
     if (known != null) {
       return known;
     }
+    Kind kind = formal(base, base.name() + "^" + exponent, Rational.of(exponent));
+    kinds.put(power, kind);
+    powers.put(kind, power);
+    return kind;
+  }
+
+  /** Makes a formal square root of a kind. */
+  void addRoot(Kind kind) {
+    roots.put(kind, formal(kind, "sqrt(" + kind.name() + ")", Rational.of(1, 2)));
+  }
+
+  /** The formal square root of a kind, if it has one. */
+  Optional<Kind> formalRoot(Kind kind) {
+    return Optional.ofNullable(roots.get(kind));
+  }
+
+  private Kind formal(Kind base, String name, Rational exponent) {
     Set<Kind.Mark> marks = EnumSet.of(Kind.Mark.INTERNAL);
     marks.addAll(base.marks());
-    String name = base.name() + "^" + exponent;
     var kind =
         new Kind(
-            table.kinds().size() + formal.size(),
+            table.kinds().size() + formal++,
             name,
             name,
             base.symbol(),
-            base.dimension().power(Rational.of(exponent)),
+            base.dimension().power(exponent),
             null,
             marks,
             List.of());
-    formal.add(kind);
-    kinds.put(power, kind);
-    powers.put(kind, power);
     return kind;
   }
 

@@ -25,7 +25,6 @@ public final class Kind {
   enum Mark {
     INTERNAL,
     RATE,
-    KEEPS,
     COUNT,
     ALONE
   }

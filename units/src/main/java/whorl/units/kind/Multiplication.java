@@ -21,6 +21,7 @@ final class Multiplication {
   private static final Kind TEMPERATURE = Kind.named("temperature");
   private static final List<Kind> RATES =
       List.of(Kind.named("angular_velocity"), Kind.named("frequency"));
+  private static final Kind ANGLE_TURNED = Kind.named("angle_turned");
   private static final Rational FOUR = Rational.of(4);
   private static final Rational QUARTER = Rational.of(1, 4);
 
@@ -139,20 +140,40 @@ final class Multiplication {
     return kinds;
   }
 
-  /** A flywheel effect enters no product but those that a rule names. */
+  /** A flywheel effect enters no product but with numbers and what else a rule names. */
   private Optional<Refusal> flywheelEffect() {
-    if (quantities.values().stream().noneMatch(factor -> isFlywheelEffect(factor.operand()))) {
-      return Optional.empty();
-    }
+    List<Powered> others = new ArrayList<>();
+    boolean present = false;
     for (Powered factor : quantities.values()) {
-      for (Reading reading : factor.operand().readings().readings()) {
-        if (RuleBook.STANDARD.product(FLYWHEEL_EFFECT, reading.kind()).isEmpty()
-            && RuleBook.STANDARD.quotient(FLYWHEEL_EFFECT, reading.kind()).isEmpty()) {
-          return Optional.of(new Refusal.FlywheelEffect());
-        }
+      if (isFlywheelEffect(factor.operand())) {
+        present = true;
+      } else {
+        others.add(factor);
       }
     }
-    return Optional.empty();
+    boolean fits = !present || others.isEmpty() || mayMeetFlywheelEffect(others);
+    return fits ? Optional.empty() : Optional.of(new Refusal.FlywheelEffect());
+  }
+
+  private static boolean mayMeetFlywheelEffect(List<Powered> others) {
+    return of(others)
+        .match(
+            new Judgement.Cases<>() {
+              @Override
+              public Boolean accepted(Judgement.Accepted accepted) {
+                return accepted.operand().readings().readings().stream()
+                    .map(Reading::kind)
+                    .anyMatch(
+                        kind ->
+                            !RuleBook.STANDARD.product(FLYWHEEL_EFFECT, kind).isEmpty()
+                                || !RuleBook.STANDARD.quotient(FLYWHEEL_EFFECT, kind).isEmpty());
+              }
+
+              @Override
+              public Boolean refused(Judgement.Refused refused) {
+                return false;
+              }
+            });
   }
 
   private Judgement accepted() {
@@ -179,10 +200,25 @@ final class Multiplication {
       Readings power = Raising.power(factor.operand().readings(), size);
       parts.add(new ProductSearch.Part(power.readings(), below));
     }
-    if (turn != 0 || hasNumbers || parts.stream().allMatch(ProductSearch.Part::below)) {
+    boolean allBelow = parts.stream().allMatch(ProductSearch.Part::below);
+    if (hasNumbers && turn != 0) {
+      parts.add(new ProductSearch.Part(turnsOfNumber(Math.abs(turn)), turn < 0));
+      allBelow = allBelow && turn < 0;
+    } else if (turn != 0 || hasNumbers || allBelow) {
       parts.add(new ProductSearch.Part(Readings.number(turn).readings(), false));
+      allBelow = false;
+    }
+    if (allBelow) {
+      parts.add(new ProductSearch.Part(Readings.NUMBER.readings(), false));
     }
     return parts;
+  }
+
+  /** A number times 2π may also be the angle of that number of turns. */
+  private static Set<Reading> turnsOfNumber(int turn) {
+    Set<Reading> readings = new HashSet<>(Readings.number(turn).readings());
+    readings.add(new Reading(ANGLE_TURNED, turn - 1, false));
+    return readings;
   }
 
   private Dimension dimension() {
@@ -196,18 +232,15 @@ final class Multiplication {
 
   /** GD² is four times the inertia: an exact factor tells that one is made of the other. */
   private Set<Reading> withFlywheelEffect(Set<Reading> found) {
-    long quantitiesButNumbers =
-        quantities.values().stream()
-            .filter(factor -> !factor.operand().readings().all(r -> r.kind().isNumber()))
-            .count();
-    if (!exact || quantitiesButNumbers != 1) {
+    if (!exact) {
       return found;
     }
     Set<Reading> both = new HashSet<>(found);
     if (coefficient.equals(QUARTER) && found.equals(Set.of(Reading.of(FLYWHEEL_EFFECT)))) {
       both.add(Reading.of(INERTIA));
     }
-    if (coefficient.equals(FOUR) && found.contains(Reading.of(INERTIA))) {
+    if (coefficient.dividedBy(FOUR).isInteger()
+        && found.stream().anyMatch(r -> r.kind() == INERTIA)) {
       both.add(Reading.of(FLYWHEEL_EFFECT));
     }
     return both;

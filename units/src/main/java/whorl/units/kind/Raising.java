@@ -2,6 +2,8 @@ package whorl.units.kind;
 
 import java.math.BigInteger;
 import java.util.Optional;
+import java.util.Set;
+import whorl.units.Dimension;
 import whorl.units.Rational;
 
 /** Powers and roots with an exponent known before run time. */
@@ -54,12 +56,12 @@ final class Raising {
     if (degree == 4) {
       return root(root(radicand, 2), 2);
     }
-    var root =
-        new Readings(
-            radicand.dimension().power(Rational.of(1, degree)),
-            Combination.root(radicand.readings(), degree));
+    Dimension dimension = radicand.dimension().power(Rational.of(1, degree));
+    Set<Reading> found = Combination.root(radicand.readings(), degree);
     // Whatever kind of quantity a cube of a length is, as T/τ for a shaft: its root is a length.
-    boolean unnamed = root.isUntagged() && !radicand.isUntagged();
-    return unnamed && root.dimension().equals(LENGTH.dimension()) ? Readings.of(LENGTH) : root;
+    boolean unnamed = found.isEmpty() && !radicand.isUntagged();
+    return unnamed && dimension.equals(LENGTH.dimension())
+        ? Readings.of(LENGTH)
+        : new Readings(dimension, found);
   }
 }

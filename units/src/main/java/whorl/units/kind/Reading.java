@@ -13,11 +13,11 @@ package whorl.units.kind;
  *       {@code w/(2*pi)} to a frequency.
  *   <li><b>tainted</b> says that rotation took part: a factor counted radians or cycles. Only then
  *       must the account come out even. An untainted π is the geometry of a circle, as in {@code
- *       pi*d^2/4}, and settles anywhere.
+ *       pi*d^2/4}: it settles anywhere, and ends where the section or solid meets a density, a
+ *       stress or a velocity.
  * </ul>
  *
- * <p>Normal form: kinds through which a π is not remembered have turn 0; a rotation rate is always
- * tainted.
+ * <p>Normal form: a rotation rate is always tainted.
  *
  * @param kind as what the quantity is read
  * @param turn net power of 2π unpaid
@@ -27,11 +27,7 @@ public record Reading(Kind kind, int turn, boolean tainted) {
 
   /** Brings the reading to its normal form. */
   public Reading {
-    boolean rate = kind.has(Kind.Mark.RATE);
-    tainted = tainted || rate;
-    if (!rate && !kind.has(Kind.Mark.KEEPS)) {
-      turn = 0;
-    }
+    tainted = tainted || kind.has(Kind.Mark.RATE);
   }
 
   /** The reading of a quantity that is stated to be of a kind. */

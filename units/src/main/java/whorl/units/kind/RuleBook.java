@@ -23,6 +23,7 @@ final class RuleBook {
   private final Rules rules;
   private final PairTable products = new PairTable();
   private final PairTable quotients = new PairTable();
+  private final PairTable squares = new PairTable();
   private final Map<Kind, List<Kind>> squareRoots = new HashMap<>();
 
   /** Answers worked out from the tables; a formula asks the same few again and again. */
@@ -34,28 +35,37 @@ final class RuleBook {
   private static final class PairTable {
     private final Map<Integer, List<Result>> rows = new HashMap<>();
 
+    /** Makes a row, if there is none yet. */
+    List<Result> add(Kind first, Kind second) {
+      return rows.computeIfAbsent(key(first, second), key -> new ArrayList<>(2));
+    }
+
     void add(Kind first, Kind second, Result result) {
-      List<Result> results = rows.computeIfAbsent(key(first, second), key -> new ArrayList<>(2));
+      List<Result> results = add(first, second);
       if (!results.contains(result)) {
         results.add(result);
       }
+    }
+
+    boolean has(Kind first, Kind second) {
+      return rows.containsKey(key(first, second));
     }
 
     List<Result> exactly(Kind first, Kind second) {
       return rows.getOrDefault(key(first, second), List.of());
     }
 
-    /** The rule for the kinds or, failing that, for their parents. */
-    List<Result> nearest(Kind first, Kind second) {
+    /** The rule for the kinds or, failing that, for their parents; none where no rule fits. */
+    Optional<List<Result>> nearest(Kind first, Kind second) {
       for (@Nullable Kind a = first; a != null; a = a.parent().orElse(null)) {
         for (@Nullable Kind b = second; b != null; b = b.parent().orElse(null)) {
-          List<Result> results = exactly(a, b);
-          if (!results.isEmpty()) {
-            return results;
+          @Nullable List<Result> results = rows.get(key(a, b));
+          if (results != null) {
+            return Optional.of(List.copyOf(results));
           }
         }
       }
-      return List.of();
+      return Optional.empty();
     }
   }
 
@@ -68,13 +78,15 @@ final class RuleBook {
     powers = new FormalPowers(table);
     rules = new RuleReader(powers).read(lines);
     rules.products().forEach(this::addProduct);
-    for (Rules.Rule rule : rules.quotients()) {
-      quotients.add(rule.first(), rule.second(), rule.result());
-    }
+    rules.quotients().forEach(this::addQuotient);
+    rules.squares().forEach(this::addSquare);
     for (Kind kind : table.kinds()) {
       quotients.add(kind, kind, Result.of(number));
       if (!kind.dimension().isOne() && kind.parent().isEmpty() && !kind.has(Kind.Mark.ALONE)) {
         addFormalPowers(kind);
+      }
+      if (!kind.isNumber() && !squareRoots.containsKey(kind)) {
+        powers.addRoot(kind);
       }
     }
   }
@@ -82,23 +94,48 @@ final class RuleBook {
   private void addProduct(Rules.Rule rule) {
     Kind first = rule.first();
     Kind second = rule.second();
-    Kind result = rule.result().kind();
-    products.add(first, second, rule.result());
-    products.add(second, first, rule.result());
-    if (!rule.oneWay()) {
-      quotients.add(result, first, rule.result().turnedRound(second));
-      quotients.add(result, second, rule.result().turnedRound(first));
-      if (first == second) {
-        squareRoots.computeIfAbsent(result, key -> new ArrayList<>(1)).add(first);
+    products.add(first, second);
+    products.add(second, first);
+    for (Rules.Solvable solvable : rule.results()) {
+      Result result = solvable.result();
+      Kind kind = result.kind();
+      products.add(first, second, result);
+      products.add(second, first, result.swapped());
+      if (!solvable.oneWay()) {
+        boolean firstIsSolid = result.solid() == Result.Solid.FIRST;
+        boolean secondIsSolid = result.solid() == Result.Solid.SECOND;
+        quotients.add(kind, first, result.solvedFor(second, firstIsSolid));
+        quotients.add(kind, second, result.solvedFor(first, secondIsSolid));
+        if (first == second) {
+          addRoot(kind, first);
+        }
       }
     }
   }
 
+  private void addQuotient(Rules.Rule rule) {
+    quotients.add(rule.first(), rule.second());
+    for (Rules.Solvable solvable : rule.results()) {
+      quotients.add(rule.first(), rule.second(), solvable.result());
+    }
+  }
+
+  private void addSquare(Rules.Rule rule) {
+    for (Rules.Solvable solvable : rule.results()) {
+      squares.add(rule.first(), rule.first(), solvable.result());
+      addRoot(solvable.result().kind(), rule.first());
+    }
+  }
+
+  private void addRoot(Kind square, Kind root) {
+    squareRoots.computeIfAbsent(square, key -> new ArrayList<>(1)).add(root);
+  }
+
   private void addFormalPowers(Kind kind) {
-    if (quotients.exactly(number, kind).isEmpty()) {
+    if (!quotients.has(number, kind)) {
       powers.add(kind, -1);
     }
-    if (products.exactly(kind, kind).isEmpty()) {
+    if (!products.has(kind, kind)) {
       for (int exponent : new int[] {-3, -2, 2, 3}) {
         powers.add(kind, exponent);
       }
@@ -107,7 +144,12 @@ final class RuleBook {
 
   /** What two kinds multiplied may be; empty if no rule says so. */
   List<Result> product(Kind first, Kind second) {
-    return knownProducts.computeIfAbsent(key(first, second), key -> findProduct(first, second));
+    @Nullable List<Result> known = knownProducts.get(key(first, second));
+    if (known == null) {
+      known = findProduct(first, second);
+      knownProducts.put(key(first, second), known);
+    }
+    return known;
   }
 
   /** What a rule for just these two kinds, not for their parents, makes of their product. */
@@ -116,49 +158,75 @@ final class RuleBook {
   }
 
   private List<Result> findProduct(Kind first, Kind second) {
-    List<Result> results = products.nearest(first, second);
-    if (results.isEmpty()) {
-      results = formalPower(first, second, 1);
+    Optional<List<Result>> rule = products.nearest(first, second);
+    if (rule.isPresent()) {
+      return rule.get();
     }
-    if (results.isEmpty() && powers.exponent(second) < 0 && !first.isNumber()) {
-      results = dividedByInverse(first, second);
+    if (first.isNumber() || second.isNumber()) {
+      return List.of(Result.of(second.isNumber() ? asFactor(first) : second));
     }
-    if (results.isEmpty() && powers.exponent(first) < 0 && !second.isNumber()) {
-      results = dividedByInverse(second, first);
+    List<Result> results = formalPower(first, second, 1);
+    if (results.isEmpty() && powers.exponent(second) < 0) {
+      results = overInverse(first, second);
     }
-    return results.isEmpty() ? timesNumber(first, second) : List.copyOf(results);
+    if (results.isEmpty() && powers.exponent(first) < 0) {
+      results = overInverse(second, first).stream().map(Result::swapped).toList();
+    }
+    return results;
   }
 
-  private List<Result> dividedByInverse(Kind kind, Kind inverse) {
+  /** A number that is multiplied or divided by a number is no more than a number. */
+  private Kind asFactor(Kind kind) {
+    return kind.isNumber() ? number : kind;
+  }
+
+  private List<Result> overInverse(Kind kind, Kind inverse) {
     return powers.power(inverse, -1).map(divisor -> quotient(kind, divisor)).orElse(List.of());
   }
 
-  private List<Result> timesNumber(Kind first, Kind second) {
-    if (second.isNumber()) {
-      return List.of(Result.of(first.isNumber() ? number : first));
-    }
-    return first.isNumber() ? List.of(Result.of(second)) : List.of();
+  /** What the square of one quantity may be where that says more than a product of two. */
+  List<Result> square(Kind kind) {
+    return squares.nearest(kind, kind).orElse(List.of());
   }
 
   /** What one kind divided by another may be; empty if no rule says so. */
   List<Result> quotient(Kind first, Kind second) {
-    return knownQuotients.computeIfAbsent(key(first, second), key -> findQuotient(first, second));
+    @Nullable List<Result> known = knownQuotients.get(key(first, second));
+    if (known == null) {
+      known = findQuotient(first, second);
+      knownQuotients.put(key(first, second), known);
+    }
+    return known;
   }
 
   private List<Result> findQuotient(Kind first, Kind second) {
-    List<Result> results = quotients.nearest(first, second);
-    if (!results.isEmpty()) {
-      return List.copyOf(results);
+    Optional<List<Result>> rule = quotients.nearest(first, second);
+    if (rule.isPresent()) {
+      return rule.get();
     }
     if (second.isNumber()) {
-      return List.of(Result.of(first.isNumber() ? number : first));
+      return List.of(Result.of(asFactor(first)));
     }
     if (first.isNumber()) {
-      return powers.power(base(second), -1).map(Result::of).map(List::of).orElse(List.of());
+      return powers.power(asParent(second), -1).map(Result::of).map(List::of).orElse(List.of());
     }
-    results = formalPower(first, second, -1);
+    List<Result> results = formalPower(first, second, -1);
     if (results.isEmpty() && powers.exponent(second) < 0) {
       results = powers.power(second, -1).map(factor -> product(first, factor)).orElse(List.of());
+    }
+    return results.isEmpty() ? upsideDown(first, second) : results;
+  }
+
+  /** If a/b is c, b/a is the reciprocal of c. */
+  private List<Result> upsideDown(Kind dividend, Kind divisor) {
+    List<Result> results = new ArrayList<>();
+    for (Result result : quotients.nearest(divisor, dividend).orElse(List.of())) {
+      for (Result reciprocal : quotient(number, result.kind())) {
+        // 1/t is a frequency or a rate: it says anew what is counted, so nothing follows from it.
+        if (reciprocal.equals(Result.of(reciprocal.kind()))) {
+          results.add(result.reciprocal(reciprocal.kind()));
+        }
+      }
     }
     return List.copyOf(results);
   }
@@ -175,12 +243,13 @@ final class RuleBook {
         : powers.power(base, exponent).map(Result::of).map(List::of).orElse(List.of());
   }
 
-  private static Kind base(Kind kind) {
+  private static Kind asParent(Kind kind) {
     return kind.parent().orElse(kind);
   }
 
   /**
-   * The kinds of which some root is a kind, by the rules.
+   * The kinds of which some root is a kind. Where the rules have no square root, it is a formal
+   * one, which fits no kind.
    *
    * @param degree 2 or 3
    */
@@ -192,6 +261,9 @@ final class RuleBook {
     int exponent = powers.exponent(kind);
     if (exponent != 1 && exponent % degree == 0) {
       powers.power(powers.base(kind), exponent / degree).ifPresent(roots::add);
+    }
+    if (degree == 2 && roots.isEmpty()) {
+      powers.formalRoot(kind).ifPresent(roots::add);
     }
     return List.copyOf(roots);
   }

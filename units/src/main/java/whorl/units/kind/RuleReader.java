@@ -10,17 +10,21 @@ import whorl.units.Dimension;
 
 /** Reads the rules; {@code rules.txt} says what a line may hold. */
 final class RuleReader {
-  private static final Pattern RULE = Pattern.compile("(\\S+) ([*/]) (\\S+) -> (.+)");
+  private static final Pattern RULE = Pattern.compile("(\\S+) ([*/^]) (\\S+) -> (.+)");
   private static final Pattern RESULT =
       Pattern.compile("([a-z_^0-9-]+)(?:@(-?\\d))?([#~!]?)(\\??)");
+  private static final Pattern SOLID = Pattern.compile("\\((.+)\\)");
   private static final Pattern TURN =
       Pattern.compile("(\\S+) ([+-]\\d) reads as (\\S+)( written)?");
   private static final Pattern STANDS_FOR = Pattern.compile("(\\S+) is (\\S+) ([+-]\\d)");
   private static final Pattern SERIES = Pattern.compile("series (\\S+) = (\\S+)");
 
+  private static final String NOTHING = "nothing";
+
   private final FormalPowers powers;
   private final List<Rules.Rule> products = new ArrayList<>();
   private final List<Rules.Rule> quotients = new ArrayList<>();
+  private final List<Rules.Rule> squares = new ArrayList<>();
   private final List<Rules.Turn> turns = new ArrayList<>();
   private final Map<Kind, Reading> standsFor = new HashMap<>();
   private final Map<Kind, Kind> inSeries = new HashMap<>();
@@ -31,7 +35,7 @@ final class RuleReader {
 
   Rules read(List<String> lines) {
     lines.forEach(this::readLine);
-    return new Rules(products, quotients, turns, standsFor, inSeries);
+    return new Rules(products, quotients, squares, turns, standsFor, inSeries);
   }
 
   private void readLine(String line) {
@@ -60,31 +64,55 @@ final class RuleReader {
   }
 
   private void readRule(Matcher rule) {
-    Kind first = powers.kind(rule.group(1));
-    Kind second = powers.kind(rule.group(3));
-    boolean product = rule.group(2).equals("*");
+    String operator = rule.group(2);
+    Kind first = kind(rule.group(1));
+    Kind second = operator.equals("^") ? first : kind(rule.group(3));
     Dimension dimension =
-        product
-            ? first.dimension().times(second.dimension())
-            : first.dimension().dividedBy(second.dimension());
-    for (String text : rule.group(4).split(", *", -1)) {
-      Matcher result = RESULT.matcher(text);
-      if (!result.matches()) {
-        throw new IllegalStateException("not a result of a rule: " + text);
+        operator.equals("/")
+            ? first.dimension().dividedBy(second.dimension())
+            : first.dimension().times(second.dimension());
+    Result.Solid solid =
+        isSolid(rule.group(1))
+            ? Result.Solid.FIRST
+            : isSolid(rule.group(3)) ? Result.Solid.SECOND : Result.Solid.NONE;
+    List<Rules.Solvable> results = new ArrayList<>();
+    if (!rule.group(4).equals(NOTHING)) {
+      for (String text : rule.group(4).split(", *", -1)) {
+        results.add(result(text, solid, dimension));
       }
-      Kind kind = powers.kind(result.group(1));
-      if (!kind.dimension().equals(dimension)) {
-        throw new IllegalStateException("a rule is wrong in its dimensions: " + rule.group());
-      }
-      int more = result.group(2) == null ? 0 : Integer.parseInt(result.group(2));
-      (product ? products : quotients)
-          .add(
-              new Rules.Rule(
-                  first,
-                  second,
-                  new Result(kind, more, taint(result.group(3))),
-                  !result.group(4).isEmpty()));
     }
+    rules(operator).add(new Rules.Rule(first, second, results));
+  }
+
+  private List<Rules.Rule> rules(String operator) {
+    return switch (operator) {
+      case "*" -> products;
+      case "/" -> quotients;
+      default -> squares;
+    };
+  }
+
+  private Kind kind(String operand) {
+    Matcher solid = SOLID.matcher(operand);
+    return powers.kind(solid.matches() ? solid.group(1) : operand);
+  }
+
+  private static boolean isSolid(String operand) {
+    return SOLID.matcher(operand).matches();
+  }
+
+  private Rules.Solvable result(String text, Result.Solid solid, Dimension dimension) {
+    Matcher result = RESULT.matcher(text);
+    if (!result.matches()) {
+      throw new IllegalStateException("not a result of a rule: " + text);
+    }
+    Kind kind = powers.kind(result.group(1));
+    if (!kind.dimension().equals(dimension)) {
+      throw new IllegalStateException("wrong in its dimensions: a rule with the result " + text);
+    }
+    int turns = result.group(2) == null ? 0 : Integer.parseInt(result.group(2));
+    return new Rules.Solvable(
+        new Result(kind, turns, taint(result.group(3)), solid), !result.group(4).isEmpty());
   }
 
   private static Result.Taint taint(String mark) {
