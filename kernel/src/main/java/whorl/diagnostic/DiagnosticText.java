@@ -31,7 +31,8 @@ public final class DiagnosticText {
     return String.join("\n\n", parts);
   }
 
-  private static String excerpt(Diagnostic diagnostic, Source source) {
+  /** The lines a diagnostic points at, with carets and labels under them. */
+  public static String excerpt(Diagnostic diagnostic, Source source) {
     var byLine = new TreeMap<Integer, List<Diagnostic.Label>>();
     var labels = new ArrayList<>(diagnostic.further());
     labels.add(new Diagnostic.Label(diagnostic.span(), diagnostic.label()));

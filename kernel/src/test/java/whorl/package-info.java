@@ -1,5 +1,0 @@
-/** Tests of the kernel as a whole. */
-@NullMarked
-package whorl;
-
-import org.jspecify.annotations.NullMarked;
