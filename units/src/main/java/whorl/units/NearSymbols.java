@@ -88,7 +88,17 @@ final class NearSymbols {
     if (!known.isEmpty()) {
       return Optional.of(known.get(0));
     }
-    return power(symbol).or(() -> productWithoutSign(symbol)).or(() -> word(symbol));
+    return power(symbol)
+        .or(() -> productWithoutSign(symbol))
+        .or(() -> word(symbol))
+        .or(() -> otherCase(symbol));
+  }
+
+  /** {@code khz} is {@code kHz}; {@code mw} may be two. */
+  private Optional<String> otherCase(String symbol) {
+    Set<String> found = new LinkedHashSet<>();
+    addSameLetters(symbol, found);
+    return found.size() == 1 ? found.stream().findFirst() : Optional.empty();
   }
 
   /** {@code m2} is {@code m^2}. */

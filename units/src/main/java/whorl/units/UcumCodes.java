@@ -1,9 +1,11 @@
 package whorl.units;
 
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -15,14 +17,23 @@ import org.jspecify.annotations.Nullable;
  */
 final class UcumCodes implements UcumReader.Atoms {
 
+  /** A number that is no power: at the start or behind an operator, with a member to go with. */
+  private static final Pattern NUMBER = Pattern.compile("(^|[./(])[0-9]+[*./]|[./][0-9]+$");
+
   private final UnitCatalogue catalogue;
   private final Map<String, CatalogueRow> byCode = new HashMap<>();
+
+  /** Codes that no other notation could express, since a unit has no numeric factors. */
+  private final List<String> numericCodes = new ArrayList<>();
 
   UcumCodes(UnitCatalogue catalogue, List<CatalogueRow> rows) {
     this.catalogue = catalogue;
     for (CatalogueRow row : rows) {
       for (String code : row.ucum()) {
         byCode.putIfAbsent(code, row);
+        if (NUMBER.matcher(code).find()) {
+          numericCodes.add(code);
+        }
       }
     }
   }
@@ -51,6 +62,20 @@ final class UcumCodes implements UcumReader.Atoms {
       }
     }
     return null;
+  }
+
+  @Override
+  public String numericCode(String code, int start) {
+    String longest = "";
+    for (String candidate : numericCodes) {
+      int end = start + candidate.length();
+      boolean whole =
+          end == code.length() || (end < code.length() && "./)".indexOf(code.charAt(end)) >= 0);
+      if (whole && candidate.length() > longest.length() && code.startsWith(candidate, start)) {
+        longest = candidate;
+      }
+    }
+    return longest;
   }
 
   @Override

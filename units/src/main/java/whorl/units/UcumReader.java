@@ -2,6 +2,7 @@ package whorl.units;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import whorl.units.UnitSyntaxException.Reason;
@@ -34,6 +35,9 @@ final class UcumReader {
     /** The unit of an atom with its prefix; null if there is none. */
     @Nullable UnitText unit(String atom);
 
+    /** The longest code with a number in it that stands here for a unit of its own; or empty. */
+    String numericCode(String code, int start);
+
     /** Whether a symbol of the catalogue may take a prefix. */
     boolean takesPrefix(String symbol);
   }
@@ -52,7 +56,7 @@ final class UcumReader {
 
   /** Whether a code is an atom, which may be raised to a power, and no term. */
   static boolean isAtom(String code) {
-    return endOfAtom(code, 0) == code.length();
+    return code.charAt(0) != '{' && endOfAtom(code, 0) == code.length();
   }
 
   UnitText unit() {
@@ -89,18 +93,28 @@ final class UcumReader {
       at++;
       direction = -sign;
     }
-    component(direction);
+    component(direction, direction == sign);
     while (peek() == '.' || peek() == '/') {
-      direction = peek() == '/' ? -sign : sign;
+      boolean multiplied = peek() == '.';
       at++;
-      component(direction);
+      component(multiplied ? sign : -sign, multiplied);
     }
     depth--;
   }
 
-  private void component(int sign) {
+  /**
+   * Reads a component.
+   *
+   * @param multiplied whether what follows on the right could as well stand in one parenthesis with
+   *     it, so that a code of several members may be taken as one
+   */
+  private void component(int sign, boolean multiplied) {
     int start = at;
-    if (peek() == '(') {
+    String numeric = multiplied ? atoms.numericCode(code, at) : "";
+    if (!numeric.isEmpty()) {
+      at += numeric.length();
+      add(Objects.requireNonNull(atoms.unit(numeric)), sign, start);
+    } else if (peek() == '(') {
       at++;
       term(sign);
       if (peek() != ')') {
@@ -143,7 +157,10 @@ final class UcumReader {
           ? refused(Reason.UNKNOWN_CODE, start, at - start, null)
           : refused(Reason.ANNOTATION, start + brace, at - start - brace, withoutAnnotation(atom));
     }
-    int exponent = sign * power(at, UnitText.LARGEST_EXPONENT);
+    add(unit, sign * power(at, UnitText.LARGEST_EXPONENT), start);
+  }
+
+  private void add(UnitText unit, int exponent, int start) {
     for (UnitText.Power member : unit.members()) {
       members.add(power(member, exponent, start));
     }

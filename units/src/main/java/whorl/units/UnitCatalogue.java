@@ -39,6 +39,9 @@ public final class UnitCatalogue {
    */
   private static final int MOST_REMEMBERED = 4096;
 
+  /** Sum of the sizes of all exponents; a bound on the work for an exact factor. */
+  private static final int HIGHEST_DEGREE = 1000;
+
   private final List<CatalogueRow> rows;
   private final Symbols symbols;
   private final Map<String, List<CatalogueRow>> byKey = new HashMap<>();
@@ -120,6 +123,8 @@ public final class UnitCatalogue {
    * The unit of a text.
    *
    * @throws UnknownUnitException if a symbol is not known
+   * @throws UnitSyntaxException if the exponents of all members together are beyond any unit, which
+   *     no text that {@link UnitReader} reads with fewer than ten members can be
    */
   public Unit resolve(UnitText text) {
     @Nullable Unit known = resolved.get(text);
@@ -188,7 +193,12 @@ public final class UnitCatalogue {
 
   Composition composition(UnitText text) {
     List<Member> members = new ArrayList<>();
+    long degree = 0;
     for (UnitText.Power power : text.members()) {
+      degree += Math.abs((long) power.exponent());
+      if (degree > HIGHEST_DEGREE) {
+        throw UnitSyntaxException.tooLong(text.plain());
+      }
       List<Member> found = symbols.members(power.symbol());
       if (found.isEmpty()) {
         throw unknown(power.symbol());
@@ -239,11 +249,6 @@ public final class UnitCatalogue {
   /** The unit in which a quantity of a kind is usually shown. */
   public Unit usual(Kind kind) {
     return kindUnits.get().usual(kind);
-  }
-
-  /** The product of SI base units of a dimension; empty where a root of a unit would be needed. */
-  public Optional<Unit> coherent(Dimension dimension) {
-    return KindUnits.ofBaseUnits(dimension).map(this::resolve);
   }
 
   /** The units of a kind, as they stand in the catalogue; those of the parent if it has none. */

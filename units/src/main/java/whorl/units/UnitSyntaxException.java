@@ -68,6 +68,11 @@ public final class UnitSyntaxException extends IllegalArgumentException {
     this.suggestion = suggestion;
   }
 
+  static UnitSyntaxException tooLong(String text) {
+    int length = text.codePointCount(0, text.length());
+    return new UnitSyntaxException(Reason.TOO_LONG, text, 0, length, null);
+  }
+
   /** Why the text is refused. */
   public Reason reason() {
     return reason;

@@ -15,29 +15,24 @@ public record UnitText(List<Power> over, List<Power> under) {
   /** The unit one, written {@code 1}. */
   public static final UnitText ONE = new UnitText(List.of(), List.of());
 
-  /** No unit of any trade has a larger exponent than this, of either sign. */
-  public static final int LARGEST_EXPONENT = 20;
+  /** The largest exponent that is read, of either sign. */
+  public static final int LARGEST_EXPONENT = 99;
 
   /**
    * A symbol with its exponent.
    *
    * @param symbol not empty
-   * @param exponent not zero, at most {@value #LARGEST_EXPONENT} in size
+   * @param exponent not zero
    */
   public record Power(String symbol, int exponent) {
 
-    /** Checks the exponent. */
+    /** Checks both. */
     public Power {
-      if (symbol.isEmpty()) {
-        throw new IllegalArgumentException("symbol must not be empty");
-      }
-      if (exponent == 0 || Math.abs((long) exponent) > LARGEST_EXPONENT) {
+      if (symbol.isEmpty() || exponent == 0) {
         throw new IllegalArgumentException(
-            "exponent must be from 1 to "
-                + LARGEST_EXPONENT
-                + " in size, but that of "
+            "a member must have a symbol and an exponent that is not zero, but is \""
                 + symbol
-                + " is "
+                + "\"^"
                 + exponent);
       }
     }

@@ -94,7 +94,7 @@ class UnitReaderTest {
     "m^0, EXPONENT, 1, 2, ",
     "m⁻, EXPONENT, 1, 1, ",
     "m^2^3, EXPONENT, 3, 1, ",
-    "m^21, EXPONENT_RANGE, 1, 3, ",
+    "m^100, EXPONENT_RANGE, 1, 4, ",
     "m^99999999999, EXPONENT_RANGE, 1, 12, ",
     "5 m, NUMBER, 0, 1, ",
     "10³ kg, NUMBER, 0, 1, ",
