@@ -16,6 +16,8 @@ final class KindUnits {
   /** A value from here on is written without a zero in front. */
   private static final double SMALLEST_READABLE = 1;
 
+  private static final double LARGEST_READABLE = 999;
+
   private static final double BEYOND_READABLE = 1000;
 
   private record Line(UnitText coherent, UnitText usual, List<UnitText> multiples) {}
@@ -92,12 +94,12 @@ final class KindUnits {
         .orElse(List.of());
   }
 
-  /** How many powers of ten a value is away from a readable size. */
+  /** How many powers of ten a value is away from a readable size; more than zero from 1000 on. */
   private static double decadesOff(double value) {
     double size = Math.abs(value);
     if (size < SMALLEST_READABLE) {
       return Math.log10(SMALLEST_READABLE / size);
     }
-    return size < BEYOND_READABLE ? 0 : Math.log10(size / BEYOND_READABLE) + Double.MIN_NORMAL;
+    return size < BEYOND_READABLE ? 0 : Math.log10(size / LARGEST_READABLE);
   }
 }

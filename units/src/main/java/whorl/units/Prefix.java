@@ -33,6 +33,9 @@ enum Prefix {
   RONTO("ronto", "r", -27),
   QUECTO("quecto", "q", -30);
 
+  /** Length of the longest symbol, {@code da}. */
+  static final int LONGEST = 2;
+
   private static final Map<String, Prefix> BY_SYMBOL = bySymbol();
 
   private final String word;
@@ -59,9 +62,6 @@ enum Prefix {
   static @Nullable Prefix of(String symbol) {
     return BY_SYMBOL.get(symbol);
   }
-
-  /** Length of the longest symbol, {@code da}. */
-  static final int LONGEST = 2;
 
   String word() {
     return word;

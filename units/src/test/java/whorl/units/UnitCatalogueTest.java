@@ -356,6 +356,7 @@ class UnitCatalogueTest {
     // these stay as they are
     "rotational_inertia, 0.00003, kg·m^2",
     "angular_velocity, 62831, rad/s",
+    "angle, 0.0032, rad",
     "density, 7850, kg/m^3",
     "temperature, 293, degC"
   })
