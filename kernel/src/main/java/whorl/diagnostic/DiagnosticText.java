@@ -31,7 +31,8 @@ public final class DiagnosticText {
     return String.join("\n\n", parts);
   }
 
-  private static String excerpt(Diagnostic diagnostic, Source source) {
+  /** The lines a diagnostic points at, with carets and labels under them. */
+  public static String excerpt(Diagnostic diagnostic, Source source) {
     var byLine = new TreeMap<Integer, List<Diagnostic.Label>>();
     var labels = new ArrayList<>(diagnostic.further());
     labels.add(new Diagnostic.Label(diagnostic.span(), diagnostic.label()));
@@ -74,25 +75,28 @@ public final class DiagnosticText {
       carets.append("^".repeat(Math.max(1, end - start)));
     }
     rows.add(margin + carets);
-    // Labels stand under their carets; one that would run into the next takes a row of its own.
+    // Labels stand under their carets, from the right; one that would run into the label to its
+    // right takes a row of its own.
     var row = new StringBuilder();
+    int rightNeighbour = Integer.MAX_VALUE;
     for (int i = labels.size() - 1; i >= 0; i--) {
-      var label = labels.get(i);
-      if (label.text().isEmpty()) {
+      String words = labels.get(i).text();
+      if (words.isEmpty()) {
         continue;
       }
-      int start = clamp(label.span().start() - whole.start() - from, to - from) + shift;
-      var below = new StringBuilder();
-      pad(below, start);
-      below.append(label.text());
-      if (row.length() > below.length() + 1) {
-        row.replace(0, below.length(), below.toString());
-      } else {
-        if (row.length() > 0) {
-          rows.add(margin + row);
-        }
-        row = below;
+      int start = clamp(labels.get(i).span().start() - whole.start() - from, to - from) + shift;
+      int end = start + words.codePointCount(0, words.length());
+      if (end >= rightNeighbour) {
+        rows.add(margin + row);
+        row = new StringBuilder();
       }
+      if (row.length() == 0) {
+        pad(row, start);
+        row.append(words);
+      } else {
+        row.replace(start, end, words);
+      }
+      rightNeighbour = start;
     }
     if (row.length() > 0) {
       rows.add(margin + row);

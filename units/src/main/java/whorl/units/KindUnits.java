@@ -46,7 +46,8 @@ final class KindUnits {
   Unit usual(Kind kind) {
     return line(kind)
         .map(line -> unit(line.usual(), kind))
-        .orElseGet(() -> catalogue.resolve(ofBaseUnits(kind.dimension())).serving(kind));
+        .orElseGet(
+            () -> catalogue.resolve(ofBaseUnits(kind.dimension()).orElseThrow()).serving(kind));
   }
 
   /** The coherent unit of a kind, as the trade writes it; empty for kinds that have no name. */
@@ -60,15 +61,19 @@ final class KindUnits {
         .orElseThrow(() -> new IllegalStateException(text + " is no unit of " + kind));
   }
 
-  private static UnitText ofBaseUnits(Dimension dimension) {
+  /** The base units of a dimension; empty where a root of one would be needed. */
+  static Optional<UnitText> ofBaseUnits(Dimension dimension) {
     List<UnitText.Power> members = new ArrayList<>();
     for (Dimension.Base base : Dimension.Base.values()) {
       Rational exponent = dimension.exponent(base);
+      if (!exponent.isInteger()) {
+        return Optional.empty();
+      }
       if (!exponent.isZero()) {
         members.add(new UnitText.Power(base.unit(), exponent.numerator().intValueExact()));
       }
     }
-    return UnitText.product(members);
+    return Optional.of(UnitText.product(members));
   }
 
   /** The multiple of the usual unit of a kind that suits a value best. */

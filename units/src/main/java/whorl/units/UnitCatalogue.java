@@ -251,6 +251,11 @@ public final class UnitCatalogue {
     return kindUnits.get().usual(kind);
   }
 
+  /** The product of SI base units of a dimension; empty where a root of a unit would be needed. */
+  public Optional<Unit> coherent(Dimension dimension) {
+    return KindUnits.ofBaseUnits(dimension).map(this::resolve);
+  }
+
   /** The units of a kind, as they stand in the catalogue; those of the parent if it has none. */
   public List<Unit> unitsOf(Kind kind) {
     List<Unit> units = new ArrayList<>();

@@ -1,0 +1,89 @@
+package whorl.check;
+
+import java.util.List;
+import whorl.syntax.Expr;
+import whorl.units.Unit;
+
+/** A checked statement. */
+public sealed interface Checked {
+  /** The names that go into its frame, in order of first mention. */
+  List<Meaning.Input> inputs();
+
+  /** Number of doubles in its frame. */
+  int frameSize();
+
+  /** A definition or a shown expression. */
+  record Value(List<Meaning.Input> inputs, int frameSize, Formula formula) implements Checked {
+    /** Copies the list. */
+    public Value {
+      inputs = List.copyOf(inputs);
+    }
+  }
+
+  /** A function; its inputs are what its body reads from the sheet. */
+  record Function(List<Meaning.Input> inputs, int frameSize, Meaning.Function meaning, String kind)
+      implements Checked {
+    /** Copies the list. */
+    public Function {
+      inputs = List.copyOf(inputs);
+    }
+  }
+
+  /** A check or an assumption. */
+  record Condition(List<Meaning.Input> inputs, int frameSize, Clause clause) implements Checked {
+    /** Copies the list. */
+    public Condition {
+      inputs = List.copyOf(inputs);
+    }
+  }
+
+  /**
+   * A hand-worked value to be reproduced.
+   *
+   * @param relative whether {@code within} is a fraction of the stated value; otherwise it is of
+   *     its kind
+   */
+  record Reproduction(
+      List<Meaning.Input> inputs,
+      int frameSize,
+      Formula value,
+      Formula stated,
+      Formula within,
+      boolean relative)
+      implements Checked {
+    /** Copies the list. */
+    public Reproduction {
+      inputs = List.copyOf(inputs);
+    }
+  }
+
+  /** A condition taken apart into its comparisons, so that each can be shown with its numbers. */
+  sealed interface Clause {
+    /**
+     * A comparison of two numbers.
+     *
+     * @param margin the unit that the margin is shown in
+     */
+    record Compared(Expr.Comparison text, Formula left, Formula right, Unit margin)
+        implements Clause {}
+
+    /** All must hold. */
+    record All(List<Clause> clauses) implements Clause {
+      /** Copies the list. */
+      public All {
+        clauses = List.copyOf(clauses);
+      }
+    }
+
+    /** One must hold. */
+    record Any(List<Clause> clauses) implements Clause {
+      /** Copies the list. */
+      public Any {
+        clauses = List.copyOf(clauses);
+      }
+    }
+
+    /** A condition with no comparison of its own, such as a name. */
+    record Plain(Operation.Truth operation) implements Clause {}
+  }
+}

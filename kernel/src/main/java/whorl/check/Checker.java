@@ -1,0 +1,217 @@
+package whorl.check;
+
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import whorl.diagnostic.Diagnostic;
+import whorl.syntax.Expr;
+import whorl.syntax.Statement;
+import whorl.units.Unit;
+import whorl.units.kind.Readings;
+
+/**
+ * Checks a statement once: characters, dimensions, kinds, calls. Every name that it uses must have
+ * a meaning in the scope, and {@link Availability} must have passed it.
+ */
+public final class Checker {
+  private final Scope scope;
+
+  /** A checker that knows the names of a scope. */
+  public Checker(Scope scope) {
+    this.scope = scope;
+  }
+
+  /** What a check came to. */
+  public sealed interface Result {
+    /** The statement is sound. */
+    record Passed(Checked checked) implements Result {}
+
+    /** The first mistake in it. */
+    record Refused(Diagnostic diagnostic) implements Result {}
+  }
+
+  /** Checks a statement. */
+  public Result check(Statement statement) {
+    try {
+      return new Result.Passed(checked(statement));
+    } catch (CheckFailure failure) {
+      return new Result.Refused(failure.among(readings(statement)));
+    }
+  }
+
+  /** The names that a suggestion may use: parameters, then the sheet's. */
+  private Map<String, Readings> readings(Statement statement) {
+    var readings = new LinkedHashMap<String, Readings>();
+    for (String name : scope.names()) {
+      if (scope.meaning(name).orElse(null) instanceof Meaning.Quantity quantity) {
+        if (quantity.type() instanceof Type.Real real) {
+          readings.put(name, real.readings());
+        } else if (quantity.type() instanceof Type.Vector vector) {
+          readings.put(name, vector.readings());
+        }
+      }
+    }
+    if (statement instanceof Statement.Function function) {
+      for (Statement.Parameter parameter : function.parameters()) {
+        Meaning.Parameter checked = parameter(parameter);
+        readings.put(checked.name(), checked.readings());
+      }
+    }
+    return readings;
+  }
+
+  private Checked checked(Statement statement) {
+    if (statement instanceof Statement.Definition definition) {
+      return definition(definition);
+    } else if (statement instanceof Statement.Function function) {
+      return function(function);
+    } else if (statement instanceof Statement.Show show) {
+      return show(show);
+    } else if (statement instanceof Statement.Check check) {
+      return condition(check.condition());
+    } else if (statement instanceof Statement.Assumption assumption) {
+      return condition(assumption.condition());
+    } else if (statement instanceof Statement.Reproduction reproduction) {
+      return reproduction(reproduction);
+    }
+    throw new IllegalStateException("answered by Availability before the check: " + statement);
+  }
+
+  private Checked definition(Statement.Definition definition) {
+    var frame = new Frame(0);
+    var checker = new ExpressionChecker(scope, List.of(), frame);
+    Formula formula =
+        definition.bracket() == null
+            ? undeclared(checker, definition.value())
+            : declared(
+                checker,
+                definition.value(),
+                Declaration.of(definition.name(), definition.bracket()));
+    return new Checked.Value(frame.inputs(), frame.size(), formula);
+  }
+
+  private Checked show(Statement.Show show) {
+    var frame = new Frame(0);
+    var checker = new ExpressionChecker(scope, List.of(), frame);
+    Formula formula =
+        show.bracket() == null
+            ? undeclared(checker, show.value())
+            : declared(checker, show.value(), Declaration.of(null, show.bracket()));
+    return new Checked.Value(frame.inputs(), frame.size(), formula);
+  }
+
+  private Checked function(Statement.Function function) {
+    var frame = new Frame(function.parameters().size());
+    var parameters = function.parameters().stream().map(Checker::parameter).toList();
+    var checker = new ExpressionChecker(scope, parameters, frame);
+    Formula formula =
+        function.bracket() == null
+            ? undeclared(checker, function.body())
+            : declared(
+                checker, function.body(), Declaration.of(function.name(), function.bracket()));
+    String name = function.name().name();
+    var body = new Operation.Body(name, formula.operation(), frame.size());
+    var meaning =
+        new Meaning.Function(
+            name,
+            parameters,
+            formula.type(),
+            formula.unit(),
+            formula.chosen(),
+            body,
+            frame.inputs());
+    return new Checked.Function(frame.inputs(), frame.size(), meaning, formula.kind());
+  }
+
+  private static Meaning.Parameter parameter(Statement.Parameter parameter) {
+    String name = parameter.name().name();
+    if (parameter.bracket() == null) {
+      return new Meaning.Parameter(name, Unit.ONE, Readings.NUMBER);
+    }
+    var declaration = Declaration.of(parameter.name(), parameter.bracket());
+    return new Meaning.Parameter(name, declaration.unit(), declaration.usualReadings());
+  }
+
+  private Checked condition(Expr condition) {
+    var frame = new Frame(0);
+    Checked.Clause clause = clause(new ExpressionChecker(scope, List.of(), frame), condition);
+    return new Checked.Condition(frame.inputs(), frame.size(), clause);
+  }
+
+  private Checked.Clause clause(ExpressionChecker checker, Expr condition) {
+    if (condition instanceof Expr.AllOf allOf) {
+      return new Checked.Clause.All(clauses(checker, allOf.conditions()));
+    } else if (condition instanceof Expr.AnyOf anyOf) {
+      return new Checked.Clause.Any(clauses(checker, anyOf.conditions()));
+    } else if (condition instanceof Expr.Comparison comparison) {
+      ExpressionChecker.Sides sides = checker.compared(comparison);
+      Optional<Unit> left = checker.writtenUnit(comparison.left());
+      Optional<Unit> right = checker.writtenUnit(comparison.right());
+      Formula first = formula(sides.left(), left.or(() -> right));
+      Formula second = formula(sides.right(), right.or(() -> left));
+      return new Checked.Clause.Compared(
+          comparison, first, second, Kinds.marginUnit(second.unit()));
+    }
+    return new Checked.Clause.Plain(checker.condition(condition));
+  }
+
+  private List<Checked.Clause> clauses(ExpressionChecker checker, List<Expr> conditions) {
+    return conditions.stream().map(condition -> clause(checker, condition)).toList();
+  }
+
+  private Checked reproduction(Statement.Reproduction reproduction) {
+    var frame = new Frame(0);
+    var checker = new ExpressionChecker(scope, List.of(), frame);
+    Typed value = checker.number(reproduction.value(), WrittenUnits.Reach.SIDE);
+    Typed stated = checker.number(reproduction.stated(), WrittenUnits.Reach.SIDE);
+    Typed met = Kinds.meet(value, reproduction.value(), stated, reproduction.stated());
+    Typed within = checker.number(reproduction.within(), WrittenUnits.Reach.SIDE);
+    boolean relative = Kinds.isNumber(within);
+    if (!relative) {
+      Kinds.allowed(met, within, reproduction);
+    }
+    Optional<Unit> valueUnit = checker.writtenUnit(reproduction.value());
+    Optional<Unit> statedUnit = checker.writtenUnit(reproduction.stated());
+    return new Checked.Reproduction(
+        frame.inputs(),
+        frame.size(),
+        formula(value.read(met.operand()), statedUnit.or(() -> valueUnit)),
+        formula(stated.read(met.operand()), statedUnit.or(() -> valueUnit)),
+        formula(within, checker.writtenUnit(reproduction.within())),
+        relative);
+  }
+
+  private Formula undeclared(ExpressionChecker checker, Expr value) {
+    return formula(checker.check(value), checker.writtenUnit(value));
+  }
+
+  private static Formula declared(ExpressionChecker checker, Expr value, Declaration declaration) {
+    Unit unit = declaration.unit();
+    if (Expressions.isBare(value)) {
+      Typed bare = checker.check(value);
+      Typed taken = ExpressionChecker.inUnit(bare, unit, declaration.usualReadings(), value.span());
+      return declaration.formula(taken);
+    }
+    Typed typed = checker.check(value, WrittenUnits.Reach.DECLARED);
+    if (typed.operation() instanceof Operation.Truth) {
+      throw CheckMessages.conditionWithUnit(value, declaration.bracket());
+    }
+    return declaration.formula(Kinds.declared(typed, value, declaration));
+  }
+
+  private static Formula formula(Typed typed, Optional<Unit> written) {
+    if (typed.operation() instanceof Operation.Truth) {
+      return new Formula(typed.operation(), typed.type(), Unit.ONE, false, "");
+    }
+    Readings readings = typed.operand().readings();
+    return new Formula(
+        typed.operation(),
+        typed.type(),
+        written
+            .or(() -> Kinds.usualUnit(readings))
+            .orElseThrow(() -> CheckMessages.noUnit(typed.span(), readings)),
+        written.isPresent(),
+        Kinds.words(readings));
+  }
+}

@@ -1,0 +1,52 @@
+package whorl.check;
+
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import whorl.syntax.Expr;
+import whorl.syntax.Statement;
+import whorl.units.Unit;
+import whorl.units.UnitCatalogue;
+import whorl.units.kind.Kind;
+import whorl.units.kind.Readings;
+
+/**
+ * A unit declared in brackets, with the kinds that it asks for.
+ *
+ * @param name what is declared, or null for a shown expression
+ * @param wanted the kinds that fit, the usual one first; none where the unit is a compound of which
+ *     only the dimension is known
+ */
+record Declaration(
+    Expr.@Nullable Name name, Statement.Bracket bracket, Unit unit, List<Kind> wanted) {
+
+  /** Copies the list. */
+  Declaration {
+    wanted = List.copyOf(wanted);
+  }
+
+  /** Reads a bracket. */
+  static Declaration of(Expr.@Nullable Name name, Statement.Bracket bracket) {
+    Unit unit = WrittenUnits.resolve(bracket.unit(), bracket.span());
+    String words = bracket.kind();
+    if (words == null) {
+      return new Declaration(name, bracket, unit, WrittenUnits.unnamed(unit.kinds()));
+    }
+    Kind kind = Kind.find(words).orElseThrow(() -> CheckMessages.unknownKind(words, bracket, unit));
+    Unit serving =
+        UnitCatalogue.standard()
+            .resolve(bracket.unit(), kind)
+            .orElseThrow(() -> CheckMessages.kindNotInUnit(kind, bracket, unit));
+    return new Declaration(name, bracket, serving, List.of(kind));
+  }
+
+  /** What a bare number in this unit reads as. */
+  Readings usualReadings() {
+    return wanted.isEmpty() ? unit.readings() : Readings.of(wanted.get(0));
+  }
+
+  /** A value that fits, shown in the declared unit. */
+  Formula formula(Typed typed) {
+    Readings readings = typed.operand().readings();
+    return new Formula(typed.operation(), typed.type(), unit, true, Kinds.words(readings));
+  }
+}

@@ -1,0 +1,508 @@
+package whorl.check;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import whorl.diagnostic.Span;
+import whorl.syntax.Expr;
+import whorl.units.Rational;
+import whorl.units.Unit;
+import whorl.units.kind.Kind;
+import whorl.units.kind.Readings;
+
+/**
+ * Turns an expression into a checked one. The first mistake ends the check of its statement with a
+ * {@link CheckFailure}; names that have no meaning were found before.
+ */
+final class ExpressionChecker implements Expr.Cases<Typed> {
+  private static final Readings ACCELERATION = Readings.of(Kind.named("acceleration"));
+  private static final double STANDARD_FREE_FALL = 9.80665;
+
+  private final Scope scope;
+  private final List<Meaning.Parameter> parameters;
+  private final Frame frame;
+
+  /**
+   * A checker for a formula of the sheet or the body of a function.
+   *
+   * @param parameters the function's parameters, which hide names of the sheet; their slots are the
+   *     first of the frame
+   */
+  ExpressionChecker(Scope scope, List<Meaning.Parameter> parameters, Frame frame) {
+    this.scope = scope;
+    this.parameters = parameters;
+    this.frame = frame;
+  }
+
+  Typed check(Expr expr) {
+    return expr.match(this);
+  }
+
+  /**
+   * Checks an expression whose unit, where it is written out, may serve any of its kinds, because
+   * what stands beside it decides: a declared unit, a parameter, the other side of a comparison.
+   */
+  Typed check(Expr expr, WrittenUnits.Reach reach) {
+    if (expr instanceof Expr.Numeral numeral && numeral.unit() != null) {
+      return numeral(numeral, numeral.unit(), reach);
+    } else if (expr instanceof Expr.InUnit inUnit) {
+      return inUnit(inUnit, reach);
+    } else if (expr instanceof Expr.Negation negation) {
+      return negated(negation.span(), check(negation.operand(), reach));
+    }
+    return check(expr);
+  }
+
+  /** Checks an expression that must be a number. */
+  Typed number(Expr expr, WrittenUnits.Reach reach) {
+    Typed typed = check(expr, reach);
+    return switch (form(typed)) {
+      case REAL -> typed;
+      case VECTOR -> throw CheckMessages.vectorForNumber(expr);
+      case TRUTH -> throw CheckMessages.conditionForNumber(expr);
+    };
+  }
+
+  /** Checks an expression that must be a condition. */
+  Operation.Truth condition(Expr expr) {
+    Typed typed = check(expr);
+    if (typed.operation() instanceof Operation.Truth truth) {
+      return truth;
+    }
+    throw CheckMessages.notACondition(expr, typed);
+  }
+
+  private enum Form {
+    REAL,
+    VECTOR,
+    TRUTH
+  }
+
+  private static Form form(Typed typed) {
+    if (typed.type() instanceof Type.Real) {
+      return Form.REAL;
+    }
+    return typed.type() instanceof Type.Vector ? Form.VECTOR : Form.TRUTH;
+  }
+
+  private static Operation.Real real(Typed typed) {
+    return (Operation.Real) typed.operation();
+  }
+
+  private static Operation.Vector vector(Typed typed) {
+    return (Operation.Vector) typed.operation();
+  }
+
+  @Override
+  public Typed numeral(Expr.Numeral numeral) {
+    if (numeral.unit() != null) {
+      return numeral(numeral, numeral.unit(), WrittenUnits.Reach.USUAL);
+    }
+    var constant = new Operation.Constant(numeral.span(), numeral.value());
+    return new Typed(constant, new Type.Real(Readings.NUMBER), exact(numeral));
+  }
+
+  /** The exact value of a bare number, where it is of a size that rules of kinds can ask for. */
+  private static @Nullable Rational exact(Expr.Numeral numeral) {
+    double size = Math.abs(numeral.value());
+    boolean modest = size == 0 || (size > 1e-30 && size < 1e30);
+    return modest ? Rational.parse(numeral.digits()) : null;
+  }
+
+  private Typed numeral(Expr.Numeral numeral, Expr.UnitAt at, WrittenUnits.Reach reach) {
+    Unit unit = WrittenUnits.resolve(at.text(), at.span());
+    double si = unit.toSi(numeral.value());
+    if (Double.isInfinite(si)) {
+      throw CheckMessages.tooLarge(numeral.span());
+    }
+    return Typed.of(new Operation.Constant(numeral.span(), si), WrittenUnits.readings(unit, reach));
+  }
+
+  @Override
+  public Typed inUnit(Expr.InUnit inUnit) {
+    return inUnit(inUnit, WrittenUnits.Reach.USUAL);
+  }
+
+  private Typed inUnit(Expr.InUnit inUnit, WrittenUnits.Reach reach) {
+    Unit unit = WrittenUnits.resolve(inUnit.unit().text(), inUnit.unit().span());
+    Typed group = check(inUnit.group());
+    if (form(group) == Form.TRUTH) {
+      throw CheckMessages.conditionForNumber(inUnit.group());
+    }
+    Kinds.plainNumberBeforeUnit(group, inUnit);
+    return inUnit(group, unit, WrittenUnits.readings(unit, reach), inUnit.span());
+  }
+
+  /** A bare number or vector taken in a unit, with its factor folded in. */
+  static Typed inUnit(Typed bare, Unit unit, Readings readings, Span span) {
+    double factor = unit.factor().doubleValue();
+    if (bare.operation() instanceof Operation.Vector vector) {
+      var scale = new Operation.Factor(false, new Operation.Constant(span, factor));
+      return Typed.of(new Operation.Scaled(span, vector, List.of(scale)), readings);
+    }
+    Operation.Real number = real(bare);
+    if (number instanceof Operation.Constant constant) {
+      return Typed.of(new Operation.Constant(span, unit.toSi(constant.value())), readings);
+    }
+    Operation.Real scaled =
+        new Operation.Product(
+            span,
+            List.of(
+                new Operation.Factor(false, number),
+                new Operation.Factor(false, new Operation.Constant(span, factor))));
+    if (unit.isReading()) {
+      var zero = new Operation.Constant(span, unit.toSi(0));
+      scaled =
+          new Operation.Sum(
+              span, List.of(new Operation.Term(false, scaled), new Operation.Term(false, zero)));
+    }
+    return Typed.of(scaled, readings);
+  }
+
+  @Override
+  public Typed name(Expr.Name name) {
+    int slot = parameter(name.name());
+    if (slot >= 0) {
+      return Typed.of(new Operation.Input(name.span(), slot), parameters.get(slot).readings());
+    }
+    if (name.name().equals("π")) {
+      return Typed.of(new Operation.Constant(name.span(), Math.PI), Readings.PI);
+    }
+    if (name.name().equals("g_n")) {
+      return Typed.of(new Operation.Constant(name.span(), STANDARD_FREE_FALL), ACCELERATION);
+    }
+    Optional<Meaning> meaning = scope.meaning(name.name());
+    if (meaning.isEmpty()) {
+      throw Vocabulary.isFunction(name.name())
+          ? CheckMessages.functionWithoutArguments(name)
+          : new IllegalStateException("no meaning for " + name.name());
+    }
+    if (meaning.get() instanceof Meaning.Quantity quantity) {
+      Meaning.Input input = frame.input(name.name(), quantity.type(), true);
+      return new Typed(read(name.span(), input), quantity.type(), null);
+    }
+    throw CheckMessages.functionWithoutArguments(name);
+  }
+
+  /** Position of a parameter, or −1 where a name is none. */
+  private int parameter(String name) {
+    for (int i = 0; i < parameters.size(); i++) {
+      if (parameters.get(i).name().equals(name)) {
+        return i;
+      }
+    }
+    return -1;
+  }
+
+  /** The unit in which the author wrote, or declared, the value of an expression, if any. */
+  Optional<Unit> writtenUnit(Expr expr) {
+    if (expr instanceof Expr.Numeral numeral) {
+      return resolved(numeral.unit());
+    } else if (expr instanceof Expr.InUnit inUnit) {
+      return resolved(inUnit.unit());
+    } else if (expr instanceof Expr.Negation negation) {
+      return writtenUnit(negation.operand());
+    } else if (expr instanceof Expr.Magnitude magnitude) {
+      return writtenUnit(magnitude.operand());
+    } else if (expr instanceof Expr.Part part) {
+      return writtenUnit(part.of());
+    } else if (expr instanceof Expr.Name name) {
+      int slot = parameter(name.name());
+      return slot >= 0
+          ? Optional.of(parameters.get(slot).unit())
+          : scope.meaning(name.name()).flatMap(ExpressionChecker::chosenUnit);
+    } else if (expr instanceof Expr.Call call) {
+      return scope.meaning(call.function().name()).flatMap(ExpressionChecker::chosenUnit);
+    }
+    return Optional.empty();
+  }
+
+  private static Optional<Unit> resolved(Expr.@Nullable UnitAt at) {
+    return Optional.ofNullable(at).map(place -> WrittenUnits.resolve(place.text(), place.span()));
+  }
+
+  private static Optional<Unit> chosenUnit(Meaning meaning) {
+    if (meaning instanceof Meaning.Quantity quantity) {
+      return quantity.chosen() ? Optional.of(quantity.unit()) : Optional.empty();
+    }
+    var function = (Meaning.Function) meaning;
+    return function.chosen() ? Optional.of(function.unit()) : Optional.empty();
+  }
+
+  private static Operation read(Span span, Meaning.Input input) {
+    if (input.type() instanceof Type.Real) {
+      return new Operation.Input(span, input.slot());
+    }
+    return input.type() instanceof Type.Vector
+        ? new Operation.VectorInput(span, input.slot())
+        : new Operation.TruthInput(span, input.slot());
+  }
+
+  @Override
+  public Typed part(Expr.Part part) {
+    Typed whole = check(part.of());
+    if (!(whole.type() instanceof Type.Vector type)) {
+      throw CheckMessages.noParts(part, whole);
+    }
+    Operation.Axis axis =
+        switch (part.name().name()) {
+          case "x" -> Operation.Axis.X;
+          case "y" -> Operation.Axis.Y;
+          case "z" -> Operation.Axis.Z;
+          default -> throw CheckMessages.noParts(part, whole);
+        };
+    return Typed.of(new Operation.Part(part.span(), vector(whole), axis), type.readings());
+  }
+
+  @Override
+  public Typed rate(Expr.Rate rate) {
+    throw unavailable(rate);
+  }
+
+  @Override
+  public Typed inFrame(Expr.InFrame inFrame) {
+    throw unavailable(inFrame);
+  }
+
+  @Override
+  public Typed tolerance(Expr.Tolerance tolerance) {
+    throw unavailable(tolerance);
+  }
+
+  @Override
+  public Typed text(Expr.Text text) {
+    throw unavailable(text);
+  }
+
+  private static IllegalStateException unavailable(Expr expr) {
+    return new IllegalStateException("answered by Availability before the check: " + expr.span());
+  }
+
+  @Override
+  public Typed vector(Expr.Vector vector) {
+    var reach = WrittenUnits.Reach.TERM;
+    Typed x = number(vector.x(), reach);
+    Typed y = number(vector.y(), reach);
+    Typed z = number(vector.z(), reach);
+    Typed first = Kinds.meet(x, vector.x(), y, vector.y());
+    Typed all = Kinds.meet(first, vector.x(), z, vector.z());
+    return Typed.of(
+        new Operation.Parts(vector.span(), real(x), real(y), real(z)), all.operand().readings());
+  }
+
+  @Override
+  public Typed negation(Expr.Negation negation) {
+    return negated(negation.span(), check(negation.operand()));
+  }
+
+  private static Typed negated(Span span, Typed operand) {
+    Rational literal = operand.literal() == null ? null : operand.literal().negate();
+    return switch (form(operand)) {
+      case REAL ->
+          new Typed(
+              new Operation.Negation(span, real(operand)),
+              operand.type(),
+              literal,
+              operand.factors());
+      case VECTOR ->
+          new Typed(
+              new Operation.VectorNegation(span, vector(operand)),
+              operand.type(),
+              null,
+              operand.factors());
+      case TRUTH -> throw CheckMessages.conditionForNumber(span);
+    };
+  }
+
+  @Override
+  public Typed sum(Expr.Sum sum) {
+    var reach = WrittenUnits.Reach.TERM;
+    Expr.Term first = sum.terms().get(0);
+    Typed total = check(first.value(), reach);
+    var reals = new ArrayList<Operation.Term>();
+    var vectors = new ArrayList<Operation.VectorTerm>();
+    collect(first, total, reals, vectors);
+    for (int i = 1; i < sum.terms().size(); i++) {
+      Expr.Term term = sum.terms().get(i);
+      Typed next = check(term.value(), reach);
+      if (form(next) != form(total)) {
+        throw CheckMessages.mixedCharacters(first.value().span(), total, term.value().span(), next);
+      }
+      collect(term, next, reals, vectors);
+      total = Kinds.added(total, upTo(sum, i), term.subtracted(), next, term.value());
+    }
+    Operation whole =
+        vectors.isEmpty()
+            ? new Operation.Sum(sum.span(), reals)
+            : new Operation.VectorSum(sum.span(), vectors);
+    return new Typed(whole, total.type(), total.literal());
+  }
+
+  /** The first terms of a sum. */
+  private static Expr upTo(Expr.Sum sum, int count) {
+    Expr first = sum.terms().get(0).value();
+    Expr last = sum.terms().get(count - 1).value();
+    return count == 1
+        ? first
+        : new Expr.Sum(first.span().to(last.span()), sum.terms().subList(0, count));
+  }
+
+  private static void collect(
+      Expr.Term term, Typed typed, List<Operation.Term> reals, List<Operation.VectorTerm> vectors) {
+    switch (form(typed)) {
+      case REAL -> reals.add(new Operation.Term(term.subtracted(), real(typed)));
+      case VECTOR -> vectors.add(new Operation.VectorTerm(term.subtracted(), vector(typed)));
+      case TRUTH -> throw CheckMessages.conditionForNumber(term.value());
+    }
+  }
+
+  @Override
+  public Typed product(Expr.Product product) {
+    return new ProductChecker(this, product).typed();
+  }
+
+  @Override
+  public Typed power(Expr.Power power) {
+    Typed base = number(power.base(), WrittenUnits.Reach.USUAL);
+    Typed exponent = number(power.exponent(), WrittenUnits.Reach.USUAL);
+    if (exponent.literal() != null) {
+      var operation =
+          new Operation.Power(power.span(), real(base), exponent.literal().doubleValue());
+      return Kinds.power(power, base, exponent.literal(), operation);
+    }
+    return Kinds.variablePower(
+        power,
+        base,
+        exponent,
+        new Operation.VariablePower(power.span(), real(base), real(exponent)));
+  }
+
+  @Override
+  public Typed magnitude(Expr.Magnitude magnitude) {
+    Typed operand = check(magnitude.operand());
+    return magnitude(magnitude.span(), operand, magnitude.operand());
+  }
+
+  private static Typed magnitude(Span span, Typed operand, Expr source) {
+    return switch (form(operand)) {
+      case REAL ->
+          new Typed(
+              new Operation.Unary(span, Operation.UnaryFunction.ABS, real(operand)),
+              operand.type(),
+              null);
+      case VECTOR ->
+          Typed.of(new Operation.Magnitude(span, vector(operand)), operand.operand().readings());
+      case TRUTH -> throw CheckMessages.conditionForNumber(source);
+    };
+  }
+
+  @Override
+  public Typed comparison(Expr.Comparison comparison) {
+    Sides sides = compared(comparison);
+    return Typed.of(sides.truth());
+  }
+
+  /** The two sides of a comparison, each as a number of the kind in which they are compared. */
+  record Sides(Typed left, Typed right, Operation.Comparison truth) {}
+
+  Sides compared(Expr.Comparison comparison) {
+    Typed left = number(comparison.left(), WrittenUnits.Reach.SIDE);
+    Typed right = number(comparison.right(), WrittenUnits.Reach.SIDE);
+    Typed met = Kinds.meet(left, comparison.left(), right, comparison.right());
+    Operation.Relation relation =
+        switch (comparison.relation()) {
+          case LESS -> Operation.Relation.LESS;
+          case AT_MOST -> Operation.Relation.AT_MOST;
+          case MORE -> Operation.Relation.MORE;
+          case AT_LEAST -> Operation.Relation.AT_LEAST;
+        };
+    return new Sides(
+        left.read(met.operand()),
+        right.read(met.operand()),
+        new Operation.Comparison(comparison.span(), real(left), relation, real(right)));
+  }
+
+  @Override
+  public Typed allOf(Expr.AllOf allOf) {
+    return Typed.of(
+        new Operation.AllOf(
+            allOf.span(), allOf.conditions().stream().map(this::condition).toList()));
+  }
+
+  @Override
+  public Typed anyOf(Expr.AnyOf anyOf) {
+    return Typed.of(
+        new Operation.AnyOf(
+            anyOf.span(), anyOf.conditions().stream().map(this::condition).toList()));
+  }
+
+  @Override
+  public Typed choice(Expr.Choice choice) {
+    Operation.Truth condition = condition(choice.condition());
+    Typed then = check(choice.then(), WrittenUnits.Reach.TERM);
+    Typed otherwise = check(choice.otherwise(), WrittenUnits.Reach.TERM);
+    if (form(then) != form(otherwise)) {
+      throw CheckMessages.mixedCharacters(
+          choice.then().span(), then, choice.otherwise().span(), otherwise);
+    }
+    Span span = choice.span();
+    if (then.operation() instanceof Operation.Truth one
+        && otherwise.operation() instanceof Operation.Truth other) {
+      return Typed.of(new Operation.TruthChoice(span, condition, one, other));
+    }
+    Readings readings =
+        Kinds.meet(then, choice.then(), otherwise, choice.otherwise()).operand().readings();
+    return form(then) == Form.VECTOR
+        ? Typed.of(
+            new Operation.VectorChoice(span, condition, vector(then), vector(otherwise)), readings)
+        : Typed.of(new Operation.Choice(span, condition, real(then), real(otherwise)), readings);
+  }
+
+  @Override
+  public Typed truth(Expr.Truth truth) {
+    return Typed.of(new Operation.TruthConstant(truth.span(), truth.value()));
+  }
+
+  @Override
+  public Typed call(Expr.Call call) {
+    String name = call.function().name();
+    if (parameter(name) >= 0) {
+      throw CheckMessages.notAFunction(call);
+    }
+    Optional<Meaning> meaning = scope.meaning(name);
+    if (meaning.isPresent()) {
+      if (meaning.get() instanceof Meaning.Function function) {
+        return call(call, function);
+      }
+      throw CheckMessages.notAFunction(call);
+    }
+    FunctionAtHand atHand =
+        FunctionAtHand.named(name)
+            .orElseThrow(() -> new IllegalStateException("no meaning for " + name));
+    return new CallAtHand(this, call, atHand).typed();
+  }
+
+  private Typed call(Expr.Call call, Meaning.Function function) {
+    List<Expr> values = Arguments.inOrder(call, function);
+    var arguments = new ArrayList<Operation>();
+    for (int i = 0; i < values.size(); i++) {
+      Meaning.Parameter parameter = function.parameters().get(i);
+      Expr value = values.get(i);
+      Typed argument = number(value, WrittenUnits.Reach.DECLARED);
+      arguments.add(Kinds.argument(argument, value, parameter, function).operation());
+    }
+    for (Meaning.Input capture : function.captures()) {
+      Meaning.Input input = frame.input(capture.name(), capture.type(), false);
+      arguments.add(read(call.span(), input));
+    }
+    Span span = call.span();
+    Operation operation =
+        function.result() instanceof Type.Real
+            ? new Operation.Call(span, function.body(), arguments)
+            : function.result() instanceof Type.Vector
+                ? new Operation.VectorCall(span, function.body(), arguments)
+                : new Operation.TruthCall(span, function.body(), arguments);
+    return new Typed(operation, function.result(), null);
+  }
+}

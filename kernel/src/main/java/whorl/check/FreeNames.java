@@ -1,0 +1,35 @@
+package whorl.check;
+
+import java.util.LinkedHashSet;
+import java.util.Set;
+import whorl.syntax.Expr;
+import whorl.syntax.Statement;
+
+/**
+ * The names that a statement takes from the sheet, in order of first mention: not its parameters
+ * and not the constants. Functions at hand are among them, since a sheet may define one of its own.
+ */
+public final class FreeNames {
+  private FreeNames() {}
+
+  /** The names of the sheet that a statement uses. */
+  public static Set<String> in(Statement statement) {
+    var names = new LinkedHashSet<String>();
+    for (Expr expr : Expressions.of(statement)) {
+      Expressions.walk(expr, part -> collect(part, names));
+    }
+    if (statement instanceof Statement.Function function) {
+      function.parameters().forEach(parameter -> names.remove(parameter.name().name()));
+    }
+    return names;
+  }
+
+  private static void collect(Expr expr, Set<String> names) {
+    if (expr instanceof Expr.Name name && !Vocabulary.CONSTANTS.contains(name.name())) {
+      names.add(name.name());
+    }
+    if (expr instanceof Expr.Call call) {
+      names.add(call.function().name());
+    }
+  }
+}

@@ -1,0 +1,182 @@
+package whorl.check;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Span;
+import whorl.syntax.Expr;
+import whorl.syntax.Printer;
+import whorl.syntax.Statement;
+import whorl.units.Dimension;
+import whorl.units.Unit;
+import whorl.units.kind.Context;
+import whorl.units.kind.Explanation;
+import whorl.units.kind.Readings;
+import whorl.units.kind.Refusal;
+
+/**
+ * Messages for what the kind algebra refuses: its explanation, put at the place of the mistake and
+ * into the author's own names.
+ */
+final class KindMessages {
+  private KindMessages() {}
+
+  /** A part of a formula as the author wrote it. */
+  record Part(Span span, Expr expr, Typed typed) {
+    String text() {
+      return Printer.expression(expr);
+    }
+  }
+
+  static CheckFailure refused(Refusal refusal, Expr expr) {
+    return new CheckFailure(
+        names ->
+            diagnostic(
+                Explanation.of(refusal, context(names, expr).of(Printer.expression(expr))),
+                expr.span(),
+                ""));
+  }
+
+  static CheckFailure unlike(Refusal refusal, Part left, Part right) {
+    return new CheckFailure(
+        names -> {
+          Context context = context(names, left.expr(), right.expr()).of(left.text(), right.text());
+          Explanation explanation = Explanation.of(refusal, context);
+          if (lacksUnit(left, right)) {
+            explanation = missingUnit(explanation.problem(), left, right);
+          } else if (lacksUnit(right, left)) {
+            explanation = missingUnit(explanation.problem(), right, left);
+          }
+          return diagnostic(explanation, left.span(), label(left.typed()))
+              .with(right.span(), label(right.typed()));
+        });
+  }
+
+  /** Whether a part is a bare number beside a quantity with a unit. */
+  private static boolean lacksUnit(Part bare, Part other) {
+    return Expressions.isBare(bare.expr())
+        && !other.typed().operand().readings().dimension().isOne();
+  }
+
+  private static Explanation missingUnit(String problem, Part bare, Part other) {
+    String example =
+        Kinds.usualUnit(other.typed().operand().readings())
+            .map(unit -> ", such as " + inUnit(bare, unit))
+            .orElse("");
+    return new Explanation(
+        problem, "`" + bare.text() + "` has no unit.", "Write it with its unit" + example);
+  }
+
+  private static String inUnit(Part bare, Unit unit) {
+    String number = bare.expr() instanceof Expr.Numeral ? bare.text() : "(" + bare.text() + ")";
+    return number + " " + unit.text().plain();
+  }
+
+  static CheckFailure functionAtHand(Refusal refusal, String function, Part argument) {
+    return new CheckFailure(
+        names ->
+            diagnostic(
+                Explanation.of(refusal, context(names, argument.expr()).of(argument.text())),
+                argument.span(),
+                label(argument.typed())));
+  }
+
+  static CheckFailure declared(Refusal refusal, Part value, Declaration declaration) {
+    return new CheckFailure(
+        names -> {
+          Context context = context(names, value.expr()).of(value.text());
+          if (declaration.name() != null) {
+            context = context.declaring(declaration.name().name());
+          }
+          return diagnostic(
+              Explanation.of(refusal, context),
+              value.span(),
+              found(value.typed(), declaration.unit().dimension()));
+        });
+  }
+
+  static CheckFailure argument(
+      Refusal refusal, Part value, Meaning.Parameter parameter, Meaning.Function function) {
+    return new CheckFailure(
+        names -> {
+          String place = "The parameter " + parameter.name() + " of " + function.name();
+          Readings found = value.typed().operand().readings();
+          String problem =
+              place
+                  + " is "
+                  + parameter.readings().withArticle()
+                  + ", but "
+                  + found.withArticle()
+                  + " stands there.";
+          Explanation explanation =
+              Expressions.isBare(value.expr())
+                  ? new Explanation(
+                      "",
+                      "`" + value.text() + "` has no unit.",
+                      "Write it with its unit, such as " + inUnit(value, parameter.unit()))
+                  : Explanation.of(refusal, context(names, value.expr()).of(value.text()));
+          return diagnostic(
+              new Explanation(problem, explanation.reason(), explanation.fix()),
+              value.span(),
+              found(value.typed(), parameter.unit().dimension()));
+        });
+  }
+
+  static CheckFailure within(Refusal refusal, Part within, Statement.Reproduction reproduction) {
+    return new CheckFailure(
+        names ->
+            diagnostic(
+                new Explanation(
+                    "The deviation allowed behind “within” is a fraction such as 0.5 %, or a"
+                        + " quantity of the kind of the stated value.",
+                    "Here it is " + within.typed().operand().readings().withArticle() + ".", ""),
+                within.span(),
+                label(within.typed())));
+  }
+
+  private static Diagnostic diagnostic(Explanation explanation, Span span, String label) {
+    return Diagnostic.of(
+            "kind", explanation.problem(), span, explanation.reason(), explanation.fix())
+        .labelled(label);
+  }
+
+  /** What was found: its unit where the dimension is wrong, else its kind. */
+  private static String found(Typed typed, Dimension wanted) {
+    Readings readings = typed.operand().readings();
+    return readings.dimension().equals(wanted) ? Kinds.words(readings) : readings.unit();
+  }
+
+  /** The kind of a part, or its unit where only the dimension is known. */
+  private static String label(Typed typed) {
+    Readings readings = typed.operand().readings();
+    String words = Kinds.words(readings);
+    return words.isEmpty() ? readings.unit() : words;
+  }
+
+  private static Context context(Map<String, Readings> names, Expr... parts) {
+    Map<String, Readings> inside = new LinkedHashMap<>();
+    for (Expr part : parts) {
+      for (String name : namesIn(part)) {
+        Readings readings = names.get(name);
+        if (readings != null) {
+          inside.put(name, readings);
+        }
+      }
+    }
+    return Context.NONE.with(inside).among(names);
+  }
+
+  private static List<String> namesIn(Expr root) {
+    var names = new ArrayList<String>();
+    Expressions.walk(
+        root,
+        expr -> {
+          if (expr instanceof Expr.Name name) {
+            names.add(name.name());
+          }
+        });
+    return names;
+  }
+}

@@ -1,0 +1,110 @@
+package whorl.check;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import whorl.diagnostic.Span;
+import whorl.syntax.Expr;
+import whorl.units.Rational;
+
+/**
+ * Checks a product. Stretches without a product of two vectors are judged whole by the kind
+ * algebra, so that the order of factors never matters; a cross or dot product of vectors closes the
+ * stretch to its left.
+ */
+final class ProductChecker {
+  private final ExpressionChecker checker;
+  private final Expr.Product product;
+
+  /** Factors of the open stretch as the kind algebra needs them. */
+  private final KindFactors kinds = new KindFactors();
+
+  private final List<Operation.Factor> reals = new ArrayList<>();
+  private Operation.@Nullable Vector vector;
+  private Span span;
+
+  ProductChecker(ExpressionChecker checker, Expr.Product product) {
+    this.checker = checker;
+    this.product = product;
+    this.span = product.factors().get(0).value().span();
+  }
+
+  Typed typed() {
+    for (Expr.Factor factor : product.factors()) {
+      Typed next = checker.check(factor.value());
+      if (next.operation() instanceof Operation.Truth) {
+        throw CheckMessages.conditionForNumber(factor.value());
+      }
+      boolean second = next.operation() instanceof Operation.Vector && vector != null;
+      switch (factor.joint()) {
+        case TIMES -> {
+          if (second) {
+            throw CheckMessages.twoVectors(product.span(), span, factor.value());
+          }
+          take(factor, next);
+        }
+        case OVER -> {
+          if (next.operation() instanceof Operation.Vector) {
+            throw CheckMessages.overVector(factor.value());
+          }
+          take(factor, next);
+        }
+        case CROSS -> {
+          if (!second) {
+            throw CheckMessages.crossNeedsVectors(span, vector != null, factor.value());
+          }
+          close(Kinds.cross(closed(), next, upTo(factor)), factor);
+        }
+        case DOT -> {
+          if (second) {
+            close(Kinds.dot(closed(), next, upTo(factor)), factor);
+          } else {
+            take(factor, next);
+          }
+        }
+      }
+      span = span.to(factor.value().span());
+    }
+    return closed();
+  }
+
+  /** The product from its start to a factor. */
+  private Expr.Product upTo(Expr.Factor last) {
+    int end = product.factors().indexOf(last) + 1;
+    return new Expr.Product(span.to(last.value().span()), product.factors().subList(0, end));
+  }
+
+  private void take(Expr.Factor factor, Typed next) {
+    boolean divisor = factor.joint() == Expr.Joint.OVER;
+    kinds.add(factor.value(), next, divisor ? Rational.of(-1) : Rational.ONE);
+    if (next.operation() instanceof Operation.Vector operand) {
+      vector = operand;
+    } else {
+      reals.add(new Operation.Factor(divisor, (Operation.Real) next.operation()));
+    }
+  }
+
+  /** Starts a new stretch with the product of two vectors as its first factor. */
+  private void close(Typed joined, Expr.Factor last) {
+    kinds.restart(span.to(last.value().span()), joined);
+    reals.clear();
+    vector = null;
+    if (joined.operation() instanceof Operation.Vector cross) {
+      vector = cross;
+    } else {
+      reals.add(new Operation.Factor(false, (Operation.Real) joined.operation()));
+    }
+  }
+
+  private Typed closed() {
+    if (vector == null) {
+      Operation.Real whole =
+          reals.size() == 1 && !reals.get(0).divisor()
+              ? reals.get(0).value()
+              : new Operation.Product(span, reals);
+      return Kinds.product(kinds.list(), product, whole);
+    }
+    Operation.Vector whole = reals.isEmpty() ? vector : new Operation.Scaled(span, vector, reals);
+    return Kinds.product(kinds.list(), product, whole);
+  }
+}

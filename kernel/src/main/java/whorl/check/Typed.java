@@ -1,0 +1,73 @@
+package whorl.check;
+
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import whorl.diagnostic.Span;
+import whorl.units.Rational;
+import whorl.units.kind.Operand;
+import whorl.units.kind.Powered;
+import whorl.units.kind.Readings;
+
+/**
+ * A checked expression: what to work out and what comes out.
+ *
+ * @param literal the exact value, where the expression is made of bare numbers only
+ * @param factors for a product or an integer power, the factors it consists of, so that a product
+ *     around it is judged by all of them at once; empty for anything else
+ */
+record Typed(Operation operation, Type type, @Nullable Rational literal, List<Powered> factors) {
+
+  /** Copies the factors. */
+  Typed {
+    factors = List.copyOf(factors);
+  }
+
+  Typed(Operation operation, Type type, @Nullable Rational literal) {
+    this(operation, type, literal, List.of());
+  }
+
+  static Typed of(Operation.Real operation, Readings readings) {
+    return new Typed(operation, new Type.Real(readings), null);
+  }
+
+  static Typed of(Operation.Vector operation, Readings readings) {
+    return new Typed(operation, new Type.Vector(readings), null);
+  }
+
+  static Typed of(Operation.Truth operation) {
+    return new Typed(operation, new Type.Truth(), null);
+  }
+
+  /** What the kind algebra needs to know of it; only for numbers and vectors. */
+  Operand operand() {
+    if (type instanceof Type.Real real) {
+      return new Operand(real.readings(), literal);
+    } else if (type instanceof Type.Vector vector) {
+      return Operand.of(vector.readings());
+    }
+    throw new IllegalStateException("a condition has no kind of quantity");
+  }
+
+  /** The same operation with other readings. */
+  Typed read(Operand operand) {
+    return read(operation, operand);
+  }
+
+  /** Another operation of the same character, with other readings. */
+  Typed read(Operation other, Operand operand) {
+    Type read =
+        other instanceof Operation.Vector
+            ? new Type.Vector(operand.readings())
+            : new Type.Real(operand.readings());
+    return new Typed(other, read, operand.literal());
+  }
+
+  /** The same with the factors that it consists of. */
+  Typed madeOf(List<Powered> made) {
+    return new Typed(operation, type, literal, made);
+  }
+
+  Span span() {
+    return operation.span();
+  }
+}

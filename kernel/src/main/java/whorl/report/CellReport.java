@@ -1,0 +1,47 @@
+package whorl.report;
+
+import com.google.gson.JsonObject;
+import java.util.ArrayList;
+import java.util.List;
+import whorl.diagnostic.Source;
+import whorl.sheet.Step;
+
+/**
+ * The steps of a cell for people, as HTML and as text, and for tools.
+ *
+ * @param html a fragment that needs no style sheet and no script
+ * @param text the same for a terminal
+ * @param record the same at full precision, of {@link NoteRecord#MEDIA_TYPE}
+ */
+public record CellReport(String html, String text, JsonObject record) {
+
+  /**
+   * Sets the steps of a cell as one table.
+   *
+   * @param source the text of the cell
+   * @param steps its steps in order
+   * @param notices sentences for the author that belong to no step, such as that a name hides a law
+   * @param changed steps elsewhere that were recalculated because of this cell
+   */
+  public static CellReport of(
+      Source source, List<Step> steps, List<String> notices, List<Step> changed) {
+    List<Row> rows = steps.stream().map(StepRows::of).toList();
+    var html = new ArrayList<Html>();
+    var text = new ArrayList<String>();
+    if (!rows.isEmpty()) {
+      html.add(HtmlTable.of(rows, source));
+      text.add(TextTable.of(rows, source));
+    }
+    for (String notice : notices) {
+      html.add(Html.styled("div", Look.NOTE, Html.text("Note: " + notice)));
+      text.add("Note: " + notice);
+    }
+    if (!changed.isEmpty()) {
+      String words = Recalculated.words(changed);
+      html.add(Html.styled("div", Look.NOTE, Html.text(words)));
+      text.add(words);
+    }
+    return new CellReport(
+        Html.all(html).toString(), String.join("\n", text), NoteRecord.of(steps, List.of()));
+  }
+}

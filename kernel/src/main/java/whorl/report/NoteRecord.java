@@ -1,0 +1,178 @@
+package whorl.report;
+
+import com.google.gson.GsonBuilder;
+import com.google.gson.JsonArray;
+import com.google.gson.JsonElement;
+import com.google.gson.JsonObject;
+import com.google.gson.JsonPrimitive;
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.Set;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Source;
+import whorl.eval.Value;
+import whorl.sheet.Comparison;
+import whorl.sheet.Quantity;
+import whorl.sheet.Step;
+import whorl.sheet.Verdict;
+import whorl.syntax.Expr;
+import whorl.units.Unit;
+
+/**
+ * The results of a note for tools, as {@value #MEDIA_TYPE}: definitions by name, checks,
+ * assumptions and errors, in the order of the note, at full double precision.
+ */
+public final class NoteRecord implements Step.Cases<NoteRecord> {
+  /** Media type of the record. */
+  public static final String MEDIA_TYPE = "application/x-whorl-steps+json";
+
+  private final JsonObject definitions = new JsonObject();
+  private final JsonArray checks = new JsonArray();
+  private final JsonArray assumptions = new JsonArray();
+  private final JsonArray errors = new JsonArray();
+
+  private NoteRecord() {}
+
+  /**
+   * An error and where it is.
+   *
+   * @param cell position of its cell among all cells of the note, from 1
+   * @param source the text of the cell
+   */
+  public record Fault(int cell, Source source, Diagnostic diagnostic) {}
+
+  /** The record of some steps and errors. */
+  public static JsonObject of(List<Step> steps, List<Fault> faults) {
+    var record = new NoteRecord();
+    steps.forEach(step -> step.match(record));
+    faults.forEach(record::fault);
+    var object = new JsonObject();
+    object.add("definitions", record.definitions);
+    object.add("checks", record.checks);
+    object.add("assumptions", record.assumptions);
+    object.add("errors", record.errors);
+    return object;
+  }
+
+  /** A record as a file holds it: indented, with a line end behind it. */
+  public static String text(JsonObject record) {
+    return new GsonBuilder().disableHtmlEscaping().setPrettyPrinting().create().toJson(record)
+        + "\n";
+  }
+
+  @Override
+  public NoteRecord defined(Step.Defined defined) {
+    Quantity gives = defined.gives();
+    var definition = new JsonObject();
+    definition.addProperty("kind", gives.kind());
+    definition.addProperty("unit", gives.unit().symbol());
+    definition.add("value", value(gives));
+    definition.add("si", inUnit(gives.value(), gives.unit().coherent()));
+    definition.addProperty("formula", text(defined.statement().value()));
+    definitions.add(defined.statement().name().name(), definition);
+    return this;
+  }
+
+  private static JsonElement value(Quantity quantity) {
+    // An input keeps its digits; the way to SI units and back might change the last one.
+    return quantity.written() == null
+        ? inUnit(quantity.value(), quantity.unit())
+        : new JsonPrimitive(Double.valueOf(quantity.written()));
+  }
+
+  private static JsonElement inUnit(Value value, Unit unit) {
+    if (value instanceof Value.Truth truth) {
+      return new JsonPrimitive(truth.holds());
+    }
+    if (value instanceof Value.Vector vector) {
+      var parts = new JsonArray();
+      parts.add(unit.fromSi(vector.x()));
+      parts.add(unit.fromSi(vector.y()));
+      parts.add(unit.fromSi(vector.z()));
+      return parts;
+    }
+    return new JsonPrimitive(unit.fromSi(((Value.Real) value).value()));
+  }
+
+  @Override
+  public NoteRecord checked(Step.Checked checked) {
+    checks.add(judged(text(checked.statement().condition()), checked.verdict()));
+    return this;
+  }
+
+  @Override
+  public NoteRecord assumed(Step.Assumed assumed) {
+    assumptions.add(judged(text(assumed.statement().condition()), assumed.verdict()));
+    return this;
+  }
+
+  private static JsonObject judged(String text, Verdict verdict) {
+    var check = new JsonObject();
+    check.addProperty("text", text);
+    check.addProperty("holds", verdict.holds());
+    OptionalDouble share =
+        verdict.comparisons().stream()
+            .map(Comparison::share)
+            .flatMapToDouble(OptionalDouble::stream)
+            .max();
+    if (share.isPresent()) {
+      check.addProperty("share", share.getAsDouble());
+    }
+    return check;
+  }
+
+  @Override
+  public NoteRecord reproduced(Step.Reproduced reproduced) {
+    var check = new JsonObject();
+    var statement = reproduced.statement();
+    check.addProperty(
+        "text",
+        text(statement.value())
+            + " = "
+            + text(statement.stated())
+            + " within "
+            + text(statement.within()));
+    check.addProperty("holds", reproduced.holds());
+    check.add("stated", value(reproduced.stated()));
+    check.addProperty("deviation", reproduced.deviation());
+    checks.add(check);
+    return this;
+  }
+
+  @Override
+  public NoteRecord function(Step.Function function) {
+    return this;
+  }
+
+  @Override
+  public NoteRecord shown(Step.Shown shown) {
+    return this;
+  }
+
+  @Override
+  public NoteRecord waiting(Step.Waiting waiting) {
+    return this;
+  }
+
+  @Override
+  public NoteRecord broken(Step.Broken broken) {
+    return this;
+  }
+
+  private void fault(Fault fault) {
+    Source source = fault.source();
+    Diagnostic diagnostic = fault.diagnostic();
+    int start = Math.min(diagnostic.span().start(), source.length());
+    var error = new JsonObject();
+    error.addProperty("cell", fault.cell());
+    error.addProperty("line", source.line(start));
+    error.addProperty("column", source.column(start));
+    error.addProperty("length", diagnostic.span().length());
+    error.addProperty("message", diagnostic.problem());
+    errors.add(error);
+  }
+
+  private static String text(Expr expression) {
+    return FormulaText.of(FormulaLayout.of(expression, Set.of()));
+  }
+}

@@ -1,0 +1,84 @@
+package whorl.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.IntPredicate;
+
+/**
+ * Breaks a line that is too long for its column: in front of a sign such as {@code +} or {@code ≤}
+ * if one stands late enough, else at a blank, else in front of a dot, and where all fail in
+ * between. No-break spaces hold, and so do the dots of a unit.
+ */
+final class TextWrap {
+  /** Marks a place inside a word where a line may break; takes no room. */
+  static final String MAY_BREAK = "\u200B";
+
+  private static final String SIGNS = "+−±≤≥<>=≈×";
+  private static final String INDENT = "  ";
+
+  private TextWrap() {}
+
+  /** A text without the marks that say where it may break and where not. */
+  static String plain(String text) {
+    return text.replace(MAY_BREAK, "").replace('\u00A0', ' ');
+  }
+
+  /** The lines of a text; all but the first are indented. */
+  static List<String> wrap(String text, int width) {
+    var lines = new ArrayList<String>();
+    String rest = text;
+    while (TextWidth.of(rest) > width) {
+      int[] points = rest.codePoints().toArray();
+      int room = fitting(points, width);
+      int least = lines.isEmpty() ? 1 : INDENT.length() + 1;
+      int cut = cut(points, Math.max(least, room), least);
+      lines.add(new String(points, 0, cut).stripTrailing());
+      rest = INDENT + new String(points, cut, points.length - cut).stripLeading();
+    }
+    lines.add(rest);
+    return lines;
+  }
+
+  /** How many code points fit. */
+  private static int fitting(int[] points, int width) {
+    int used = 0;
+    for (int i = 0; i < points.length; i++) {
+      used += TextWidth.of(Character.toString(points[i]));
+      if (used > width) {
+        return i;
+      }
+    }
+    return points.length;
+  }
+
+  private static int cut(int[] points, int room, int least) {
+    int[] depth = depths(points);
+    IntPredicate beforeSign = i -> points[i - 1] == ' ' && SIGNS.indexOf(points[i]) >= 0;
+    IntPredicate outside = i -> depth[i] == 0 && beforeSign.test(i);
+    IntPredicate atBlank = i -> points[i] == ' ' || points[i - 1] == ' ';
+    IntPredicate beforeDot = i -> points[i] == MAY_BREAK.charAt(0);
+    IntPredicate dotOutside = i -> depth[i] == 0 && beforeDot.test(i);
+    for (IntPredicate place : List.of(outside, dotOutside, beforeSign, atBlank, beforeDot)) {
+      // A break that leaves most of the line empty is no gain over a lesser place.
+      int earliest = place == atBlank || place == beforeDot ? least : Math.max(least, room / 3);
+      for (int i = Math.min(room, points.length - 1); i >= earliest; i--) {
+        if (place.test(i)) {
+          return i;
+        }
+      }
+    }
+    return room;
+  }
+
+  /** How many parentheses are open in front of each code point. */
+  private static int[] depths(int[] points) {
+    int[] depths = new int[points.length];
+    int open = 0;
+    for (int i = 0; i < points.length; i++) {
+      open -= points[i] == ')' ? 1 : 0;
+      depths[i] = open;
+      open += points[i] == '(' ? 1 : 0;
+    }
+    return depths;
+  }
+}

@@ -1,0 +1,42 @@
+package whorl.sheet;
+
+import java.util.Optional;
+import whorl.syntax.Printer;
+
+/** Tells what a recalculation changed. */
+final class Change {
+  private Change() {}
+
+  /** A definition that came to another value. */
+  static Optional<CellOutcome.Change> between(
+      Node node, Optional<Result> before, Optional<Result> now) {
+    if (node.defines().isPresent()
+        && before.orElse(null) instanceof Result.Valued was
+        && now.orElse(null) instanceof Result.Valued is) {
+      Quantity old = Quantities.of(node, was);
+      Quantity fresh = Quantities.of(node, is);
+      return old.equals(fresh)
+          ? Optional.empty()
+          : Optional.of(new CellOutcome.Change(node.defines().get(), old, fresh));
+    }
+    return Optional.empty();
+  }
+
+  /** A check or assumption that turned. */
+  static Optional<CellOutcome.Turn> turn(Node node, Optional<Result> before, Optional<Result> now) {
+    Optional<Boolean> was = before.flatMap(Change::holds);
+    Optional<Boolean> is = now.flatMap(Change::holds);
+    return is.isEmpty() || was.isEmpty() || was.equals(is)
+        ? Optional.empty()
+        : Optional.of(new CellOutcome.Turn(Printer.statement(node.statement()), is.get()));
+  }
+
+  private static Optional<Boolean> holds(Result result) {
+    if (result instanceof Result.Judged judged) {
+      return Optional.of(judged.verdict().holds());
+    }
+    return result instanceof Result.Compared compared
+        ? Optional.of(compared.holds())
+        : Optional.empty();
+  }
+}

@@ -1,0 +1,113 @@
+package whorl.sheet;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import whorl.check.CallSites;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Source;
+import whorl.diagnostic.Span;
+import whorl.eval.NumericFailure;
+import whorl.eval.Value;
+import whorl.units.Dimension;
+
+/** The messages about formulas that have no value: the one place for their wording. */
+final class NumericMessages {
+  private NumericMessages() {}
+
+  /**
+   * Why a statement has no value.
+   *
+   * @param given what went into it
+   */
+  static Diagnostic of(NumericFailure failure, Node node, List<Given> given, Results results) {
+    boolean inBody = !failure.inFunction().isEmpty();
+    Source text = node.source();
+    Span span = failure.span();
+    if (inBody) {
+      text = results.definingNode(failure.inFunction()).map(Node::source).orElse(node.source());
+      span = CallSites.of(failure.inFunction(), node.statement()).orElse(node.statement().span());
+    }
+    String part = text.slice(failure.span());
+    String where = inBody ? "In " + failure.inFunction() + ", " : "";
+    return Diagnostic.of(
+        code(failure.reason()),
+        sentence(where, problem(failure, part)),
+        span,
+        with(given),
+        fix(failure.reason(), part));
+  }
+
+  private static String sentence(String where, String problem) {
+    return where.isEmpty()
+        ? problem.substring(0, 1).toUpperCase(java.util.Locale.ROOT) + problem.substring(1)
+        : where + problem;
+  }
+
+  private static String code(NumericFailure.Reason reason) {
+    return reason.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-');
+  }
+
+  private static String problem(NumericFailure failure, String part) {
+    String value = Digits.of(failure.operand());
+    return switch (failure.reason()) {
+      case DIVISION_BY_ZERO -> "division by zero: `" + part + "` is 0.";
+      case OVERFLOW -> "the result of `" + part + "` is too large for a number.";
+      case ROOT_OF_NEGATIVE ->
+          "the root of a negative number: `" + part + "` is " + value + " in SI units.";
+      case LOGARITHM_OF_NON_POSITIVE ->
+          "the logarithm needs a number above zero, but `" + part + "` is " + value + ".";
+      case ARC_OUT_OF_RANGE ->
+          "the sine or cosine of an angle lies between −1 and 1, but `"
+              + part
+              + "` is "
+              + value
+              + ".";
+      case DIRECTION_OF_ZERO -> "`" + part + "` has length zero, and so no direction.";
+      case ZERO_TO_NEGATIVE_POWER ->
+          "division by zero: `" + part + "` is 0 and stands under a negative power.";
+      case INTERRUPTED -> "the calculation was interrupted.";
+      case TOO_LONG -> "the calculation takes too many operations and was stopped.";
+      case TOO_DEEP -> "functions call each other too deeply.";
+    };
+  }
+
+  private static String fix(NumericFailure.Reason reason, String part) {
+    return switch (reason) {
+      case DIVISION_BY_ZERO, ZERO_TO_NEGATIVE_POWER ->
+          "Check what goes in, or treat the case by itself: if … then … else …";
+      case OVERFLOW -> "Check the units and the exponents of what goes in.";
+      case ROOT_OF_NEGATIVE, LOGARITHM_OF_NON_POSITIVE, ARC_OUT_OF_RANGE ->
+          "Check what goes in: the formula holds only where `" + part + "` is in range.";
+      case DIRECTION_OF_ZERO -> "Check what goes in.";
+      case INTERRUPTED -> "The sheet is as it was.";
+      case TOO_LONG -> "Functions that call each other many times over make many operations.";
+      case TOO_DEEP -> "Give intermediate results names of their own.";
+    };
+  }
+
+  private static String with(List<Given> given) {
+    if (given.isEmpty()) {
+      return "";
+    }
+    return given.stream()
+        .map(NumericMessages::named)
+        .flatMap(Optional::stream)
+        .collect(Collectors.joining(", ", "Here ", "."));
+  }
+
+  private static Optional<String> named(Given given) {
+    Quantity quantity = given.quantity();
+    if (!(quantity.value() instanceof Value.Real real)) {
+      return Optional.empty();
+    }
+    String digits =
+        quantity.written() == null
+            ? Digits.of(quantity.unit().fromSi(real.value()))
+            : quantity.written();
+    boolean plain =
+        quantity.unit().dimension().equals(Dimension.ONE) && quantity.unit().symbol().equals("1");
+    return Optional.of(
+        given.name() + " = " + digits + (plain ? "" : " " + quantity.unit().symbol()));
+  }
+}

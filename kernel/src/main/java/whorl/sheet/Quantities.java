@@ -1,0 +1,46 @@
+package whorl.sheet;
+
+import org.jspecify.annotations.Nullable;
+import whorl.check.Checked;
+import whorl.check.Formula;
+import whorl.eval.Value;
+import whorl.syntax.Expr;
+import whorl.syntax.Statement;
+import whorl.units.UnitText;
+
+/** Results as the sheet shows them. */
+final class Quantities {
+  private Quantities() {}
+
+  /** A value of a formula. */
+  static Quantity of(Formula formula, Value value) {
+    return new Quantity(value, formula.unit(), formula.chosen(), formula.kind(), null);
+  }
+
+  /** What a definition or shown expression came to, with its digits as written for an input. */
+  static Quantity of(Node node, Result.Valued valued) {
+    Checked.Value checked = valued.checked();
+    Formula formula = checked.formula();
+    return new Quantity(
+        valued.value(), formula.unit(), formula.chosen(), formula.kind(), written(node, formula));
+  }
+
+  private static @Nullable String written(Node node, Formula formula) {
+    if (!(node.statement() instanceof Statement.Definition definition)) {
+      return null;
+    }
+    Expr value = definition.value();
+    boolean negative = value instanceof Expr.Negation;
+    if (value instanceof Expr.Negation negation) {
+      value = negation.operand();
+    }
+    if (!(value instanceof Expr.Numeral numeral)) {
+      return null;
+    }
+    UnitText shown = formula.unit().text();
+    if (numeral.unit() != null && !numeral.unit().text().equals(shown)) {
+      return null;
+    }
+    return (negative ? "-" : "") + numeral.digits();
+  }
+}

@@ -1,0 +1,175 @@
+package whorl.sheet;
+
+import java.util.List;
+import java.util.function.Function;
+import java.util.function.Predicate;
+import java.util.stream.Collectors;
+import whorl.check.InputForm;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Span;
+import whorl.syntax.Printer;
+import whorl.syntax.Statement;
+import whorl.syntax.UnitWord;
+import whorl.units.UnitText;
+
+/** The messages about names, cells and hand-worked values: the one place for their wording. */
+final class SheetMessages {
+  private static final String ONE_DEFINITION =
+      "A name has one definition, so that the order of cells never changes a result.";
+
+  private SheetMessages() {}
+
+  static Diagnostic constant(String name, Span span) {
+    String shown = name.equals("π") ? "π (pi)" : name;
+    return Diagnostic.of(
+        "constant",
+        shown + " is a constant at hand in every sheet and cannot be defined.",
+        span,
+        "",
+        "Take another name, such as " + name + "_1.");
+  }
+
+  static Diagnostic definedAbove(String name, Span span, Node first) {
+    return Diagnostic.of(
+            "defined",
+            name
+                + " already has its definition: line "
+                + first.place().line()
+                + ", "
+                + said(first)
+                + ".",
+            span,
+            ONE_DEFINITION,
+            "Change that line, or take another name here, such as " + another(name) + ".")
+        .with(nameSpan(first.statement()), "first defined here");
+  }
+
+  static Diagnostic definedElsewhere(String name, Span span, Node first, String label) {
+    return Diagnostic.of(
+        "defined",
+        name + " already has its definition: " + label + ", " + said(first) + ".",
+        span,
+        ONE_DEFINITION,
+        "Change it there, or take another name here, such as " + another(name) + ".");
+  }
+
+  private static String another(String name) {
+    return name.contains("_") ? name + "2" : name + "_2";
+  }
+
+  private static String said(Node node) {
+    if (node.statement() instanceof Statement.Definition definition) {
+      String value = Printer.expression(definition.value());
+      String unit =
+          definition.bracket() == null || definition.bracket().unit().equals(UnitText.ONE)
+              ? ""
+              : definition.bracket().unit().typeset();
+      if (!unit.isEmpty()) {
+        unit = " " + (InputForm.isBare(definition.value()) ? unit : "[" + unit + "]");
+      }
+      return (value.length() <= 40 ? value : value.substring(0, 38) + " …") + unit;
+    }
+    return "a function";
+  }
+
+  static Diagnostic unitOrName(UnitWord word) {
+    return Diagnostic.of(
+        "unit-or-name",
+        word.name()
+            + " stands here for a unit, but this cell also defines a name "
+            + word.name()
+            + ".",
+        word.span(),
+        "A word behind a tight * or / is the unit of that spelling unless a name is meant.",
+        "For the unit write · in front of it; for the name put blanks around the sign.");
+  }
+
+  static Diagnostic readAsUnit(String name, Span span, UnitWord word, CellContent other) {
+    int line = other.source().line(word.span().start());
+    return Diagnostic.of(
+        "unit-or-name",
+        name
+            + " cannot be defined here: "
+            + other.label()
+            + ", line "
+            + line
+            + ", has read it as a unit.",
+        span,
+        "That line says: " + other.source().lineText(line).strip(),
+        "There, write · in front of "
+            + name
+            + " for the unit or put blanks around the sign for"
+            + " the name; or take another name here.");
+  }
+
+  /** A ring of definitions, reported at one of the cell that closes it. */
+  static Diagnostic cycle(
+      List<Node> ring, Predicate<Node> inThisCell, Function<CellId, String> label) {
+    int start = 0;
+    while (!inThisCell.test(ring.get(start))) {
+      start++;
+    }
+    Node here = ring.get(start);
+    String first = here.defines().orElseThrow();
+    var path = new StringBuilder(first);
+    for (int i = 1; i < ring.size(); i++) {
+      path.append(" → ").append(ring.get((start + i) % ring.size()).defines().orElseThrow());
+    }
+    path.append(" → ").append(first);
+    String elsewhere =
+        ring.stream()
+            .filter(inThisCell.negate())
+            .map(
+                node ->
+                    node.defines().orElseThrow()
+                        + " is defined in "
+                        + label.apply(node.place().cell()))
+            .sorted()
+            .collect(Collectors.joining("; "));
+    return Diagnostic.of(
+        "cycle",
+        ring.size() == 1
+            ? first + " is defined by itself."
+            : first + " depends on itself: " + path + ".",
+        nameSpan(here.statement()),
+        elsewhere.isEmpty() ? "" : elsewhere + ".",
+        "Work one of them out without the others. A value that must satisfy an equation is what"
+            + " `solve` finds; this version reads `solve` but does not work it out.");
+  }
+
+  static Diagnostic hides(Statement statement, String name) {
+    return Diagnostic.of(
+        "hides",
+        name
+            + " now means this definition; the function "
+            + name
+            + " is hidden in the whole sheet.",
+        nameSpan(statement),
+        "",
+        "Take another name if the function is wanted.");
+  }
+
+  static Diagnostic statedZero(Statement.Reproduction reproduction) {
+    return Diagnostic.of(
+        "stated-zero",
+        "The stated value is 0, so that no deviation from it can be worked out.",
+        reproduction.stated().span(),
+        "The deviation is (computed − stated)/stated.",
+        "Check the size instead: check |x| <= a small value.");
+  }
+
+  static Diagnostic negativeDeviation(Statement.Reproduction reproduction) {
+    return Diagnostic.of(
+        "negative-within",
+        "The deviation allowed is less than zero.",
+        reproduction.within().span(),
+        "",
+        "Write how far the two values may lie apart, such as within 0.5 %.");
+  }
+
+  static Span nameSpan(Statement statement) {
+    return statement instanceof Statement.Definition definition
+        ? definition.name().span()
+        : ((Statement.Function) statement).name().span();
+  }
+}

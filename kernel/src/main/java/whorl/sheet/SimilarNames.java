@@ -1,0 +1,63 @@
+package whorl.sheet;
+
+import java.util.Collection;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Locale;
+import java.util.stream.Stream;
+import whorl.check.Vocabulary;
+
+/** Finds names that are spelled like one that has no definition. */
+final class SimilarNames {
+  private static final int MOST = 4;
+
+  private final Collection<String> names;
+
+  /** Looks among the names of a sheet and those at hand in every sheet. */
+  SimilarNames(Collection<String> names) {
+    this.names = names;
+  }
+
+  /** Up to four names near to one, the nearest first; none if all are far. */
+  List<String> to(String name) {
+    int reach = Math.max(1, name.length() / 3);
+    return Stream.concat(names.stream(), Vocabulary.atHand().stream())
+        .filter(candidate -> distance(name, candidate, reach) <= reach)
+        .sorted(
+            Comparator.<String>comparingInt(candidate -> distance(name, candidate, reach))
+                .thenComparing(Comparator.naturalOrder()))
+        .limit(MOST)
+        .toList();
+  }
+
+  /**
+   * Edits that turn one name into the other (a letter added, left out, changed, or two neighbours
+   * exchanged); a change of case alone counts as none, and more than {@code reach} as one more.
+   */
+  private static int distance(String from, String to, int reach) {
+    String a = from.toLowerCase(Locale.ROOT);
+    String b = to.toLowerCase(Locale.ROOT);
+    if (Math.abs(a.length() - b.length()) > reach) {
+      return reach + 1;
+    }
+    var rows = new int[a.length() + 1][b.length() + 1];
+    for (int i = 0; i <= a.length(); i++) {
+      for (int j = 0; j <= b.length(); j++) {
+        if (i == 0 || j == 0) {
+          rows[i][j] = i + j;
+          continue;
+        }
+        int change = a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1;
+        int least =
+            Math.min(rows[i - 1][j - 1] + change, Math.min(rows[i - 1][j], rows[i][j - 1]) + 1);
+        boolean exchanged =
+            i > 1
+                && j > 1
+                && a.charAt(i - 1) == b.charAt(j - 2)
+                && a.charAt(i - 2) == b.charAt(j - 1);
+        rows[i][j] = exchanged ? Math.min(least, rows[i - 2][j - 2] + 1) : least;
+      }
+    }
+    return rows[a.length()][b.length()];
+  }
+}

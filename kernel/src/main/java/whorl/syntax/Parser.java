@@ -1,0 +1,93 @@
+package whorl.syntax;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.function.Predicate;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Source;
+import whorl.syntax.Token.Kind;
+
+/**
+ * Reads a text of the sheet language. It never fails: what cannot be read is reported, and reading
+ * goes on at the next statement.
+ */
+public final class Parser {
+  /** No more mistakes than this are reported for one text. */
+  public static final int MOST_ERRORS = 10;
+
+  /** A text longer than this, in code points, is refused as a whole. */
+  public static final int LONGEST_TEXT = 1_000_000;
+
+  private Parser() {}
+
+  /**
+   * Reads a text.
+   *
+   * @param names whether the sheet has a name, in folded spelling; the names that the text itself
+   *     defines are added here
+   * @param units what is known of units
+   */
+  public static Parsed parse(Source source, Predicate<String> names, UnitWords units) {
+    var messages = new SyntaxMessages(source);
+    if (source.length() > LONGEST_TEXT) {
+      return new Parsed(
+          List.of(), List.of(), List.of(messages.textTooLong(LONGEST_TEXT)), List.of());
+    }
+    LineSplitter.Split split = LineSplitter.split(Lexer.tokens(source, messages));
+    Set<String> own = namesDefinedIn(split.lines());
+    var errors = new ArrayList<Diagnostic>();
+    var unitWords = new ArrayList<UnitWord>();
+    var reading =
+        new Reading(
+            messages, name -> own.contains(name) || names.test(name), units, unitWords, errors);
+    List<Statement> statements = statements(split.lines(), reading);
+    var reported = errors.subList(0, Math.min(errors.size(), MOST_ERRORS));
+    return new Parsed(statements, split.remarks(), reported, unitWords);
+  }
+
+  private static List<Statement> statements(List<LogicalLine> lines, Reading reading) {
+    var statements = new ArrayList<Statement>();
+    int next = 0;
+    while (next < lines.size() && reading.errors().size() < MOST_ERRORS) {
+      LogicalLine line = lines.get(next++);
+      int end = next;
+      while (end < lines.size() && lines.get(end).isIndented()) {
+        end++;
+      }
+      List<LogicalLine> block = lines.subList(next, end);
+      next = end;
+      int before = reading.errors().size();
+      try {
+        if (line.isIndented()) {
+          throw new Refusal(Blocks.unexpected(line, reading.messages()));
+        }
+        Statement statement = StatementParser.statement(line, block, reading);
+        if (reading.errors().size() == before) {
+          statements.add(statement);
+        }
+      } catch (Refusal refusal) {
+        reading.errors().add(refusal.diagnostic());
+      }
+    }
+    return statements;
+  }
+
+  /** The names that the statements of a text define, in folded spelling. */
+  private static Set<String> namesDefinedIn(List<LogicalLine> lines) {
+    var names = new HashSet<String>();
+    for (LogicalLine line : lines) {
+      Token first = line.first();
+      if (line.isIndented() || !first.is(Kind.NAME)) {
+        continue;
+      }
+      if (first.isWord("cases")) {
+        names.addAll(Shapes.columnNames(line.tokens()));
+      } else if (!first.isReservedWord() && Shapes.defines(line.tokens())) {
+        names.add(first.name().name());
+      }
+    }
+    return names;
+  }
+}

@@ -1,0 +1,201 @@
+package whorl.report;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Set;
+import java.util.SplittableRandom;
+import org.junit.jupiter.api.Test;
+import org.w3c.dom.Element;
+import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Source;
+import whorl.diagnostic.Span;
+import whorl.sheet.Given;
+import whorl.sheet.Step;
+
+class CellReportTest {
+  private static final boolean REWRITE = Boolean.getBoolean("whorl.rewriteGolden");
+
+  /** Elements and attributes that the pages of untrusted notebooks keep. */
+  private static final Set<String> KEPT_ELEMENTS =
+      Set.of("div", "span", "table", "thead", "tbody", "tr", "th", "td", "sup", "sub", "i", "pre");
+
+  private static final Set<String> KEPT_ATTRIBUTES = Set.of("style", "title", "colspan", "scope");
+
+  /**
+   * Style properties that the pages of untrusted notebooks keep, of those that are of use here;
+   * read from the list in JupyterLab 4, {@code packages/apputils/src/sanitizer.ts}.
+   */
+  private static final Set<String> KEPT_PROPERTIES =
+      Set.of(
+          "background",
+          "border",
+          "border-bottom",
+          "border-collapse",
+          "border-left",
+          "border-right",
+          "border-top",
+          "color",
+          "display",
+          "font-family",
+          "font-size",
+          "font-style",
+          "font-weight",
+          "letter-spacing",
+          "line-height",
+          "margin",
+          "margin-left",
+          "min-width",
+          "opacity",
+          "overflow-x",
+          "padding",
+          "padding-left",
+          "page-break-inside",
+          "position",
+          "table-layout",
+          "text-align",
+          "text-indent",
+          "vertical-align",
+          "white-space",
+          "width");
+
+  private static CellReport flywheel() {
+    SampleNote note = SampleNote.flywheel();
+    return CellReport.of(
+        note.source, note.steps, List.of("I hides the law of that name"), note.steps.subList(5, 7));
+  }
+
+  @Test
+  void textIsAlignedAndRuled() throws IOException {
+    assertGolden("flywheel.txt", flywheel().text() + "\n");
+  }
+
+  @Test
+  void recordIsWhatToolsExpect() throws IOException {
+    assertGolden("flywheel.json", NoteRecord.text(flywheel().record()));
+  }
+
+  @Test
+  void pageIsAsReviewed() throws IOException {
+    // One element a line, so that a change is read where it is.
+    assertGolden("flywheel.html", flywheel().html().replace("><", ">\n<") + "\n");
+  }
+
+  private static void assertGolden(String name, String actual) throws IOException {
+    Path file = Path.of("src/test/resources/whorl/report", name);
+    if (REWRITE) {
+      Files.createDirectories(file.getParent());
+      Files.writeString(file, actual);
+    }
+    assertEquals(Files.readString(file, StandardCharsets.UTF_8), actual);
+  }
+
+  @Test
+  void noLineOfTextIsWiderThanThePage() {
+    for (String line : flywheel().text().lines().toList()) {
+      assertTrue(TextWidth.of(line) <= 108, line);
+    }
+  }
+
+  @Test
+  void anUntrustedPageKeepsEveryElementAndStyle() {
+    assertOnlyKeptMarkup(Page.of(flywheel().html()));
+  }
+
+  private static void assertOnlyKeptMarkup(Page page) {
+    for (Element element : page.elements()) {
+      assertTrue(KEPT_ELEMENTS.contains(element.getTagName()), element.getTagName());
+      for (int i = 0; i < element.getAttributes().getLength(); i++) {
+        String attribute = element.getAttributes().item(i).getNodeName();
+        assertTrue(KEPT_ATTRIBUTES.contains(attribute), attribute);
+      }
+      for (String declaration : element.getAttribute("style").split(";", -1)) {
+        if (!declaration.isEmpty()) {
+          assertTrue(KEPT_PROPERTIES.contains(declaration.split(":", 2)[0]), declaration);
+        }
+      }
+    }
+  }
+
+  @Test
+  void themeVariablesOnlyAddColourToWords() {
+    for (Element element : Page.of(flywheel().html()).elements()) {
+      for (String declaration : element.getAttribute("style").split(";", -1)) {
+        if (declaration.contains("var(")) {
+          assertTrue(declaration.startsWith("color:") && declaration.endsWith("inherit))"));
+        }
+      }
+    }
+  }
+
+  @Test
+  void textOfAUserNeverBecomesMarkup() {
+    var random = new SplittableRandom(7031);
+    String alphabet = "<>&\"'/=;:()ab \t\u0000\u001B\u202E\uD800\uDFFF\uFFFEω≈]]>";
+    for (int i = 0; i < 100; i++) {
+      var hostile = new StringBuilder("x");
+      for (int k = 0; k < 20; k++) {
+        hostile.append(alphabet.charAt(random.nextInt(alphabet.length())));
+      }
+      Page page = Page.of(report(hostile.toString()).html());
+
+      assertOnlyKeptMarkup(page);
+      assertTrue(page.text().contains(Page.of(Html.text(hostile.toString()).toString()).text()));
+    }
+  }
+
+  @Test
+  void scriptInARemarkIsShownAsTyped() {
+    CellReport report = report("<script>alert('x')</script>");
+
+    assertTrue(Page.of(report.html()).text().contains("<script>alert('x')</script>"));
+    assertFalse(report.html().contains("<script"));
+  }
+
+  /** A report with the same text wherever a user can put text. */
+  private static CellReport report(String text) {
+    var quantity = SampleNote.real(2, "kg", text);
+    Step.Defined defined =
+        SampleNote.derived(
+            "m", Trees.name(text), quantity, text, List.of(text), new Given(text, quantity));
+    var waiting =
+        new Step.Waiting(
+            defined.place(), defined.statement(), List.of(text), List.of(List.of(text)));
+    var broken =
+        new Step.Broken(
+            defined.place(),
+            defined.statement(),
+            new Diagnostic("code", text, new Span(0, 1), text, List.of(), text, text),
+            null);
+    return CellReport.of(
+        new Source("m = " + text),
+        List.of(defined, waiting, broken),
+        List.of(text),
+        List.of(waiting));
+  }
+
+  @Test
+  void everyStateIsSaidInWords() {
+    String text = flywheel().text().replaceAll("\\s+", " ");
+
+    assertTrue(text.contains("holds"));
+    assertTrue(text.contains("FAILS"));
+    assertTrue(text.contains("waits for n_O"));
+    assertTrue(text.contains("does not stand"));
+    assertTrue(text.contains("was 74.9 s, now stale"));
+  }
+
+  @Test
+  void aCellWithoutStepsLeavesNothing() {
+    CellReport report = CellReport.of(new Source(""), List.of(), List.of(), List.of());
+
+    assertEquals("", report.html());
+    assertEquals("", report.text());
+  }
+}
