@@ -115,8 +115,19 @@ final class RowGraphWriter {
 
   /** A product so far, times the value of a factor or over it. */
   int applied(int product, Factor factor, int value) {
-    return graph.apply(
-        factor.divisor() ? RowArithmetic.DIVIDE : RowArithmetic.MULTIPLY, product, value);
+    if (!factor.divisor()) {
+      return graph.apply(RowArithmetic.MULTIPLY, product, value);
+    }
+    if (graph.node(value) instanceof RowGraph.Known known && isPowerOfTwo(known.value())) {
+      // Cheaper, and the same to the bit: the reciprocal is exact.
+      return graph.apply(RowArithmetic.MULTIPLY, product, graph.known(1 / known.value()));
+    }
+    return graph.apply(RowArithmetic.DIVIDE, product, value);
+  }
+
+  private static boolean isPowerOfTwo(double value) {
+    int exponent = Math.getExponent(value);
+    return Math.abs(exponent) < Double.MAX_EXPONENT && Math.abs(value) == Math.scalb(1.0, exponent);
   }
 
   /** The nodes of a call's value. */
