@@ -99,7 +99,7 @@ final class CallAtHand {
   private Typed atan2() {
     Typed y = checker.number(argument(0), WrittenUnits.Reach.TERM);
     Typed x = checker.number(argument(1), WrittenUnits.Reach.TERM);
-    Kinds.meet(y, argument(0), x, argument(1));
+    Kinds.meet(Kinds.Together.COMPARED, y, argument(0), x, argument(1));
     return Typed.of(
         new Operation.Binary(span, Operation.BinaryFunction.ATAN2, real(y), real(x)), ANGLE);
   }
@@ -108,7 +108,7 @@ final class CallAtHand {
     Typed extreme = checker.number(argument(0), WrittenUnits.Reach.TERM);
     for (int i = 1; i < call.arguments().size(); i++) {
       Typed next = checker.number(argument(i), WrittenUnits.Reach.TERM);
-      Typed met = Kinds.meet(extreme, argument(i - 1), next, argument(i));
+      Typed met = Kinds.meet(Kinds.Together.COMPARED, extreme, argument(i - 1), next, argument(i));
       extreme =
           Typed.of(
               new Operation.Binary(span, operation, real(extreme), real(next)),

@@ -165,7 +165,9 @@ public final class Checker {
     var checker = new ExpressionChecker(scope, List.of(), frame);
     Typed value = checker.number(reproduction.value(), WrittenUnits.Reach.SIDE);
     Typed stated = checker.number(reproduction.stated(), WrittenUnits.Reach.SIDE);
-    Typed met = Kinds.meet(value, reproduction.value(), stated, reproduction.stated());
+    Typed met =
+        Kinds.meet(
+            Kinds.Together.COMPARED, value, reproduction.value(), stated, reproduction.stated());
     Typed within = checker.number(reproduction.within(), WrittenUnits.Reach.SIDE);
     boolean relative = Kinds.isNumber(within);
     if (!relative) {

@@ -285,8 +285,8 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     Typed x = number(vector.x(), reach);
     Typed y = number(vector.y(), reach);
     Typed z = number(vector.z(), reach);
-    Typed first = Kinds.meet(x, vector.x(), y, vector.y());
-    Typed all = Kinds.meet(first, vector.x(), z, vector.z());
+    Typed first = Kinds.meet(Kinds.Together.PARTS, x, vector.x(), y, vector.y());
+    Typed all = Kinds.meet(Kinds.Together.PARTS, first, vector.x(), z, vector.z());
     return Typed.of(
         new Operation.Parts(vector.span(), real(x), real(y), real(z)), all.operand().readings());
   }
@@ -409,7 +409,8 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   Sides compared(Expr.Comparison comparison) {
     Typed left = number(comparison.left(), WrittenUnits.Reach.SIDE);
     Typed right = number(comparison.right(), WrittenUnits.Reach.SIDE);
-    Typed met = Kinds.meet(left, comparison.left(), right, comparison.right());
+    Typed met =
+        Kinds.meet(Kinds.Together.COMPARED, left, comparison.left(), right, comparison.right());
     Operation.Relation relation =
         switch (comparison.relation()) {
           case LESS -> Operation.Relation.LESS;
@@ -452,7 +453,9 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
       return Typed.of(new Operation.TruthChoice(span, condition, one, other));
     }
     Readings readings =
-        Kinds.meet(then, choice.then(), otherwise, choice.otherwise()).operand().readings();
+        Kinds.meet(Kinds.Together.BRANCHES, then, choice.then(), otherwise, choice.otherwise())
+            .operand()
+            .readings();
     return form(then) == Form.VECTOR
         ? Typed.of(
             new Operation.VectorChoice(span, condition, vector(then), vector(otherwise)), readings)

@@ -39,7 +39,7 @@ final class KindMessages {
                 ""));
   }
 
-  static CheckFailure unlike(Refusal refusal, Part left, Part right) {
+  static CheckFailure unlike(Refusal refusal, Kinds.Together together, Part left, Part right) {
     return new CheckFailure(
         names -> {
           Context context = context(names, left.expr(), right.expr()).of(left.text(), right.text());
@@ -49,9 +49,25 @@ final class KindMessages {
           } else if (lacksUnit(right, left)) {
             explanation = missingUnit(explanation.problem(), right, left);
           }
+          explanation = about(together, explanation, left, right);
           return diagnostic(explanation, left.span(), label(left.typed()))
               .with(right.span(), label(right.typed()));
         });
+  }
+
+  private static Explanation about(
+      Kinds.Together together, Explanation explanation, Part left, Part right) {
+    String both =
+        left.typed().operand().readings().withArticle()
+            + " and "
+            + right.typed().operand().readings().withArticle();
+    String problem =
+        switch (together) {
+          case COMPARED -> explanation.problem();
+          case PARTS -> "The parts of a vector must be of one kind; here stand " + both + ".";
+          case BRANCHES -> "Both choices must be of one kind; here stand " + both + ".";
+        };
+    return new Explanation(problem, explanation.reason(), explanation.fix());
   }
 
   /** Whether a part is a bare number beside a quantity with a unit. */

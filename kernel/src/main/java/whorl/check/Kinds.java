@@ -63,11 +63,19 @@ final class Kinds {
     }
   }
 
+  /** Why two quantities must be alike. */
+  enum Together {
+    COMPARED,
+    PARTS,
+    BRANCHES
+  }
+
   /** The common reading of two quantities that must be alike. */
-  static Typed meet(Typed left, Expr leftText, Typed right, Expr rightText) {
+  static Typed meet(Together together, Typed left, Expr leftText, Typed right, Expr rightText) {
     Judgement judgement = KindAlgebra.compared(left.operand(), right.operand());
     if (judgement instanceof Judgement.Refused refused) {
-      throw KindMessages.unlike(refused.refusal(), part(leftText, left), part(rightText, right));
+      throw KindMessages.unlike(
+          refused.refusal(), together, part(leftText, left), part(rightText, right));
     }
     return left.read(((Judgement.Accepted) judgement).operand());
   }
@@ -79,7 +87,8 @@ final class Kinds {
             ? KindAlgebra.minus(total.operand(), next.operand())
             : KindAlgebra.plus(total.operand(), next.operand());
     if (judgement instanceof Judgement.Refused refused) {
-      throw KindMessages.unlike(refused.refusal(), part(soFar, total), part(nextText, next));
+      throw KindMessages.unlike(
+          refused.refusal(), Together.COMPARED, part(soFar, total), part(nextText, next));
     }
     return total.read(((Judgement.Accepted) judgement).operand());
   }

@@ -5,7 +5,6 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
 import whorl.syntax.UnitWord;
@@ -15,20 +14,13 @@ final class NameRules {
   private final Map<CellId, CellContent> cells;
   private final Graph graph;
   private final CellId cell;
-  private final List<UnitWord> unitWords;
   private final Map<String, Node> first = new HashMap<>();
 
   /** The rules as they bear on the statements of a cell that is to run. */
-  NameRules(
-      Map<CellId, CellContent> cells,
-      Graph graph,
-      CellId cell,
-      List<Node> nodes,
-      List<UnitWord> unitWords) {
+  NameRules(Map<CellId, CellContent> cells, Graph graph, CellId cell, List<Node> nodes) {
     this.cells = cells;
     this.graph = graph;
     this.cell = cell;
-    this.unitWords = unitWords;
     nodes.forEach(node -> node.defines().ifPresent(name -> first.putIfAbsent(name, node)));
   }
 
@@ -40,9 +32,6 @@ final class NameRules {
   }
 
   private List<Diagnostic> broken(Node node, String name, Span span) {
-    if (Vocabulary.CONSTANTS.contains(name)) {
-      return List.of(SheetMessages.constant(name, span));
-    }
     Node above = first.get(name);
     if (above != node) {
       return List.of(SheetMessages.definedAbove(name, span, above));
@@ -55,7 +44,6 @@ final class NameRules {
               name, span, elsewhere.get(), cells.get(elsewhere.get().place().cell()).label()));
     }
     var errors = new ArrayList<Diagnostic>();
-    unitWord(unitWords, name).ifPresent(word -> errors.add(SheetMessages.unitOrName(word)));
     cells.forEach(
         (id, other) -> {
           if (!id.equals(cell)) {

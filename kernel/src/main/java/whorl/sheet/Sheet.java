@@ -53,7 +53,7 @@ public final class Sheet {
             name -> graph.definition(name).filter(in(cell).negate()).isPresent(),
             CatalogueWords.STANDARD);
     var nodes = nodes(cell, source, parsed.statements());
-    var rules = new NameRules(cells, graph, cell, nodes, parsed.unitWords());
+    var rules = new NameRules(cells, graph, cell, nodes);
     var errors = new ArrayList<Diagnostic>(parsed.errors());
     var sound = new ArrayList<Node>();
     for (Node node : nodes) {

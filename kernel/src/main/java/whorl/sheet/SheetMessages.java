@@ -19,16 +19,6 @@ final class SheetMessages {
 
   private SheetMessages() {}
 
-  static Diagnostic constant(String name, Span span) {
-    String shown = name.equals("π") ? "π (pi)" : name;
-    return Diagnostic.of(
-        "constant",
-        shown + " is a constant at hand in every sheet and cannot be defined.",
-        span,
-        "",
-        "Take another name, such as " + name + "_1.");
-  }
-
   static Diagnostic definedAbove(String name, Span span, Node first) {
     return Diagnostic.of(
             "defined",
@@ -70,18 +60,6 @@ final class SheetMessages {
       return (value.length() <= 40 ? value : value.substring(0, 38) + " …") + unit;
     }
     return "a function";
-  }
-
-  static Diagnostic unitOrName(UnitWord word) {
-    return Diagnostic.of(
-        "unit-or-name",
-        word.name()
-            + " stands here for a unit, but this cell also defines a name "
-            + word.name()
-            + ".",
-        word.span(),
-        "A word behind a tight * or / is the unit of that spelling unless a name is meant.",
-        "For the unit write · in front of it; for the name put blanks around the sign.");
   }
 
   static Diagnostic readAsUnit(String name, Span span, UnitWord word, CellContent other) {
