@@ -1,18 +1,21 @@
 package whorl.sheet;
 
-import java.util.ArrayList;
+
 import java.util.Collection;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.SortedSet;
+import java.util.TreeSet;
 import java.util.stream.Stream;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 
 /** Which statements rest on names of an assumption that fails now. */
 final class Doubts {
-  private final Map<Node, List<String>> doubts = new HashMap<>();
+  private final Map<Node, SortedSet<String>> doubts = new HashMap<>();
 
   private Doubts() {}
 
@@ -27,7 +30,7 @@ final class Doubts {
           String text = Printer.expression(assumption.condition());
           for (Node doubtful : graph.downstream(node.uses())) {
             if (doubtful != node) {
-              found.doubts.computeIfAbsent(doubtful, key -> new ArrayList<>()).add(text);
+              found.doubts.computeIfAbsent(doubtful, key -> new TreeSet<>()).add(text);
             }
           }
         }
@@ -38,7 +41,7 @@ final class Doubts {
 
   /** The failing assumptions that a statement rests on, as written. */
   List<String> on(Node node) {
-    return doubts.getOrDefault(node, List.of());
+    return List.copyOf(doubts.getOrDefault(node, Collections.emptySortedSet()));
   }
 
   /** The statements on which the doubts are not what they were. */
