@@ -206,6 +206,15 @@ final class CheckMessages {
         unknown.usualSpelling().map(usual -> "Write " + usual + ".").orElse(""));
   }
 
+  static CheckFailure exponentTooLarge(Span span) {
+    return failure(
+        "unit-exponent",
+        "The exponents of this unit add up to more than any quantity has.",
+        span,
+        "",
+        "Check them: a fourth power is already rare.");
+  }
+
   static CheckFailure unitBehindQuantity(Expr.InUnit inUnit, String kind) {
     String group = text(inUnit.group());
     return failure(

@@ -5,6 +5,7 @@ import java.util.Set;
 import whorl.diagnostic.Span;
 import whorl.units.Unit;
 import whorl.units.UnitCatalogue;
+import whorl.units.UnitSyntaxException;
 import whorl.units.UnitText;
 import whorl.units.UnknownUnitException;
 import whorl.units.kind.Kind;
@@ -42,6 +43,8 @@ final class WrittenUnits {
       return UnitCatalogue.standard().resolve(text);
     } catch (UnknownUnitException unknown) {
       throw CheckMessages.unknownUnit(unknown, span);
+    } catch (UnitSyntaxException tooLarge) {
+      throw CheckMessages.exponentTooLarge(span);
     }
   }
 

@@ -19,6 +19,7 @@ import whorl.syntax.Statement;
 /** Checks a statement and works it out with the values that its names have. */
 final class Calculator {
   private final Results results;
+  private long evaluations;
 
   Calculator(Results results) {
     this.results = results;
@@ -39,10 +40,32 @@ final class Calculator {
     }
     Checked checked = ((Checker.Result.Passed) result).checked();
     try {
+      evaluations++;
       return workedOut(node, checked);
     } catch (NoResult failure) {
       return new Result.Broken(failure.diagnostic, null);
     }
+  }
+
+  /**
+   * The result of a statement that says what it said before, in another place of its cell. A value
+   * is kept; what points into the text is made anew.
+   */
+  Result moved(Node node, Result was) {
+    if (was instanceof Result.Waiting) {
+      return was;
+    }
+    if (was instanceof Result.Valued valued
+        && new Checker(results).check(node.statement()) instanceof Checker.Result.Passed passed
+        && passed.checked() instanceof Checked.Value value) {
+      return new Result.Valued(value, valued.value());
+    }
+    return result(node);
+  }
+
+  /** How many statements were worked out. */
+  long evaluations() {
+    return evaluations;
   }
 
   /** Whether a name means a function of the language because the sheet has none of that name. */

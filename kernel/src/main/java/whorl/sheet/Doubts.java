@@ -1,6 +1,5 @@
 package whorl.sheet;
 
-
 import java.util.Collection;
 import java.util.Collections;
 import java.util.HashMap;

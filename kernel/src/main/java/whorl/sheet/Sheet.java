@@ -163,9 +163,11 @@ public final class Sheet {
         return refused(cell, content.source(), errors, attempted);
       }
       Results staging = results.staging();
-      kept.forEach((node, was) -> results.of(was).ifPresent(result -> staging.stage(node, result)));
+      var calculator = new Calculator(staging);
+      keep(kept, affected, calculator, staging);
       var errors = new ArrayList<>(faults);
-      errors.addAll(workOut(((Graph.Order.Sorted) order).nodes(), staging, cell));
+      errors.addAll(workOut(((Graph.Order.Sorted) order).nodes(), calculator, staging, cell));
+      evaluations += calculator.evaluations();
       if (!errors.isEmpty()) {
         return refused(cell, content.source(), errors, attempted);
       }
@@ -198,12 +200,23 @@ public final class Sheet {
     return kept;
   }
 
-  private List<Diagnostic> workOut(List<Node> order, Results staging, CellId cell) {
-    var calculator = new Calculator(staging);
+  /** Stages what the statements that were kept came to before. */
+  private void keep(
+      Map<Node, Node> kept, Set<Node> affected, Calculator calculator, Results staging) {
+    kept.forEach((node, was) -> staging.stage(node, results.of(was).orElseThrow()));
+    kept.forEach(
+        (node, was) -> {
+          if (!affected.contains(node) && !node.statement().equals(was.statement())) {
+            staging.stage(node, calculator.moved(node, results.of(was).orElseThrow()));
+          }
+        });
+  }
+
+  private List<Diagnostic> workOut(
+      List<Node> order, Calculator calculator, Results staging, CellId cell) {
     var errors = new ArrayList<Diagnostic>();
     for (Node node : order) {
       Result result = calculator.result(node);
-      evaluations++;
       if (result instanceof Result.Broken broken) {
         if (in(cell).test(node)) {
           errors.add(broken.diagnostic());

@@ -16,8 +16,8 @@ import whorl.eval.Value;
 import whorl.units.Rational;
 
 /**
- * Formulas of mechanics put together at random from laws that hold: each must be accepted as what it
- * is and come to what exact fractions come to.
+ * Formulas of mechanics put together at random from laws that hold: each must be accepted as what
+ * it is and come to what exact fractions come to.
  */
 class RandomFormulasTest {
 

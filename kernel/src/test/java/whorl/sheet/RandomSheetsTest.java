@@ -16,13 +16,93 @@ import org.junit.jupiter.params.provider.MethodSource;
 class RandomSheetsTest {
   private static final List<String> PIECES =
       List.of(
-          "a", "b", "ω", "n_1", "x", "f", "g", "F", "v", " ", " ", "\n", "\n", " = ", " = ", " + ",
-          " - ", "*", "/", " * ", " / ", "^", "²", "(", ")", "(", ")", "[", "]", ",", ", ", ".",
-          "'", "@", "|", "±", " < ", " <= ", "≥", "check ", "assume ", "if ", " then ", " else ",
-          " and ", " or ", " within ", "plot ", "motion ", "cases ", "data ", "solve ", "vary ",
-          "1", "2.5", "6000", "1e300", "0", "3 m", "5 kg", "6000 rpm", "50 Hz", "2 N·m", "20 degC",
-          "4 K", "7 J", "9 s", "1 %", "sqrt(", "sin(", "min(", "exp(", "unit(", "π", "g_n", "#",
-          "\"t\"", "×", "·", "true", "\t", "Ω", "é", "𝜔", "\u0301", " a = 1\n", " b = a * 2 m\n");
+          "a",
+          "b",
+          "ω",
+          "n_1",
+          "x",
+          "f",
+          "g",
+          "F",
+          "v",
+          " ",
+          " ",
+          "\n",
+          "\n",
+          " = ",
+          " = ",
+          " + ",
+          " - ",
+          "*",
+          "/",
+          " * ",
+          " / ",
+          "^",
+          "²",
+          "(",
+          ")",
+          "(",
+          ")",
+          "[",
+          "]",
+          ",",
+          ", ",
+          ".",
+          "'",
+          "@",
+          "|",
+          "±",
+          " < ",
+          " <= ",
+          "≥",
+          "check ",
+          "assume ",
+          "if ",
+          " then ",
+          " else ",
+          " and ",
+          " or ",
+          " within ",
+          "plot ",
+          "motion ",
+          "cases ",
+          "data ",
+          "solve ",
+          "vary ",
+          "1",
+          "2.5",
+          "6000",
+          "1e300",
+          "0",
+          "3 m",
+          "5 kg",
+          "6000 rpm",
+          "50 Hz",
+          "2 N·m",
+          "20 degC",
+          "4 K",
+          "7 J",
+          "9 s",
+          "1 %",
+          "sqrt(",
+          "sin(",
+          "min(",
+          "exp(",
+          "unit(",
+          "π",
+          "g_n",
+          "#",
+          "\"t\"",
+          "×",
+          "·",
+          "true",
+          "\t",
+          "Ω",
+          "é",
+          "𝜔",
+          "\u0301",
+          " a = 1\n",
+          " b = a * 2 m\n");
 
   private static String text(long seed) {
     var random = new SplittableRandom(seed);
@@ -47,8 +127,7 @@ class RandomSheetsTest {
     String before = sheet.steps(first).toString();
     CellOutcome outcome =
         Assertions.assertTimeoutPreemptively(
-            Duration.ofSeconds(60),
-            () -> sheet.run(new CellId("second"), "cell [2]", text(seed)));
+            Duration.ofSeconds(60), () -> sheet.run(new CellId("second"), "cell [2]", text(seed)));
     assertTrue(outcome.errors().size() <= 10);
     if (!outcome.tookEffect()) {
       assertEquals(before, sheet.steps(first).toString());
@@ -63,8 +142,7 @@ class RandomSheetsTest {
     for (int line = 0; line < count; line++) {
       String name = "q" + cell + "_" + line;
       // A cell uses names of cells before it only, so that no order closes a ring.
-      String other =
-          cell == 0 ? "3" : "q" + random.nextInt(cell) + "_" + random.nextInt(6);
+      String other = cell == 0 ? "3" : "q" + random.nextInt(cell) + "_" + random.nextInt(6);
       lines.add(
           switch (random.nextInt(5)) {
             case 0 -> name + " = " + random.nextInt(100);

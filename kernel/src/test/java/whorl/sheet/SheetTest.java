@@ -192,6 +192,14 @@ class SheetTest {
   }
 
   @Test
+  void aFunctionThatMovedInItsCellIsStillQuotedRight() {
+    good("1", "f(x) = 1 / (x - 3)");
+    good("1", "a = 1\nf(x) = 1 / (x - 3)");
+    Diagnostic error = run("2", "y = f(3)").errors().get(0);
+    assertEquals("In f, division by zero: `x - 3` is 0.", error.problem());
+  }
+
+  @Test
   void vectorsHaveCrossAndDotProducts() {
     good(
         "1", "F = (0, 0, 5) N\nr = (2, 0, 0) m\nM [N·m] = r × F\nW [J] = F · (1, 1, 3) m\ns = |M|");
