@@ -3,6 +3,7 @@ package whorl.notebook;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import com.google.gson.JsonArray;
 import com.google.gson.JsonObject;
 import com.google.gson.JsonParser;
 import com.google.gson.JsonPrimitive;
@@ -99,14 +100,20 @@ class NoteTest {
          "nbformat_minor": 5
         }
         """;
+    var numbers = new JsonArray();
+    numbers.add(1.0);
+    numbers.add(1.5);
+    var steps = new JsonObject();
+    steps.add("m", new JsonObject());
+    steps.add("b", numbers);
+    steps.addProperty("a", "x\ny");
     var shown =
         new Output.Display(
             Map.of(
                 "text/plain", new JsonPrimitive("a\nb\u2028c"),
                 "image/png", new JsonPrimitive("iVBO\n"),
                 "text/html", new JsonPrimitive(""),
-                "application/x-whorl-steps+json",
-                    JsonParser.parseString("{\"m\": {}, \"b\": [1.0], \"a\": \"x\\ny\"}")),
+                "application/x-whorl-steps+json", steps),
             new JsonObject());
     var printed = new Output.Stream("stdout", "é <1>\r\nand more");
     String after =
@@ -120,7 +127,8 @@ class NoteTest {
               "application/x-whorl-steps+json": {
                "a": "x\\ny",
                "b": [
-                1.0
+                1,
+                1.5
                ],
                "m": {}
               },
