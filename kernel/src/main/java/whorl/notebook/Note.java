@@ -1,6 +1,7 @@
 package whorl.notebook;
 
 import com.google.gson.JsonArray;
+import com.google.gson.JsonElement;
 import com.google.gson.JsonNull;
 import com.google.gson.JsonObject;
 import java.util.ArrayList;
@@ -20,10 +21,12 @@ public final class Note {
   private static final String CELLS = "cells";
   private static final int FORMAT = 4;
 
+  private final String name;
   private final Json root;
   private final List<Cell> cells;
 
-  private Note(Json root, List<Cell> cells) {
+  private Note(String name, Json root, List<Cell> cells) {
+    this.name = name;
     this.root = root;
     this.cells = List.copyOf(cells);
   }
@@ -38,7 +41,7 @@ public final class Note {
     try {
       Json root = JsonScanner.scan(text);
       requireOurs(name, root);
-      return new Note(root, cellsOf(name, root));
+      return new Note(name, root, cellsOf(name, root));
     } catch (JsonFault fault) {
       throw new NoteFileException(
           name
@@ -208,15 +211,32 @@ public final class Note {
    * @param executions by position of the cell, from 1
    */
   public String executed(Map<Integer, Execution> executions) {
+    var values = new HashMap<Integer, Map<String, JsonElement>>();
+    executions.forEach((position, execution) -> values.put(position, execution.members()));
+    return edited(values);
+  }
+
+  /**
+   * The same note with other texts in some of its cells.
+   *
+   * @param sources by position of the cell, from 1
+   */
+  public Note withSources(Map<Integer, String> sources) throws NoteFileException {
+    var values = new HashMap<Integer, Map<String, JsonElement>>();
+    sources.forEach(
+        (position, source) -> values.put(position, Map.of("source", CanonicalJson.lines(source))));
+    return parse(name, edited(values));
+  }
+
+  private String edited(Map<Integer, Map<String, JsonElement>> values) {
     var layout = JsonLayout.of(root);
     var text = new StringBuilder();
     int copied = 0;
     for (Cell cell : cells) {
-      Execution execution = executions.get(cell.position());
-      if (execution != null) {
+      Map<String, JsonElement> members = values.get(cell.position());
+      if (members != null) {
         Json json = cell.json();
-        text.append(root.text(), copied, json.start());
-        text.append(layout.set(json, execution.members()));
+        text.append(root.text(), copied, json.start()).append(layout.set(json, members));
         copied = json.end();
       }
     }

@@ -127,6 +127,15 @@ final class SheetMessages {
         "Take another name if the function is wanted.");
   }
 
+  static Diagnostic undefined(Span span, List<String> names, List<String> alike) {
+    return Diagnostic.of(
+        "undefined",
+        "This statement waits for " + String.join(" and ", names) + ", which no cell defines.",
+        span,
+        "",
+        alike.isEmpty() ? "" : "Names spelled alike: " + String.join(", ", alike) + ".");
+  }
+
   static Diagnostic statedZero(Statement.Reproduction reproduction) {
     return Diagnostic.of(
         "stated-zero",

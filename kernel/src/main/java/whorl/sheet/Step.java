@@ -1,6 +1,8 @@
 package whorl.sheet;
 
 import java.util.List;
+import java.util.Optional;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Statement;
@@ -195,6 +197,25 @@ public sealed interface Step {
     public Waiting {
       names = List.copyOf(names);
       near = List.copyOf(near);
+    }
+
+    /**
+     * What is wrong with the statement once nothing more is to come; empty if all it waits for is
+     * defined somewhere, so that the fault lies there.
+     *
+     * @param defined the names that the sheet defines or tries to define
+     */
+    public Optional<Diagnostic> undefined(Set<String> defined) {
+      List<String> missing = names.stream().filter(name -> !defined.contains(name)).toList();
+      if (missing.isEmpty()) {
+        return Optional.empty();
+      }
+      List<String> alike =
+          missing.stream()
+              .flatMap(name -> near.get(names.indexOf(name)).stream())
+              .distinct()
+              .toList();
+      return Optional.of(SheetMessages.undefined(statement.span(), missing, alike));
     }
 
     @Override
