@@ -1,0 +1,5 @@
+/** The {@code whorl} command. */
+@NullMarked
+package whorl.cli;
+
+import org.jspecify.annotations.NullMarked;
