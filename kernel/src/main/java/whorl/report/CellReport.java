@@ -3,7 +3,9 @@ package whorl.report;
 import com.google.gson.JsonObject;
 import java.util.ArrayList;
 import java.util.List;
+import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
+import whorl.sheet.CellOutcome;
 import whorl.sheet.Step;
 
 /**
@@ -15,16 +17,25 @@ import whorl.sheet.Step;
  */
 public record CellReport(String html, String text, JsonObject record) {
 
+  /** Sets what running a cell came to, with what it changed elsewhere on the sheet. */
+  public static CellReport of(CellOutcome outcome) {
+    return of(
+        outcome.source(),
+        outcome.steps(),
+        outcome.notices().stream().map(Diagnostic::problem).toList(),
+        Recalculated.sentence(outcome).stream().toList());
+  }
+
   /**
    * Sets the steps of a cell as one table.
    *
    * @param source the text of the cell
    * @param steps its steps in order
    * @param notices sentences for the author that belong to no step, such as that a name hides a law
-   * @param changed steps elsewhere that were recalculated because of this cell
+   * @param elsewhere sentences about what the cell changed elsewhere
    */
   public static CellReport of(
-      Source source, List<Step> steps, List<String> notices, List<Step> changed) {
+      Source source, List<Step> steps, List<String> notices, List<String> elsewhere) {
     List<Row> rows = steps.stream().map(StepRows::of).toList();
     var html = new ArrayList<Html>();
     var text = new ArrayList<String>();
@@ -32,14 +43,12 @@ public record CellReport(String html, String text, JsonObject record) {
       html.add(HtmlTable.of(rows, source));
       text.add(TextTable.of(rows, source));
     }
-    for (String notice : notices) {
-      html.add(Html.styled("div", Look.NOTE, Html.text("Note: " + notice)));
-      text.add("Note: " + notice);
-    }
-    if (!changed.isEmpty()) {
-      String words = Recalculated.words(changed);
-      html.add(Html.styled("div", Look.NOTE, Html.text(words)));
-      text.add(words);
+    var sentences = new ArrayList<String>();
+    notices.forEach(notice -> sentences.add("Note: " + notice));
+    sentences.addAll(elsewhere);
+    for (String sentence : sentences) {
+      html.add(Html.styled("div", Look.NOTE, Html.text(sentence)));
+      text.addAll(TextWrap.wrap(sentence, TextTable.PAGE_WIDTH));
     }
     return new CellReport(
         Html.all(html).toString(), String.join("\n", text), NoteRecord.of(steps, List.of()));

@@ -1,7 +1,6 @@
 package whorl.report;
 
 import java.util.ArrayList;
-import java.util.List;
 import java.util.Map;
 import java.util.regex.Matcher;
 
@@ -306,10 +305,12 @@ final class FormulaHtml implements Layout.Cases<Html> {
         return symbol.face() == Layout.Face.UPRIGHT && symbol.base().length() > 1 ? WORD : LETTER;
       }
       if (layout instanceof Layout.SideBySide side) {
+        Layout last = side.pieces().get(side.pieces().size() - 1);
+        if (side.binding() == Layout.Binding.SIGN) {
+          return edge(last, leading);
+        }
         // A call starts with the name of its function and ends with a parenthesis.
-        List<Layout> pieces = side.pieces();
-        boolean call = pieces.get(pieces.size() - 1) instanceof Layout.Group;
-        return call ? LETTER : WORD;
+        return last instanceof Layout.Group ? LETTER : WORD;
       }
       if (layout instanceof Layout.Raised raised) {
         return edge(raised.base(), leading) == DIGIT ? DIGIT : LETTER;

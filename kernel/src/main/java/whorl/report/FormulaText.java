@@ -76,16 +76,18 @@ final class FormulaText implements Layout.Cases<String> {
 
   @Override
   public String fraction(Layout.Fraction fraction) {
-    return over(fraction) + "/" + under(fraction);
+    String over = over(fraction);
+    String under = under(fraction);
+    // A solidus between short parts is not worth a line end.
+    boolean grouped = over.endsWith(")") || under.startsWith("(");
+    return over + (grouped ? TextWrap.MAY_BREAK : "") + "/" + under;
   }
 
-  /** What stands in front of the solidus, in parentheses if it needs them there. */
-  static String over(Layout.Fraction fraction) {
+  private static String over(Layout.Fraction fraction) {
     return in(fraction.over(), Layout.Binding.PRODUCT);
   }
 
-  /** What stands behind the solidus, in parentheses if it needs them there. */
-  static String under(Layout.Fraction fraction) {
+  private static String under(Layout.Fraction fraction) {
     return in(fraction.under(), Layout.Binding.SIGN);
   }
 

@@ -8,6 +8,8 @@ package whorl.report;
  */
 final class Look {
   private static final String HAIRLINE = "1px solid rgba(128,128,128,0.4)";
+  private static final String ALARM =
+      "color:var(--jp-error-color1, var(--vscode-errorForeground, inherit))";
   private static final String MATH =
       "font-family:'STIX Two Text','Cambria','Libertinus Serif','Times New Roman',"
           + "'Liberation Serif',serif;";
@@ -112,8 +114,8 @@ final class Look {
   static String state(Tone tone) {
     return switch (tone) {
       case PLAIN, GOOD -> BOLD;
-      case BAD, DOUBTFUL ->
-          BOLD + ";color:var(--jp-error-color1, var(--vscode-errorForeground, inherit))";
+      case BAD -> BOLD + ";" + ALARM;
+      case DOUBTFUL -> "font-style:italic;" + ALARM;
       case OPEN -> BOLD + ";font-style:italic";
     };
   }

@@ -7,7 +7,6 @@ import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
 import java.util.List;
 import java.util.OptionalDouble;
-import java.util.Set;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 import whorl.eval.Value;
@@ -15,7 +14,7 @@ import whorl.sheet.Comparison;
 import whorl.sheet.Quantity;
 import whorl.sheet.Step;
 import whorl.sheet.Verdict;
-import whorl.syntax.Expr;
+import whorl.syntax.Printer;
 import whorl.units.Unit;
 
 /**
@@ -68,7 +67,7 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     definition.addProperty("unit", gives.unit().symbol());
     definition.add("value", value(gives));
     definition.add("si", inUnit(gives.value(), gives.unit().coherent()));
-    definition.addProperty("formula", text(defined.statement().value()));
+    definition.addProperty("formula", Printer.expression(defined.statement().value()));
     definitions.add(defined.statement().name().name(), definition);
     return this;
   }
@@ -96,13 +95,13 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
 
   @Override
   public NoteRecord checked(Step.Checked checked) {
-    checks.add(judged(text(checked.statement().condition()), checked.verdict()));
+    checks.add(judged(Printer.expression(checked.statement().condition()), checked.verdict()));
     return this;
   }
 
   @Override
   public NoteRecord assumed(Step.Assumed assumed) {
-    assumptions.add(judged(text(assumed.statement().condition()), assumed.verdict()));
+    assumptions.add(judged(Printer.expression(assumed.statement().condition()), assumed.verdict()));
     return this;
   }
 
@@ -127,11 +126,11 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     var statement = reproduced.statement();
     check.addProperty(
         "text",
-        text(statement.value())
+        Printer.expression(statement.value())
             + " = "
-            + text(statement.stated())
+            + Printer.expression(statement.stated())
             + " within "
-            + text(statement.within()));
+            + Printer.expression(statement.within()));
     check.addProperty("holds", reproduced.holds());
     check.add("stated", value(reproduced.stated()));
     check.addProperty("deviation", reproduced.deviation());
@@ -170,9 +169,5 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     error.addProperty("length", diagnostic.span().length());
     error.addProperty("message", diagnostic.problem());
     errors.add(error);
-  }
-
-  private static String text(Expr expression) {
-    return FormulaText.of(FormulaLayout.of(expression, Set.of()));
   }
 }

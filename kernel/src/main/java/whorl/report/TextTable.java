@@ -10,7 +10,7 @@ import whorl.diagnostic.Source;
 
 /** Sets rows as a ruled table of plain text for a terminal. */
 final class TextTable implements Piece.Cases<String> {
-  private static final int PAGE_WIDTH = 108;
+  static final int PAGE_WIDTH = 108;
   private static final int GAP = 2;
 
   /** What a column is never narrowed below, in the order of the heads. */
@@ -50,11 +50,6 @@ final class TextTable implements Piece.Cases<String> {
     }
     text.add(rule);
     return TextWrap.plain(String.join("\n", text));
-  }
-
-  /** A line by itself, without marks where it may break. */
-  static String plain(Line line) {
-    return TextWrap.plain(new TextTable().line(line));
   }
 
   private List<List<String>> cells(Row row, int numberWidth) {

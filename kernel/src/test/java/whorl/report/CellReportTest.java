@@ -16,7 +16,9 @@ import org.w3c.dom.Element;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
+import whorl.sheet.CellId;
 import whorl.sheet.Given;
+import whorl.sheet.Sheet;
 import whorl.sheet.Step;
 
 class CellReportTest {
@@ -68,7 +70,7 @@ class CellReportTest {
   private static CellReport flywheel() {
     SampleNote note = SampleNote.flywheel();
     return CellReport.of(
-        note.source, note.steps, List.of("I hides the law of that name"), note.steps.subList(5, 7));
+        note.source, note.steps, List.of("I hides the law of that name"), List.of());
   }
 
   @Test
@@ -174,10 +176,7 @@ class CellReportTest {
             new Diagnostic("code", text, new Span(0, 1), text, List.of(), text, text),
             null);
     return CellReport.of(
-        new Source("m = " + text),
-        List.of(defined, waiting, broken),
-        List.of(text),
-        List.of(waiting));
+        new Source("m = " + text), List.of(defined, waiting, broken), List.of(text), List.of(text));
   }
 
   @Test
@@ -189,6 +188,19 @@ class CellReportTest {
     assertTrue(text.contains("waits for n_O"));
     assertTrue(text.contains("does not stand"));
     assertTrue(text.contains("was 74.9 s, now stale"));
+  }
+
+  @Test
+  void aChangeSaysWhatItDidElsewhere() {
+    var sheet = new Sheet();
+    sheet.run(new CellId("1"), "cell [1]", "n = 3\n");
+    sheet.run(new CellId("2"), "cell [2]", "k = 2 * n\ncheck k <= 8\n");
+
+    CellReport report = CellReport.of(sheet.run(new CellId("1"), "cell [1]", "n = 5\n"));
+
+    assertTrue(
+        report.text().contains("Recalculated elsewhere: k = 10 (was 6); FAILS now: check k ≤ 8"),
+        report.text());
   }
 
   @Test

@@ -59,6 +59,8 @@ class FormulaTest {
         Arguments.of(call("atan2", A, B), "atan2(a, b)", "atan2(a, b)"),
         Arguments.of(product(TWO, "*", num("3")), "2·3", "2 × 3"),
         Arguments.of(product(A, "*", TWO), "a·2", "a · 2"),
+        Arguments.of(product(minus(A), "*", B), "−a·b", "−a b"),
+        Arguments.of(product(A, "*", minus(B)), "a·(−b)", "a (−b)"),
         Arguments.of(product(name("mass"), "*", A), "mass·a", "mass · a"),
         Arguments.of(product(num("9.81", "m/s²"), "*", A), "9.81 m/s²·a", "9.81 m/s² · a"),
         Arguments.of(product(name("A"), "×", name("B")), "A × B", "A × B"),
