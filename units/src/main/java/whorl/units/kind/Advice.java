@@ -32,6 +32,16 @@ record Advice(Kind found, Kind wanted, String difference, String way) {
         .findFirst();
   }
 
+  /** The first advice for two kinds that are joined, of which either may be the one found. */
+  static Optional<Advice> onEither(List<Kind> some, List<Kind> others) {
+    return ALL.stream()
+        .filter(
+            advice ->
+                (some.contains(advice.found) && others.contains(advice.wanted))
+                    || (others.contains(advice.found) && some.contains(advice.wanted)))
+        .findFirst();
+  }
+
   /** The way, in the author's words. */
   String way(Context context, String foundText) {
     Matcher place = PLACE.matcher(way);

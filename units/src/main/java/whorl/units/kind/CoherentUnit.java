@@ -8,11 +8,21 @@ import whorl.units.UnitText;
 
 /** What a quantity is measured in, made up of the base units of the SI and the radian. */
 final class CoherentUnit {
+  private static final Kind FREQUENCY = Kind.named("frequency");
+  private static final Kind ANGLE = Kind.named("angle");
+
   private CoherentUnit() {}
 
   /** As {@code kg·m²·rad/s}: the radian shows that rotation took part. */
   static String text(Readings readings) {
-    boolean rotation = readings.all(Reading::tainted);
+    List<Kind> kinds = readings.kinds();
+    if (kinds.equals(List.of(FREQUENCY))) {
+      return "Hz";
+    }
+    if (kinds.equals(List.of(ANGLE))) {
+      return "rad";
+    }
+    boolean rotation = readings.all(reading -> reading.tainted() && reading.turn() == 0);
     return readings.readings().stream()
         .map(Reading::kind)
         .filter(kind -> kind.isInternal() && !kind.words().equals(kind.name()))

@@ -43,6 +43,9 @@ final class Combination {
 
   /** A rule may name a kind that is kept as turns of another: it holds for just that reading. */
   private static void addBareCycles(Reading cycles, Reading other, Set<Reading> found) {
+    if (cycles.turn() == 0) {
+      return;
+    }
     for (Map.Entry<Kind, Reading> kept : RULES.standsFor().entrySet()) {
       Reading reading = kept.getValue();
       if (cycles.kind() == reading.kind() && cycles.turn() == reading.turn()) {

@@ -42,12 +42,14 @@ public record Explanation(String problem, String reason, String fix) {
   private static final class Wording implements Refusal.Cases<Explanation> {
     private static final Kind FREQUENCY = Kind.named("frequency");
     private static final Kind ANGULAR_VELOCITY = Kind.named("angular_velocity");
-    private static final Kind RATE = Kind.named("rate");
+    private static final Kind TIME = Kind.named("time");
     private static final Kind NUMBER = Kind.named("number");
     private static final Kind ANGLE = Kind.named("angle");
 
     /** A name, a numeral, a call or a parenthesis: it needs no parentheses of its own. */
     private static final Pattern SIMPLE = Pattern.compile("[\\p{L}\\p{N}_.]+(\\([^()]*\\))?");
+
+    private static final Pattern PI = Pattern.compile("\\b(pi|π)\\b");
 
     private static final String CYCLES_AND_RADIANS =
         "Hz counts cycles, rad/s counts radians; one cycle is 2π rad: ";
@@ -68,13 +70,11 @@ public record Explanation(String problem, String reason, String fix) {
             "");
       }
       Kind wanted = refusal.wanted().get(0);
-      if (found.dimension().equals(wanted.dimension())) {
+      Optional<Advice> advice = Advice.on(found.kinds(), refusal.wanted());
+      if (advice.isEmpty() || context.insideOf(FREQUENCY).isPresent()) {
         Optional<Explanation> slip = turnSlip(found, wanted);
         if (slip.isPresent()) {
           return slip.get();
-        }
-        if (found.kinds().equals(List.of(RATE))) {
-          return rate(wanted);
         }
       }
       Explanation difference = difference(found, refusal.wanted(), context.part(0, "it"));
@@ -92,13 +92,6 @@ public record Explanation(String problem, String reason, String fix) {
           + ", but its right side is "
           + found.withArticle()
           + ".";
-    }
-
-    private Explanation rate(Kind wanted) {
-      return new Explanation(
-          "1/s says neither radians nor cycles, but " + wanted.withArticle() + " is needed.",
-          "",
-          "Write rad/s, rpm or Hz behind the number it comes from");
     }
 
     /** The factor 2π is missing, or there too often. */
@@ -121,7 +114,7 @@ public record Explanation(String problem, String reason, String fix) {
             new Explanation(
                 "A factor 2π is missing between " + cycles.get() + " and " + radians.get() + ".",
                 cycles.get() + " counts cycles, " + radians.get() + " radians.",
-                "Write 2*pi*" + cycles.get()));
+                "Write 2*pi*" + cycles.get() + " for " + cycles.get()));
       }
       if (cycles.isPresent()) {
         return Optional.of(cyclesForRadians(cycles.get()));
@@ -131,10 +124,11 @@ public record Explanation(String problem, String reason, String fix) {
     }
 
     private Explanation cyclesForRadians(String text) {
+      boolean divided = PI.matcher(text).find();
       return new Explanation(
           "A frequency stands where an angular velocity is needed.",
           "",
-          CYCLES_AND_RADIANS + "write 2*pi*" + inProduct(text));
+          CYCLES_AND_RADIANS + (divided ? "leave out 2*pi" : "write 2*pi*" + inProduct(text)));
     }
 
     private Explanation radiansForCycles(String text) {
@@ -145,10 +139,16 @@ public record Explanation(String problem, String reason, String fix) {
     }
 
     private Explanation missing(Kind wanted, int turns) {
+      String problem =
+          "A factor " + power(turns) + " is missing to make this " + wanted.withArticle() + ".";
+      if (wanted == TIME) {
+        return new Explanation(
+            problem,
+            "A number over an angular velocity is a time per radian; one turn is 2π rad.",
+            "For the time of one turn multiply by 2*pi; count revolutions as an angle, as 1e6 rev");
+      }
       return new Explanation(
-          "A factor " + power(turns) + " is missing to make this " + wanted.withArticle() + ".",
-          "It counts radians; one turn is 2π rad.",
-          "Multiply by " + written(turns));
+          problem, "It counts radians; one turn is 2π rad.", "Multiply by " + written(turns));
     }
 
     private Explanation tooMany(Kind wanted, int turns, Optional<String> radians) {
@@ -191,12 +191,23 @@ public record Explanation(String problem, String reason, String fix) {
             "", advice.get().difference(), advice.get().way(context, inProduct(text)));
       }
       if (found.dimension().equals(wanted.get(0).dimension())) {
+        return new Explanation("", sameUnit(found, wanted.get(0)), "");
+      }
+      if (wanted.equals(List.of(NUMBER))) {
         return new Explanation(
-            "", "Both are in " + found.unit() + ", but they are different kinds of quantity.", "");
+            "", "", "Divide by another quantity of its kind, so that a number is left");
       }
       return Difference.between(found.kinds(), wanted)
           .map(difference -> new Explanation("", "", sentence(difference, text)))
           .orElseGet(() -> units(found, wanted.get(0)));
+    }
+
+    private static String sameUnit(Readings found, Kind wanted) {
+      return found.kinds().stream().allMatch(Kind::isInternal)
+          ? "The units agree, but quantities of these kinds do not make "
+              + wanted.withArticle()
+              + "."
+          : "Both are in " + unit(found) + ", but they are different kinds of quantity.";
     }
 
     private Explanation units(Readings found, Kind wanted) {
@@ -207,7 +218,7 @@ public record Explanation(String problem, String reason, String fix) {
               + "; "
               + wanted.withArticle()
               + " is in "
-              + CoherentUnit.text(wanted.dimension(), false)
+              + Readings.of(wanted).unit()
               + ".",
           "");
     }
@@ -242,8 +253,7 @@ public record Explanation(String problem, String reason, String fix) {
           };
       Explanation difference =
           mixedCycles(left, right)
-              .or(() -> advice(left, right, context.part(0, "the first")))
-              .or(() -> advice(right, left, context.part(1, "the second")))
+              .or(() -> advice(left, right))
               .orElseGet(() -> plainDifference(left, right));
       return new Explanation(problem, difference.reason(), difference.fix());
     }
@@ -257,11 +267,14 @@ public record Explanation(String problem, String reason, String fix) {
       return Optional.of(cyclesForRadians(context.part(leftCycles ? 0 : 1, "f")));
     }
 
-    private Optional<Explanation> advice(Readings found, Readings wanted, String text) {
-      return Advice.on(found.kinds(), wanted.kinds())
+    private Optional<Explanation> advice(Readings left, Readings right) {
+      return Advice.onEither(left.kinds(), right.kinds())
           .map(
-              advice ->
-                  new Explanation("", advice.difference(), advice.way(context, inProduct(text))));
+              advice -> {
+                int found = left.kinds().contains(advice.found()) ? 0 : 1;
+                String text = inProduct(context.part(found, advice.found().symbol()));
+                return new Explanation("", advice.difference(), advice.way(context, text));
+              });
     }
 
     private Explanation plainDifference(Readings left, Readings right) {
@@ -298,7 +311,9 @@ public record Explanation(String problem, String reason, String fix) {
       Optional<String> cycles = context.insideOf(FREQUENCY);
       if (cycles.isPresent() && TurnSlip.between(found, ANGLE).isPresent()) {
         return new Explanation(
-            problem, "", CYCLES_AND_RADIANS + "write 2*pi*" + inProduct(cycles.get()));
+            "An angle is needed here, but this counts cycles.",
+            "",
+            CYCLES_AND_RADIANS + "write 2*pi*" + inProduct(cycles.get()));
       }
       Explanation difference = difference(found, List.of(ANGLE), context.part(0, "it"));
       return new Explanation(problem, difference.reason(), difference.fix());

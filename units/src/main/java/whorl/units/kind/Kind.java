@@ -26,7 +26,8 @@ public final class Kind {
     INTERNAL,
     RATE,
     COUNT,
-    ALONE
+    ALONE,
+    ASIDE
   }
 
   private final int index;

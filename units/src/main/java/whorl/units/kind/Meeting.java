@@ -1,5 +1,6 @@
 package whorl.units.kind;
 
+import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -87,7 +88,13 @@ final class Meeting {
     if (both.isEmpty()) {
       both = common(withSeries(mine), withSeries(theirs));
     }
-    return both.isEmpty() ? Readings.untagged(first.dimension()) : Readings.of(both);
+    boolean rotation = first.all(Reading::tainted) || second.all(Reading::tainted);
+    Set<Reading> readings = new HashSet<>();
+    for (Kind kind : both) {
+      Reading reading = Reading.of(kind);
+      readings.add(new Reading(reading.kind(), reading.turn(), reading.tainted() || rotation));
+    }
+    return new Readings(first.dimension(), readings);
   }
 
   private static Set<Kind> common(List<Kind> first, List<Kind> second) {

@@ -22,6 +22,7 @@ final class Multiplication {
   private static final List<Kind> RATES =
       List.of(Kind.named("angular_velocity"), Kind.named("frequency"));
   private static final Kind ANGLE_TURNED = Kind.named("angle_turned");
+  private static final Rational TWO = Rational.of(2);
   private static final Rational FOUR = Rational.of(4);
   private static final Rational QUARTER = Rational.of(1, 4);
 
@@ -121,9 +122,8 @@ final class Multiplication {
   }
 
   private Optional<Refusal> refusal() {
-    Set<Kind> kinds = kinds();
     for (Rational numeral : numerals) {
-      Optional<Refusal> refusal = NumericValueFormulas.STANDARD.refusal(numeral, kinds);
+      Optional<Refusal> refusal = NumericValueFormulas.STANDARD.refusal(numeral, this::kinds);
       if (refusal.isPresent()) {
         return refusal;
       }
@@ -181,20 +181,40 @@ final class Multiplication {
       boolean known = exact && turn == 0;
       return judgement(new Operand(Readings.number(turn), known ? coefficient : null));
     }
-    List<ProductSearch.Part> parts = parts();
+    List<ProductSearch.Part> parts = parts(quantities.values(), turn);
     if (parts.size() > ProductSearch.MOST_FACTORS) {
       return Judgement.refused(
           new Refusal.TooManyFactors(parts.size(), ProductSearch.MOST_FACTORS));
     }
-    boolean untagged = parts.stream().anyMatch(part -> part.readings().isEmpty());
-    Set<Reading> found = untagged ? Set.of() : ProductSearch.readings(parts);
+    Set<Reading> found = searched(parts);
+    addSquareOfProduct(found);
     var readings = new Readings(dimension(), withFlywheelEffect(found));
     return judgement(new Operand(readings, exact && coefficient.isZero() ? Rational.ZERO : null));
   }
 
-  private List<ProductSearch.Part> parts() {
-    List<ProductSearch.Part> parts = new ArrayList<>();
+  private static Set<Reading> searched(List<ProductSearch.Part> parts) {
+    boolean untagged = parts.stream().anyMatch(part -> part.readings().isEmpty());
+    return untagged ? new HashSet<>() : ProductSearch.readings(parts);
+  }
+
+  /** Where all exponents are even, as in {@code (r*w^2)^2}, the product is a square as well. */
+  private void addSquareOfProduct(Set<Reading> found) {
+    List<Powered> halves = new ArrayList<>();
     for (Powered factor : quantities.values()) {
+      Rational half = factor.exponent().dividedBy(TWO);
+      if (!half.isInteger()) {
+        return;
+      }
+      halves.add(new Powered(factor.key(), factor.operand(), half));
+    }
+    if (halves.size() > 1 && turn % 2 == 0) {
+      found.addAll(Combination.power(searched(parts(halves, turn / 2)), 2));
+    }
+  }
+
+  private List<ProductSearch.Part> parts(Iterable<Powered> powers, int turn) {
+    List<ProductSearch.Part> parts = new ArrayList<>();
+    for (Powered factor : powers) {
       boolean below = factor.exponent().signum() < 0;
       Rational size = below ? factor.exponent().negate() : factor.exponent();
       Readings power = Raising.power(factor.operand().readings(), size);
@@ -240,7 +260,7 @@ final class Multiplication {
       both.add(Reading.of(INERTIA));
     }
     if (coefficient.dividedBy(FOUR).isInteger()
-        && found.stream().anyMatch(r -> r.kind() == INERTIA)) {
+        && Settling.kinds(new Readings(INERTIA.dimension(), found)).contains(INERTIA)) {
       both.add(Reading.of(FLYWHEEL_EFFECT));
     }
     return both;
@@ -251,11 +271,10 @@ final class Multiplication {
   }
 
   private Optional<Remark> remark() {
-    Set<Kind> kinds = kinds();
-    return numerals.stream()
-        .filter(CONVERSIONS::contains)
-        .flatMap(numeral -> RATES.stream().filter(kinds::contains).map(k -> new Remark(numeral, k)))
-        .findFirst();
+    Optional<Rational> conversion = numerals.stream().filter(CONVERSIONS::contains).findFirst();
+    return conversion.flatMap(
+        numeral ->
+            RATES.stream().filter(kinds()::contains).findFirst().map(k -> new Remark(numeral, k)));
   }
 
   private static boolean isPi(Readings readings) {

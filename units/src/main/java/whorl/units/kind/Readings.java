@@ -122,13 +122,19 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
     return CoherentUnit.text(this);
   }
 
-  /** The kinds that have words; a special case of a kind that is itself there says nothing more. */
+  /**
+   * The kinds that have words. A special case of a kind that is itself there says nothing more, and
+   * some kinds are named only where no other is left.
+   */
   private List<Kind> namedKinds() {
     List<Kind> kinds = kinds();
-    return kinds.stream()
-        .filter(kind -> !kind.isInternal())
-        .filter(kind -> kind.parent().filter(kinds::contains).isEmpty())
-        .toList();
+    List<Kind> named =
+        kinds.stream()
+            .filter(kind -> !kind.isInternal())
+            .filter(kind -> kind.parent().filter(kinds::contains).isEmpty())
+            .toList();
+    List<Kind> usual = named.stream().filter(kind -> !kind.has(Kind.Mark.ASIDE)).toList();
+    return usual.isEmpty() ? named : usual;
   }
 
   private static String joined(List<String> words) {

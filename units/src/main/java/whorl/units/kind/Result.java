@@ -48,7 +48,7 @@ record Result(Kind kind, int turns, Taint taint, Solid solid) {
     return switch (taint) {
       case PASSES -> new Reading(kind, turn, tainted);
       case BEGINS -> new Reading(kind, turn, true);
-      case ENDS -> new Reading(kind, turn, tainted && turn != 0);
+      case ENDS -> new Reading(kind, turn, turn != 0 || (first.tainted() && second.tainted()));
       case FORGOTTEN -> new Reading(kind, kind.has(Kind.Mark.RATE) ? turns : 0, false);
     };
   }

@@ -309,8 +309,12 @@ final class RuleBook {
   }
 
   private boolean isOfItsOwn(Rules.Turn turn) {
-    return turn.kind() == number
-        || rules.turns().stream().anyMatch(back -> back.kind() == turn.readsAs() && back.written());
+    return turn.kind() == number || turn.written() || isWritten(turn.readsAs(), turn.kind());
+  }
+
+  private boolean isWritten(Kind from, Kind to) {
+    return rules.turns().stream()
+        .anyMatch(turn -> turn.kind() == from && turn.readsAs() == to && turn.written());
   }
 
   /** As what a kind reads where it is a term of a power series. */

@@ -4,21 +4,10 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import whorl.units.Dimension;
 
 /** Reads the rules; {@code rules.txt} says what a line may hold. */
 final class RuleReader {
-  private static final Pattern RULE = Pattern.compile("(\\S+) ([*/^]) (\\S+) -> (.+)");
-  private static final Pattern RESULT =
-      Pattern.compile("([a-z_^0-9-]+)(?:@(-?\\d))?([#~!]?)(\\??)");
-  private static final Pattern SOLID = Pattern.compile("\\((.+)\\)");
-  private static final Pattern TURN =
-      Pattern.compile("(\\S+) ([+-]\\d) reads as (\\S+)( written)?");
-  private static final Pattern STANDS_FOR = Pattern.compile("(\\S+) is (\\S+) ([+-]\\d)");
-  private static final Pattern SERIES = Pattern.compile("series (\\S+) = (\\S+)");
-
   private static final String NOTHING = "nothing";
 
   private final FormalPowers powers;
@@ -39,87 +28,93 @@ final class RuleReader {
   }
 
   private void readLine(String line) {
-    Matcher rule = RULE.matcher(line);
-    Matcher turn = TURN.matcher(line);
-    Matcher stands = STANDS_FOR.matcher(line);
-    Matcher series = SERIES.matcher(line);
-    if (rule.matches()) {
-      readRule(rule);
-    } else if (turn.matches()) {
-      turns.add(
-          new Rules.Turn(
-              powers.kind(turn.group(1)),
-              Integer.parseInt(turn.group(2)),
-              powers.kind(turn.group(3)),
-              turn.group(4) != null));
-    } else if (stands.matches()) {
-      standsFor.put(
-          powers.kind(stands.group(1)),
-          new Reading(powers.kind(stands.group(2)), Integer.parseInt(stands.group(3)), true));
-    } else if (series.matches()) {
-      inSeries.put(powers.kind(series.group(1)), powers.kind(series.group(2)));
+    String[] words = line.split(" ", -1);
+    if (words.length < 4) {
+      throw notRead(line);
+    } else if (words[3].equals("->")) {
+      readRule(words, line);
+    } else if (words[1].equals("is")) {
+      int turn = Integer.parseInt(words[3]);
+      standsFor.put(powers.kind(words[0]), new Reading(powers.kind(words[2]), turn, true));
+    } else if (words[2].equals("reads")) {
+      boolean written = words.length > 5 && words[5].equals("written");
+      int turn = Integer.parseInt(words[1]);
+      turns.add(new Rules.Turn(powers.kind(words[0]), turn, powers.kind(words[4]), written));
+    } else if (words[0].equals("series")) {
+      inSeries.put(powers.kind(words[1]), powers.kind(words[3]));
     } else {
-      throw new IllegalStateException("not a rule: " + line);
+      throw notRead(line);
     }
   }
 
-  private void readRule(Matcher rule) {
-    String operator = rule.group(2);
-    Kind first = kind(rule.group(1));
-    Kind second = operator.equals("^") ? first : kind(rule.group(3));
+  private static IllegalStateException notRead(String line) {
+    return new IllegalStateException("not a rule: " + line);
+  }
+
+  /** {@code first operator second -> result, result …}. */
+  private void readRule(String[] words, String line) {
+    String operator = words[1];
+    List<Rules.Rule> rules = rules(operator, line);
+    Kind first = kind(words[0]);
+    Kind second = operator.equals("^") ? first : kind(words[2]);
     Dimension dimension =
         operator.equals("/")
             ? first.dimension().dividedBy(second.dimension())
             : first.dimension().times(second.dimension());
     Result.Solid solid =
-        isSolid(rule.group(1))
+        isSolid(words[0])
             ? Result.Solid.FIRST
-            : isSolid(rule.group(3)) ? Result.Solid.SECOND : Result.Solid.NONE;
+            : isSolid(words[2]) ? Result.Solid.SECOND : Result.Solid.NONE;
     List<Rules.Solvable> results = new ArrayList<>();
-    if (!rule.group(4).equals(NOTHING)) {
-      for (String text : rule.group(4).split(", *", -1)) {
-        results.add(result(text, solid, dimension));
+    for (int i = 4; i < words.length && !words[i].equals(NOTHING); i++) {
+      Rules.Solvable result = result(words[i].replace(",", ""), solid);
+      if (!result.result().kind().dimension().equals(dimension)) {
+        throw new IllegalStateException("wrong in its dimensions: " + line);
       }
+      results.add(result);
     }
-    rules(operator).add(new Rules.Rule(first, second, results));
+    rules.add(new Rules.Rule(first, second, results));
   }
 
-  private List<Rules.Rule> rules(String operator) {
+  private List<Rules.Rule> rules(String operator, String line) {
     return switch (operator) {
       case "*" -> products;
       case "/" -> quotients;
-      default -> squares;
+      case "^" -> squares;
+      default -> throw notRead(line);
     };
   }
 
   private Kind kind(String operand) {
-    Matcher solid = SOLID.matcher(operand);
-    return powers.kind(solid.matches() ? solid.group(1) : operand);
+    return powers.kind(isSolid(operand) ? operand.substring(1, operand.length() - 1) : operand);
   }
 
   private static boolean isSolid(String operand) {
-    return SOLID.matcher(operand).matches();
+    return operand.startsWith("(") && operand.endsWith(")");
   }
 
-  private Rules.Solvable result(String text, Result.Solid solid, Dimension dimension) {
-    Matcher result = RESULT.matcher(text);
-    if (!result.matches()) {
-      throw new IllegalStateException("not a result of a rule: " + text);
+  /**
+   * A kind, then {@code @} and turns, a mark for the taint, and {@code ?}, each only if it is
+   * there.
+   */
+  private Rules.Solvable result(String text, Result.Solid solid) {
+    boolean oneWay = text.endsWith("?");
+    String rest = oneWay ? text.substring(0, text.length() - 1) : text;
+    Result.Taint taint = taint(rest.charAt(rest.length() - 1));
+    if (taint != Result.Taint.PASSES) {
+      rest = rest.substring(0, rest.length() - 1);
     }
-    Kind kind = powers.kind(result.group(1));
-    if (!kind.dimension().equals(dimension)) {
-      throw new IllegalStateException("wrong in its dimensions: a rule with the result " + text);
-    }
-    int turns = result.group(2) == null ? 0 : Integer.parseInt(result.group(2));
-    return new Rules.Solvable(
-        new Result(kind, turns, taint(result.group(3)), solid), !result.group(4).isEmpty());
+    int at = rest.indexOf('@');
+    int more = at < 0 ? 0 : Integer.parseInt(rest.substring(at + 1));
+    Kind kind = powers.kind(at < 0 ? rest : rest.substring(0, at));
+    return new Rules.Solvable(new Result(kind, more, taint, solid), oneWay);
   }
 
-  private static Result.Taint taint(String mark) {
+  private static Result.Taint taint(char mark) {
     return switch (mark) {
-      case "#" -> Result.Taint.BEGINS;
-      case "~" -> Result.Taint.ENDS;
-      case "!" -> Result.Taint.FORGOTTEN;
+      case '#' -> Result.Taint.BEGINS;
+      case '~' -> Result.Taint.ENDS;
+      case '!' -> Result.Taint.FORGOTTEN;
       default -> Result.Taint.PASSES;
     };
   }

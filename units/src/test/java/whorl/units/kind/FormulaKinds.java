@@ -57,7 +57,7 @@ final class FormulaKinds {
     }
   }
 
-  private static Operand accepted(Judgement judgement) {
+  static Operand accepted(Judgement judgement) {
     return judgement.match(
         new Judgement.Cases<>() {
           @Override

@@ -9,15 +9,13 @@ import org.junit.jupiter.params.provider.CsvFileSource;
 class FormulasTest {
 
   @ParameterizedTest(name = "{1} [{2}] {3}: {4}")
-  @CsvFileSource(
-      resources = {"formulas.csv", "more-formulas.csv"},
-      useHeadersInDisplayName = false)
+  @CsvFileSource(resources = {"formulas.csv", "more-formulas.csv"})
   void formulaIsJudgedAsTheTableSays(
       String topic, String formula, String inputs, String kind, String verdict, String note) {
     Judgement judgement = FormulaKinds.judge(formula, inputs == null ? "" : inputs, kind);
     assertEquals(
         verdict,
         judgement instanceof Judgement.Accepted ? "accept" : "refuse",
-        () -> formula + ": " + judgement);
+        () -> topic + ", " + formula + (note == null ? "" : " (" + note + ")") + ": " + judgement);
   }
 }
