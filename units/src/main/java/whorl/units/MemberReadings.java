@@ -1,7 +1,6 @@
 package whorl.units;
 
 import java.util.List;
-import whorl.units.kind.Judgement;
 import whorl.units.kind.KindAlgebra;
 import whorl.units.kind.Operand;
 import whorl.units.kind.Powered;
@@ -13,7 +12,7 @@ final class MemberReadings {
   private MemberReadings() {}
 
   /** The readings of a product; those of its dimension alone where the rules have no answer. */
-  static Readings of(Composition composition, Dimension dimension) {
+  static Readings of(Composition composition) {
     List<Powered> factors =
         composition.members().stream()
             .map(
@@ -23,18 +22,6 @@ final class MemberReadings {
                         Operand.of(member.row().kind()),
                         Rational.of(member.exponent())))
             .toList();
-    return KindAlgebra.product(factors)
-        .match(
-            new Judgement.Cases<>() {
-              @Override
-              public Readings accepted(Judgement.Accepted accepted) {
-                return accepted.operand().readings();
-              }
-
-              @Override
-              public Readings refused(Judgement.Refused refused) {
-                return Readings.untagged(dimension);
-              }
-            });
+    return KindAlgebra.unit(factors);
   }
 }

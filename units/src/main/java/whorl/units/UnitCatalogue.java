@@ -168,8 +168,9 @@ public final class UnitCatalogue {
     Rational zero = composition.isSymbol() ? composition.first().row().zero() : Rational.ZERO;
     List<Kind> kinds = kindsOfRows(composition, dimension);
     if (kinds.isEmpty()) {
-      Readings readings = MemberReadings.of(composition, dimension);
-      return new Unit(text, composition.factor(), zero, dimension, readings.kinds(), readings);
+      Readings readings = MemberReadings.of(composition);
+      List<Kind> named = readings.kinds().stream().filter(kind -> !kind.isInternal()).toList();
+      return new Unit(text, composition.factor(), zero, dimension, named, readings);
     }
     return new Unit(text, composition.factor(), zero, dimension, kinds);
   }

@@ -22,7 +22,8 @@ record Difference(Kind found, Kind by, Kind wanted, boolean divided) {
     for (boolean divided : new boolean[] {true, false}) {
       for (Kind from : found) {
         for (Kind to : wanted) {
-          Optional<Difference> difference = between(from, to, divided);
+          boolean named = !from.isInternal() && !to.isInternal();
+          Optional<Difference> difference = named ? between(from, to, divided) : Optional.empty();
           if (difference.isPresent()) {
             return difference;
           }

@@ -210,7 +210,11 @@ public record Explanation(String problem, String reason, String fix) {
           : "Both are in " + unit(found) + ", but they are different kinds of quantity.";
     }
 
+    /** Says the units, unless they stand in the problem for want of a name. */
     private Explanation units(Readings found, Kind wanted) {
+      if (wanted.isInternal()) {
+        return new Explanation("", "", "");
+      }
       return new Explanation(
           "",
           "It comes out in "

@@ -90,8 +90,14 @@ public final class Kind {
     return words;
   }
 
-  /** The name with its article, as {@code a moment of inertia} or {@code an energy}. */
+  /**
+   * The name with its article, as {@code a moment of inertia} or {@code an energy}. Of an internal
+   * kind what it is measured in, as {@code a quantity in m²/s²}.
+   */
   public String withArticle() {
+    if (isInternal()) {
+      return "a quantity in " + CoherentUnit.text(Readings.of(this));
+    }
     return ("aeiou".indexOf(words.charAt(0)) < 0 ? "a " : "an ") + words;
   }
 

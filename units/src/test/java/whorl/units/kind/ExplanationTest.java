@@ -98,6 +98,20 @@ class ExplanationTest {
   }
 
   @Test
+  void internalKindsAreSaidInUnits() {
+    Readings squares = Readings.of(Kind.named("velocity_squared"));
+    var refusal =
+        new Refusal.WrongKind(
+            squares, List.of(Kind.named("angular_velocity_squared")), Dimension.of("T^-2"));
+    assertEquals(
+        new Explanation(
+            "q is declared as a quantity in rad²/s², but its right side is a quantity in m²/s².",
+            "",
+            ""),
+        Explanation.of(refusal, Context.NONE.declaring("q")));
+  }
+
+  @Test
   void powerOfAnEmpiricalFitNamesTheWayOut() {
     var refusal =
         new Refusal.FractionalPower(Readings.of(Kind.named("velocity")), Rational.parse("2.8"));

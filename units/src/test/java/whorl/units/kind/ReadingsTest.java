@@ -21,7 +21,7 @@ class ReadingsTest {
   @ParameterizedTest
   @CsvSource({
     "F*r, torque or energy, kg·m²/s²",
-    "I*n, angular momentum or torsional damping, kg·m²·rad/s",
+    "I*n, angular momentum, kg·m²·rad/s",
     "f, frequency, Hz",
     "1/n, s/rad, s/rad",
     "n^2, rad²/s², rad²/s²",
@@ -29,6 +29,7 @@ class ReadingsTest {
     "h, kg/(s³·K), kg/(s³·K)",
     "sqrt(m), kg^(1/2), kg^(1/2)",
     "f*T, kg·m²/s³, kg·m²/s³",
+    "k, torsional stiffness, kg·m²/s²",
     "F*r*F*r/F/r/F/r, number, 1"
   })
   void isNamedInWordsOrElseInUnits(String formula, String words, String unit) {
