@@ -36,9 +36,11 @@ public final class Main implements Callable<Integer> {
     PrintWriter out = writer(FileDescriptor.out);
     PrintWriter err = writer(FileDescriptor.err);
     int status = run(out, err, args);
+    // On a terminal what is wrong stands below the steps. Results that could not be printed, for
+    // example onto a full disk, are not a success; checkError also flushes.
+    boolean printed = !out.checkError();
     err.flush();
-    // Results that could not be printed, for example onto a full disk, are not a success.
-    System.exit(out.checkError() ? ExitStatus.USAGE.code() : status);
+    System.exit(printed ? status : ExitStatus.USAGE.code());
   }
 
   /** Runs the command, and returns its exit status. */
