@@ -26,6 +26,11 @@ public record Span(int start, int end) {
     return new Span(end, end);
   }
 
+  /** What lies between this one and one that begins further on. */
+  public Span gapTo(Span next) {
+    return new Span(/* start= */ end, /* end= */ next.start);
+  }
+
   /** Number of code points. */
   public int length() {
     return end - start;

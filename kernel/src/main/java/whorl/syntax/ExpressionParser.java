@@ -54,9 +54,10 @@ final class ExpressionParser {
 
   // expression = "if" comparison-or "then" expression "else" expression | comparison-or
   Expr expression() {
-    if (!cursor.atWord("if")) {
-      return anyOf();
-    }
+    return cursor.atWord("if") ? choice() : anyOf();
+  }
+
+  private Expr choice() {
     Token start = cursor.take();
     enter(start);
     Expr condition = anyOf();
@@ -76,9 +77,10 @@ final class ExpressionParser {
   private Expr anyOf() {
     Token start = cursor.peek();
     Expr first = allOf();
-    if (!cursor.atWord("or")) {
-      return first;
-    }
+    return cursor.atWord("or") ? anyOf(start, first) : first;
+  }
+
+  private Expr anyOf(Token start, Expr first) {
     var conditions = new ArrayList<Expr>(List.of(first));
     while (cursor.acceptWord("or")) {
       conditions.add(allOf());
@@ -90,9 +92,10 @@ final class ExpressionParser {
   private Expr allOf() {
     Token start = cursor.peek();
     Expr first = comparison();
-    if (!cursor.atWord("and")) {
-      return first;
-    }
+    return cursor.atWord("and") ? allOf(start, first) : first;
+  }
+
+  private Expr allOf(Token start, Expr first) {
     var conditions = new ArrayList<Expr>(List.of(first));
     while (cursor.acceptWord("and")) {
       conditions.add(comparison());
@@ -104,9 +107,10 @@ final class ExpressionParser {
   private Expr comparison() {
     Token start = cursor.peek();
     Expr left = tolerance();
-    if (!cursor.peek().kind().isRelation()) {
-      return left;
-    }
+    return cursor.peek().kind().isRelation() ? comparison(start, left) : left;
+  }
+
+  private Expr comparison(Token start, Expr left) {
     var relation = relation(cursor.take());
     Span leftSpan = since(start);
     Token middle = cursor.peek();
@@ -133,9 +137,10 @@ final class ExpressionParser {
   private Expr tolerance() {
     Token start = cursor.peek();
     Expr value = sum();
-    if (!cursor.at(Kind.PLUS_MINUS)) {
-      return value;
-    }
+    return cursor.at(Kind.PLUS_MINUS) ? tolerance(start, value) : value;
+  }
+
+  private Expr tolerance(Token start, Expr value) {
     Span valueSpan = since(start);
     cursor.take();
     Token halfStart = cursor.peek();
@@ -193,9 +198,10 @@ final class ExpressionParser {
   Expr sum() {
     Token start = cursor.peek();
     Expr first = product();
-    if (!cursor.at(Kind.PLUS) && !cursor.at(Kind.MINUS)) {
-      return first;
-    }
+    return cursor.at(Kind.PLUS) || cursor.at(Kind.MINUS) ? sum(start, first) : first;
+  }
+
+  private Expr sum(Token start, Expr first) {
     var terms = new ArrayList<Expr.Term>(List.of(new Expr.Term(false, first)));
     while (cursor.at(Kind.PLUS) || cursor.at(Kind.MINUS)) {
       boolean subtracted = cursor.take().is(Kind.MINUS);
@@ -209,9 +215,11 @@ final class ExpressionParser {
     Token start = cursor.peek();
     Expr first = signed(false);
     Expr.Joint joint = joint(cursor.peek());
-    if (joint == null) {
-      return first;
-    }
+    return joint == null ? first : product(start, first, joint);
+  }
+
+  private Expr product(Token start, Expr first, Expr.Joint firstJoint) {
+    Expr.Joint joint = firstJoint;
     var factors = new ArrayList<Expr.Factor>(List.of(new Expr.Factor(Expr.Joint.TIMES, first)));
     Token left = start;
     Expr previous = first;
@@ -273,11 +281,11 @@ final class ExpressionParser {
 
   // signed = ("-" | "+") signed | powered
   private Expr signed(boolean exponent) {
-    Token sign = cursor.peek();
-    if (!sign.is(Kind.MINUS) && !sign.is(Kind.PLUS)) {
-      return powered(exponent);
-    }
-    cursor.take();
+    return cursor.at(Kind.MINUS) || cursor.at(Kind.PLUS) ? afterSign(exponent) : powered(exponent);
+  }
+
+  private Expr afterSign(boolean exponent) {
+    Token sign = cursor.take();
     enter(sign);
     Token number = cursor.peek();
     Expr operand = signed(exponent);
@@ -300,10 +308,13 @@ final class ExpressionParser {
   private Expr powered(boolean exponent) {
     Token start = cursor.peek();
     Expr operand = postfix(exponent);
+    return cursor.at(Kind.CARET) || cursor.at(Kind.RAISED)
+        ? power(start, operand, exponent)
+        : operand;
+  }
+
+  private Expr power(Token start, Expr operand, boolean exponent) {
     Token sign = cursor.peek();
-    if (!sign.is(Kind.CARET) && !sign.is(Kind.RAISED)) {
-      return operand;
-    }
     if (carriesUnit(operand, start)) {
       Span number = new Span(start.span().start(), unitOf(operand).span().start());
       Span whole = start.span().to(units.exponentSpan());
@@ -351,12 +362,12 @@ final class ExpressionParser {
    */
   private void refuseUnitOfExponent(
       Token start, Expr exponent, Span power, Expr base, Span baseSpan) {
-    if (exponent instanceof Expr.InUnit inUnit && inUnit.span().end() == power.end()) {
+    Expr bare = exponent instanceof Expr.Negation negation ? negation.operand() : exponent;
+    if (bare instanceof Expr.InUnit inUnit && inUnit.span().end() == power.end()) {
       Span unit = inUnit.unit().span();
       Span number = new Span(start.span().start(), unit.start());
       throw cursor.refusal(messages.unitExponent(power, number, baseSpan, unit));
     }
-    Expr bare = exponent instanceof Expr.Negation negation ? negation.operand() : exponent;
     boolean number = bare instanceof Expr.Numeral numeral && numeral.unit() == null;
     if (!number || cursor.previous().is(Kind.CLOSE) || !units.isAhead()) {
       return;
@@ -377,7 +388,7 @@ final class ExpressionParser {
   private Expr postfix(boolean exponent) {
     Token start = cursor.peek();
     Expr operand = primary(exponent);
-    boolean number = start.is(Kind.NUMBER) || operand instanceof Expr.InUnit;
+    boolean number = start.is(Kind.NUMBER) || carriesUnit(operand, start);
     Form form = formOf(operand, start);
     int length = 0;
     while (true) {

@@ -43,6 +43,16 @@ final class ExpressionPrinter implements Expr.Cases<String> {
         || (value instanceof Expr.Numeral number && number.unit() != null);
   }
 
+  /** Whether an exponent would have to take a unit, which it does in parentheses only. */
+  private static boolean takesUnit(Expr exponent) {
+    if (exponent instanceof Expr.Negation negation) {
+      return takesUnit(negation.operand());
+    }
+    return exponent instanceof Expr.InFrame inFrame
+        ? takesUnit(inFrame.vector())
+        : hasUnit(exponent);
+  }
+
   private String grouped(Expr value) {
     return "(" + print(value) + ")";
   }
@@ -143,7 +153,7 @@ final class ExpressionPrinter implements Expr.Cases<String> {
     Expr exponent = power.exponent();
     return (hasUnit(base) ? grouped(base) : print(base, Hold.POSTFIX))
         + "^"
-        + (hasUnit(exponent) ? grouped(exponent) : print(exponent, Hold.SIGNED));
+        + (takesUnit(exponent) ? grouped(exponent) : print(exponent, Hold.SIGNED));
   }
 
   @Override

@@ -62,7 +62,7 @@ final class Lexer {
       remark();
     } else if (c == '"') {
       text();
-    } else if (Characters.isDigit(c) || c == '.' && startsNumber()) {
+    } else if (Characters.isDigit(c) || (c == '.' && startsNumber())) {
       number();
     } else if (c == 'Δ' && glyphs.folded(next + 1) == '°') {
       degrees(next + 1);
@@ -159,7 +159,7 @@ final class Lexer {
     }
     String canonical = canonical(glyphs.text(next, end));
     double value = Double.parseDouble(canonical);
-    if (Double.isInfinite(value) || value == 0 && hasDigitOverZero(canonical)) {
+    if (Double.isInfinite(value) || (value == 0 && hasDigitOverZero(canonical))) {
       wrong(next, end, messages.numberRange(glyphs.span(next, end), value));
       return;
     }
@@ -210,7 +210,7 @@ final class Lexer {
   }
 
   private static boolean isNamePart(int c) {
-    return c == '_' || Characters.isDigit(c) || c > 0 && Characters.isLetter(c);
+    return c == '_' || Characters.isDigit(c) || (c > 0 && Characters.isLetter(c));
   }
 
   private void degrees(int sign) {

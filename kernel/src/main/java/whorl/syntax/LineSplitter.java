@@ -119,7 +119,7 @@ final class LineSplitter {
         || last.isWord("and")
         || last.isWord("or")
         || last.isWord("with")
-        || last.is(Kind.COLON) && !headsBlock();
+        || (last.is(Kind.COLON) && !headsBlock());
   }
 
   private boolean headsBlock() {

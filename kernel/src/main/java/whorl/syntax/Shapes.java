@@ -56,7 +56,7 @@ final class Shapes {
       if (begins && !bracket && token.isFreeName()) {
         names.add(token.name().name());
       }
-      bracket = token.is(Kind.OPEN_BRACKET) || bracket && !token.is(Kind.CLOSE_BRACKET);
+      bracket = token.is(Kind.OPEN_BRACKET) || (bracket && !token.is(Kind.CLOSE_BRACKET));
     }
     return names;
   }

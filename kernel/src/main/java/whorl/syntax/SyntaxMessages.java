@@ -17,6 +17,7 @@ import whorl.units.UnitText.Power;
  */
 final class SyntaxMessages {
   private static final int LONGEST_QUOTE = 60;
+  private static final int LONGEST_CODE = 150;
 
   private final Source source;
 
@@ -53,7 +54,11 @@ final class SyntaxMessages {
   }
 
   private static String code(String text) {
-    return "`" + text + "`";
+    int length = text.codePointCount(0, text.length());
+    boolean cut = length > LONGEST_CODE;
+    return "`"
+        + (cut ? text.substring(0, text.offsetByCodePoints(0, LONGEST_CODE)) + "…" : text)
+        + "`";
   }
 
   /** A number or group with a unit behind it. */
@@ -393,6 +398,15 @@ final class SyntaxMessages {
             : "The exponent of a unit goes up to " + highest + ".",
         "",
         given == 0 ? "Leave the unit out" : "");
+  }
+
+  Diagnostic unitTooLong(Span unit, int longest) {
+    return message(
+        "unit-long",
+        unit,
+        "A unit is a product of at most " + longest + " symbols.",
+        "",
+        "Leave out the symbols that cancel");
   }
 
   Diagnostic unitPowerBlank(Span whole, Span number, Expr.UnitAt unit, Span exponent) {

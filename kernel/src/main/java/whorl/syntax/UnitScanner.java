@@ -16,7 +16,8 @@ import whorl.units.UnitText.Power;
  * goes on, and in brackets.
  */
 final class UnitScanner {
-  private static final int HIGHEST_EXPONENT = 99;
+  /** A unit has no more symbols than this, each counted as often as its exponent says. */
+  private static final int HIGHEST_DEGREE = 40;
 
   private final Cursor cursor;
   private final SyntaxMessages messages;
@@ -119,8 +120,8 @@ final class UnitScanner {
   // bare = product1 [ "/" ( factor | "(" product1 ")" ) ], no blank inside
   private Expr.UnitAt tight(Span holder) {
     Token first = cursor.peek();
-    if (first.span().start() - holder.end() > 1) {
-      var gap = new Span(holder.end(), first.span().start());
+    Span gap = holder.gapTo(first.span());
+    if (gap.length() > 1) {
       throw cursor.refusal(messages.unitBlanks(gap, holder, first.span()));
     }
     var text = new TightText(holder);
@@ -154,10 +155,11 @@ final class UnitScanner {
     if (!word.touches(behind)) {
       return false;
     }
-    return behind.is(Kind.PRIME)
-        || behind.is(Kind.DOT)
-            && cursor.peek(ahead + 2).is(Kind.NAME)
-            && !units.knows(cursor.peek(ahead + 2).text());
+    if (behind.is(Kind.PRIME)) {
+      return true;
+    }
+    Token part = cursor.peek(ahead + 2);
+    return behind.is(Kind.DOT) && part.is(Kind.NAME) && !units.knows(part.text());
   }
 
   private static boolean isJoin(Token token) {
@@ -280,11 +282,15 @@ final class UnitScanner {
       return cursor.peek(number).is(Kind.NUMBER) ? number + 1 : ahead;
     }
 
+    private boolean goesOn() {
+      return joins() || (divides() && symbolAt(1));
+    }
+
     /** Refuses what would go on with the unit although a unit has ended. */
     private void refuseWhatFollows() {
-      if (!under.isEmpty() && (joins() || divides() && symbolAt(1))) {
+      if (!under.isEmpty() && goesOn()) {
         boolean twoSlashes = divides();
-        while (joins() || divides() && symbolAt(1)) {
+        while (goesOn()) {
           cursor.take();
           factor(under, false);
         }
@@ -311,7 +317,7 @@ final class UnitScanner {
     }
 
     private Expr.UnitAt finish(Span first) {
-      var text = new UnitText(over, under);
+      UnitText text = sized(new UnitText(over, under), first.to(cursor.previous().span()));
       if (!open.isEmpty() && !units.isRow(text)) {
         for (OpenWord word : open) {
           if (names.test(word.name())) {
@@ -337,8 +343,8 @@ final class UnitScanner {
       Token sign = cursor.peek();
       boolean signed = sign.is(Kind.MINUS) || sign.is(Kind.PLUS);
       Token number = cursor.peek(signed ? 1 : 0);
-      boolean together = !tight || caret.touches(sign) && (!signed || sign.touches(number));
-      if (!number.is(Kind.NUMBER) || !together) {
+      boolean touching = caret.touches(sign) && (!signed || sign.touches(number));
+      if (!number.is(Kind.NUMBER) || (tight && !touching)) {
         throw cursor.refusal(messages.unitPowerForm(whole));
       }
       cursor.skip(signed ? 2 : 1);
@@ -348,8 +354,8 @@ final class UnitScanner {
       throw cursor.refusal(messages.unitPowerForm(whole));
     }
     int exponent = Integer.parseInt(digits);
-    if (exponent == 0 || Math.abs(exponent) > HIGHEST_EXPONENT) {
-      throw cursor.refusal(messages.unitPowerRange(whole, exponent, HIGHEST_EXPONENT));
+    if (exponent == 0 || Math.abs(exponent) > UnitText.LARGEST_EXPONENT) {
+      throw cursor.refusal(messages.unitPowerRange(whole, exponent, UnitText.LARGEST_EXPONENT));
     }
     return exponent;
   }
@@ -372,18 +378,28 @@ final class UnitScanner {
     };
   }
 
-  /** Members with the exponents of equal symbols added up. */
+  /** A unit that is short enough to be one. */
+  private UnitText sized(UnitText unit, Span place) {
+    long degree = 0;
+    for (Power member : unit.members()) {
+      degree += Math.abs(member.exponent());
+    }
+    if (degree > HIGHEST_DEGREE) {
+      throw cursor.refusal(messages.unitTooLong(place, HIGHEST_DEGREE));
+    }
+    return unit;
+  }
+
+  /** Members with the exponents of equal symbols added up, where that gives a unit. */
   private static List<Power> merged(List<Power> members) {
     var exponents = new LinkedHashMap<String, Integer>();
     members.forEach(member -> exponents.merge(member.symbol(), member.exponent(), Integer::sum));
-    var merged = new ArrayList<Power>();
-    exponents.forEach(
-        (symbol, exponent) -> {
-          if (exponent != 0) {
-            merged.add(new Power(symbol, exponent));
-          }
-        });
-    return merged;
+    boolean unit =
+        exponents.values().stream()
+            .allMatch(sum -> sum != 0 && Math.abs(sum) <= UnitText.LARGEST_EXPONENT);
+    return unit
+        ? exponents.entrySet().stream().map(e -> new Power(e.getKey(), e.getValue())).toList()
+        : members;
   }
 
   // bracket = "[" ( "1" | spaced ) [ "/" ( factor | "(" spaced ")" ) ] [ "," word { word } ] "]"
@@ -396,7 +412,7 @@ final class UnitScanner {
     Span whole = open.span().to(cursor.peek(close - 1).span());
     var text = new BracketText();
     text.read();
-    UnitText unit = new UnitText(text.over, text.under);
+    UnitText unit = sized(new UnitText(text.over, text.under), whole);
     String kind = null;
     Span kindSpan = null;
     if (cursor.at(Kind.COMMA)) {
@@ -411,13 +427,12 @@ final class UnitScanner {
   }
 
   private Span kindWords(Token comma) {
-    Span words = comma.span();
-    while (cursor.at(Kind.NAME)) {
-      Span word = cursor.take().span();
-      words = words == comma.span() ? word : words.to(word);
-    }
-    if (words == comma.span()) {
+    if (!cursor.at(Kind.NAME)) {
       throw cursor.refusal(messages.bracketKind(comma.span()));
+    }
+    Span words = cursor.take().span();
+    while (cursor.at(Kind.NAME)) {
+      words = words.to(cursor.take().span());
     }
     return words;
   }

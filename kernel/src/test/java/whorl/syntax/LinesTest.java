@@ -8,10 +8,13 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import whorl.check.CatalogueWords;
 import whorl.diagnostic.Source;
 
 /** Every line of the table is read as the table says. */
 class LinesTest {
+  private static final UnitWords UNITS = CatalogueWords.STANDARD;
+
   /** A row of the table; names stands for the names of the sheet at that point. */
   record Row(String kind, String source, String expected, String span, Set<String> names) {
     @Override
@@ -44,7 +47,7 @@ class LinesTest {
   @ParameterizedTest
   @MethodSource("rows")
   void isReadAsTheTableSays(Row row) {
-    Parsed parsed = Parser.parse(new Source(row.source()), row.names()::contains, TestUnits.WORDS);
+    Parsed parsed = Parser.parse(new Source(row.source()), row.names()::contains, UNITS);
     var errors =
         parsed.errors().stream().map(error -> error.code() + " " + error.span()).limit(1).toList();
     if (row.kind().equals("error")) {
