@@ -262,7 +262,7 @@ final class RuleBook {
     if (exponent != 1 && exponent % degree == 0) {
       powers.power(powers.base(kind), exponent / degree).ifPresent(roots::add);
     }
-    if (roots.isEmpty() && (degree == 2 || kind.dimension().isOne())) {
+    if (degree == 2 && roots.isEmpty()) {
       powers.formalRoot(kind).ifPresent(roots::add);
     }
     return List.copyOf(roots);
