@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
@@ -32,16 +33,15 @@ final class NameRules {
   }
 
   private List<Diagnostic> broken(Node node, String name, Span span) {
-    Node above = first.get(name);
+    Node above = first.getOrDefault(name, node);
     if (above != node) {
       return List.of(SheetMessages.definedAbove(name, span, above));
     }
     Optional<Node> elsewhere =
         graph.definition(name).filter(other -> !other.place().cell().equals(cell));
     if (elsewhere.isPresent()) {
-      return List.of(
-          SheetMessages.definedElsewhere(
-              name, span, elsewhere.get(), cells.get(elsewhere.get().place().cell()).label()));
+      CellContent other = Objects.requireNonNull(cells.get(elsewhere.get().place().cell()));
+      return List.of(SheetMessages.definedElsewhere(name, span, elsewhere.get(), other.label()));
     }
     var errors = new ArrayList<Diagnostic>();
     cells.forEach(
