@@ -70,14 +70,14 @@ class NoteRunTest {
   @Test
   void theRecordOfANoteHoldsAllOfItsCells() throws NoteFileException {
     JsonObject record =
-        Notes.run(Notes.of("m [kg] = 4", "# Prose", "check m <= 3 kg", "y = z")).record();
+        Notes.run(Notes.of("m [kg] = 4", "# Prose", "check m <= 3 kg", "y [s] = m")).record();
     assertEquals("[m]", record.getAsJsonObject("definitions").keySet().toString());
     assertFalse(
         record.getAsJsonArray("checks").get(0).getAsJsonObject().get("holds").getAsBoolean());
     JsonObject error = record.getAsJsonArray("errors").get(0).getAsJsonObject();
     assertEquals(4, error.get("cell").getAsInt());
     assertEquals(1, error.get("line").getAsInt());
-    assertEquals(1, error.get("column").getAsInt());
+    assertEquals(9, error.get("column").getAsInt());
   }
 
   @Test
