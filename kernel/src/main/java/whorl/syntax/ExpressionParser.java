@@ -714,7 +714,10 @@ final class ExpressionParser {
       case FOREIGN, TWO_BARS -> messages.operatorForeign(here, token.text());
       case EQUALS -> messages.assignmentPlace(here);
       case CLOSE, CLOSE_BRACKET -> messages.closeWithoutOpen(here, token.text());
-      case OPEN_BRACKET -> messages.bracketPlace(bracketSpan());
+      case OPEN_BRACKET ->
+          last.form() == Form.NUMBER
+              ? messages.bracketBehindNumber(bracketSpan(), last.span())
+              : messages.bracketPlace(bracketSpan());
       case TEXT -> messages.textPlace(here);
       case UNIT_SIGN -> messages.unitPlace(here);
       case PRIME -> messages.prime(here, false, last.form() == Form.NUMBER);
@@ -746,7 +749,8 @@ final class ExpressionParser {
     }
     return switch (last.form()) {
       case NUMBER -> messages.impliedProduct(last.span().to(here), last.span(), here);
-      case WITH_UNIT -> messages.secondWord(last.span().to(here), last.span(), here);
+      case WITH_UNIT ->
+          messages.secondWord(last.span().to(here), last.span(), here, units.isSymbol(word));
       default -> messages.impliedProduct(here, last.span(), here);
     };
   }

@@ -86,7 +86,7 @@ abstract class LineParser {
     Token first = line.first();
     boolean connects = first.is(Kind.NAME) && Words.CONNECTING.contains(first.text());
     if (first.kind().isOperator() || connects) {
-      boolean sign = first.is(Kind.MINUS) || first.is(Kind.PLUS);
+      boolean sign = first.is(Kind.MINUS);
       throw cursor.refusal(messages.lineOperator(first.span(), sign ? line.span() : null));
     }
   }

@@ -63,14 +63,14 @@ final class MotionParser extends LineParser {
     if (cursor.acceptWord("starts")) {
       return starts(name, bracket);
     }
-    sign(Kind.EQUALS, "starts and a value, or = and a value");
+    sign(Kind.EQUALS, "`starts` and a value, or `=` and a value");
     Expr value = expressions.expression();
     end();
     return new MotionLine.Local(line.span(), name, bracket, value, line.remark());
   }
 
   private MotionLine equation(Expr rate) {
-    sign(Kind.EQUALS, "= and what the rate is");
+    sign(Kind.EQUALS, "`=` and what the rate is");
     Expr value = expressions.expression();
     end();
     return new MotionLine.Equation(line.span(), rate, value, line.remark());
@@ -100,9 +100,9 @@ final class MotionParser extends LineParser {
   // turn = "turned" sum "about" postfix
   private MotionLine.Turn turn() {
     Token start = cursor.peek();
-    word("turned", "turned, an angle, about and an axis");
+    word("turned", "`turned` with an angle, `about` and an axis");
     Expr angle = expressions.sum();
-    word("about", "about and the axis of the turn");
+    word("about", "`about` and the axis of the turn");
     Expr about = expressions.term();
     return new MotionLine.Turn(since(start), angle, about);
   }
@@ -127,7 +127,7 @@ final class MotionParser extends LineParser {
   private MotionLine body() {
     cursor.take();
     Expr.Name name = expressions.freeName("the name of a body");
-    word("about", "about and the point or axis that stays in place");
+    word("about", "`about` and the point or axis that stays in place");
     Expr about = expressions.term();
     end();
     return new MotionLine.Body(line.span(), name, about, line.remark());

@@ -108,7 +108,7 @@ final class StatementParser extends LineParser {
     do {
       Token start = cursor.peek();
       Expr.Name name = expressions.freeName("the name of what changes");
-      sign(Kind.EQUALS, "= and a value");
+      sign(Kind.EQUALS, "`=` and a value");
       Expr value = expressions.expression();
       changes.add(new Statement.Change(since(start), name, value));
     } while (cursor.accept(Kind.COMMA));
@@ -251,11 +251,13 @@ final class StatementParser extends LineParser {
     if (cursor.acceptWord("from")) {
       Token text = cursor.peek();
       if (!cursor.accept(Kind.TEXT)) {
-        throw expressions.expected("the name of a file in quotes, \"runs.csv\"");
+        throw expressions.expected("the name of a file in quotes, `\"runs.csv\"`");
       }
       file = new Expr.Text(text.span(), text.text());
     }
-    sign(Kind.COLON, file == null ? ": and the columns, or from and a file" : ": and the columns");
+    sign(
+        Kind.COLON,
+        file == null ? "`:` and the columns, or `from` and a file" : "`:` and the columns");
     return file;
   }
 
@@ -306,12 +308,13 @@ final class StatementParser extends LineParser {
     } while (cursor.accept(Kind.COMMA));
     var conditions = new ArrayList<Statement.Condition>();
     if (cursor.acceptWord("so")) {
-      word("that", "that, as in so that a = b");
+      word("that", "`that`, as in `so that a = b`");
       do {
         conditions.add(condition());
       } while (cursor.acceptWord("and"));
     } else if (!cursor.atWord("for")) {
-      throw expressions.expected("so that and a condition, or for least or for most and a value");
+      throw expressions.expected(
+          "`so that` and a condition, or `for least` or `for most` and a value");
     }
     Statement.Goal goal = goal();
     end();
@@ -322,9 +325,9 @@ final class StatementParser extends LineParser {
   private Statement.Unknown unknown() {
     Token start = cursor.peek();
     Expr.Name name = expressions.freeName("the name of the unknown");
-    word("between", "between and two limits");
+    word("between", "`between` and two limits");
     Expr from = expressions.sum();
-    word("and", "and and the upper limit");
+    word("and", "`and` and the upper limit");
     Expr to = expressions.sum();
     return new Statement.Unknown(since(start), name, from, to);
   }
@@ -335,7 +338,7 @@ final class StatementParser extends LineParser {
     Expr left = expressions.sum();
     Span leftSpan = since(start);
     if (!isBalance(cursor.peek())) {
-      throw expressions.expected("=, <= or >= and the other side");
+      throw expressions.expected("`=`, `<=` or `>=` and the other side");
     }
     Token sign = cursor.take();
     Token middle = cursor.peek();
@@ -359,7 +362,7 @@ final class StatementParser extends LineParser {
     }
     boolean least = cursor.acceptWord("least");
     if (!least) {
-      word("most", "least or most");
+      word("most", "`least` or `most`");
     }
     Expr value = expressions.sum();
     return new Statement.Goal(
@@ -372,7 +375,7 @@ final class StatementParser extends LineParser {
     do {
       ranges.add(range(true));
     } while (cursor.accept(Kind.COMMA));
-    sign(Kind.COLON, ": and what to show");
+    sign(Kind.COLON, "`:` and what to show");
     List<Statement.Output> outputs = outputs();
     end();
     return new Statement.Vary(line.span(), name, ranges, outputs, line.remark());
@@ -390,7 +393,7 @@ final class StatementParser extends LineParser {
       throw cursor.refusal(messages.rangeForm(start.span()));
     }
     Expr from = expressions.sum();
-    word("to", "to and the last value");
+    word("to", "`to` and the last value");
     Expr to = expressions.sum();
     Statement.Stride stride = stride(strideNeeded);
     return new Statement.Range.Stretch(since(start), name, from, to, stride);
@@ -415,7 +418,7 @@ final class StatementParser extends LineParser {
     }
     if (!cursor.acceptWord("in")) {
       if (needed) {
-        throw expressions.expected("by and a step, or in and a number of steps");
+        throw expressions.expected("`by` and a step, or `in` and a number of steps");
       }
       return null;
     }
@@ -424,10 +427,10 @@ final class StatementParser extends LineParser {
       throw expressions.expected("a whole number of steps");
     }
     cursor.take();
-    word("steps", "steps");
+    word("steps", "`steps`");
     boolean ratio = cursor.acceptWord("by");
     if (ratio) {
-      word("ratio", "ratio, as in 10 steps by ratio");
+      word("ratio", "`ratio`, as in `10 steps by ratio`");
     }
     return new Statement.Stride.Counted(Integer.parseInt(number.text()), ratio);
   }

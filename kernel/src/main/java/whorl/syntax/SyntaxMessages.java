@@ -97,7 +97,7 @@ final class SyntaxMessages {
           message(
               "char-fullwidth",
               span,
-              shown + " is a full-width character.",
+              (instead.isBlank() ? "The blank here" : shown) + " is a full-width character.",
               "",
               instead.isBlank() ? "Type an ordinary blank" : "Type " + code(instead));
       case INVISIBLE ->
@@ -244,18 +244,19 @@ final class SyntaxMessages {
   Diagnostic numberAfterNumber(Span whole, Span first, Span second) {
     String left = text(first);
     String right = text(second);
-    return message(
-        "number-number",
-        whole,
-        "Two numbers stand side by side.",
-        "",
-        right.equals("1")
-            ? "A unit per something is written with a negative power, `10 s^-1`; a product `"
-                + left
-                + " * "
-                + right
-                + "`"
-            : "Write " + code(left + " * " + right) + " or " + code(left + " + " + right));
+    String fix;
+    if (left.endsWith("°")) {
+      fix = "Degrees and minutes of arc are added, `30° + 15′`";
+    } else if (right.equals("1")) {
+      fix =
+          "A unit per something is written with a negative power, "
+              + code(left + " s^-1")
+              + "; a product "
+              + code(left + " * 1");
+    } else {
+      fix = "Write " + code(left + " * " + right) + " or " + code(left + " + " + right);
+    }
+    return message("number-number", whole, "Two numbers stand side by side.", "", fix);
   }
 
   Diagnostic raisedForm(Span span) {
@@ -299,7 +300,8 @@ final class SyntaxMessages {
         "Write " + code(text(holder) + " " + text(unit)));
   }
 
-  Diagnostic unitOrName(Span whole, Span holder, Span factor, UnitText unit, String name) {
+  Diagnostic unitOrName(
+      Span whole, Span holder, Span word, Span factor, UnitText unit, String name) {
     // The operator is the sign in front of the factor.
     String product =
         text(holder.start(), factor.start() - 1)
@@ -307,9 +309,7 @@ final class SyntaxMessages {
             + written(new Span(factor.start() - 1, factor.start()))
             + " "
             + text(factor);
-    var flat = new java.util.ArrayList<>(unit.over());
-    unit.under().forEach(power -> flat.add(new Power(power.symbol(), -power.exponent())));
-    String joined = behind(holder, new UnitText(flat, List.of()));
+    String joined = behind(holder, new UnitText(unit.members(), List.of()));
     return message(
             "unit-or-name",
             whole,
@@ -322,27 +322,38 @@ final class SyntaxMessages {
                 + code(unit.plain())
                 + " it is written "
                 + joined
-                + "; with the value of "
+                + ", with the value of "
                 + code(name)
-                + ", "
+                + " "
                 + code(product))
-        .with(factor, "unit or name?");
+        .with(word, "unit or name?");
   }
 
-  Diagnostic secondWord(Span whole, Span left, Span word) {
+  Diagnostic secondWord(Span whole, Span left, Span word, boolean symbol) {
     String first = text(left);
     String second = text(word);
+    if (isWordOfProduct(second)) {
+      return message(
+          "unit-second-word", whole, code(second) + " is no operator.", "", call(second));
+    }
+    String product =
+        "a product with the value of " + code(second) + " " + code(first + " * " + second);
     return message(
         "unit-second-word",
         whole,
         code(second) + " follows a unit without a sign between.",
         "Behind a number a unit has no blanks inside.",
-        "A unit is written "
-            + code(first + "·" + second)
-            + ", a product with the value of "
-            + code(second)
-            + " "
-            + code(first + " * " + second));
+        symbol
+            ? "The unit is written " + code(first + "·" + second) + ", " + product
+            : capitalized(product.replaceFirst("` `", "` is written `")));
+  }
+
+  private static boolean isWordOfProduct(String word) {
+    return word.equals("dot") || word.equals("cross");
+  }
+
+  private static String call(String product) {
+    return "Write `" + product + "(a, b)`, or `a " + (product.equals("dot") ? "·" : "×") + " b`";
   }
 
   Diagnostic unitTwoSlashes(Span whole, String fixed) {
@@ -356,6 +367,15 @@ final class SyntaxMessages {
         "What is multiplied behind the slash of a unit needs parentheses.",
         "",
         "Write " + fixed + "; as a product, put blanks around the sign");
+  }
+
+  Diagnostic unitAfterSlashInBrackets(Span whole, String fixed) {
+    return message(
+        "unit-after-slash",
+        whole,
+        "What is multiplied behind the slash of a unit needs parentheses.",
+        "",
+        "Write " + fixed);
   }
 
   Diagnostic unitHyphen(Span whole, String fixed, Span left, Span word) {
@@ -474,14 +494,28 @@ final class SyntaxMessages {
         span,
         "A unit in brackets cannot stand here.",
         "Brackets stand behind the name that is defined, and at the end of a line that shows.",
-        "Behind a number write the unit without brackets, `5 mm`");
+        "Write " + code("x " + text(span) + " = …") + " to define a value in this unit");
+  }
+
+  Diagnostic bracketBehindNumber(Span span, Span number) {
+    String bracket = text(span);
+    String unit = bracket.replaceAll("[\\[\\]]", "").strip();
+    String tight = unit.startsWith("1") ? "" : code(text(number) + " " + unit) + ", or ";
+    return message(
+        "bracket-place",
+        span,
+        "Behind a number a unit stands without brackets.",
+        "",
+        "Write " + tight + code("x " + bracket + " = …") + " to define a value in this unit");
   }
 
   Diagnostic bracketForm(Span span) {
     return message(
         "bracket-form",
         span,
-        code(span) + " cannot stand here in a unit.",
+        text(span).equals("]")
+            ? "In front of `]` a unit is missing."
+            : code(span) + " cannot stand here in a unit.",
         "",
         "Write `[N·m]`, `[W/(m²·K)]`, `[1/s]`, or `[1]` for a plain number");
   }
@@ -645,21 +679,27 @@ final class SyntaxMessages {
               + code(a + " * " + b)
               + "; the sign of a product is `*`, that of two vectors `×`");
     }
-    if (b.equals("dot") || b.equals("cross")) {
-      return message(
-          "implied-product",
-          span,
-          code(b) + " is no operator.",
-          "",
-          "Write `" + b + "(a, b)`, or `a " + (b.equals("dot") ? "·" : "×") + " b`");
+    if (isWordOfProduct(b)) {
+      return message("implied-product", span, code(b) + " is no operator.", "", call(b));
     }
-    boolean opens = b.equals("(") || b.equals("|");
     return message(
         "implied-product",
         span,
         "Between " + code(a) + " and " + code(b) + " a sign is missing.",
         words,
-        "Write " + code(a + " * " + b + (opens ? "…" : "")));
+        "Write " + code(a + " * " + b + restOf(right)));
+  }
+
+  /** What an operand goes on with that begins with a parenthesis, a bar or a call. */
+  private String restOf(Span begin) {
+    if (text(begin).equals("|")) {
+      return "…|";
+    }
+    if (text(begin).equals("(")) {
+      return "…)";
+    }
+    boolean call = written(new Span(begin.end(), begin.end() + 1)).equals("(");
+    return call ? "(…)" : "";
   }
 
   Diagnostic callBlank(Span span, Span name) {
@@ -903,23 +943,18 @@ final class SyntaxMessages {
   // ---- Statements ----
 
   Diagnostic expected(Span span, String wanted, boolean atEnd) {
-    return message(
-        "expected",
-        span,
-        (atEnd
-                ? "Behind " + code(span) + " something is missing: "
-                : code(span) + " stands where this is needed: ")
-            + wanted
-            + ".",
-        "",
-        "");
+    String problem =
+        atEnd
+            ? "Behind " + code(span) + " something is missing: " + wanted + "."
+            : "In the place of " + code(span) + " this is needed: " + wanted + ".";
+    return message("expected", span, problem, "", "");
   }
 
   Diagnostic trailing(Span span) {
     return message(
         "trailing",
         span,
-        code(span) + " does not fit behind what is complete without it.",
+        code(span) + " cannot follow here.",
         "",
         text(span).equals("with") ? "`with` stands in a definition: `x = E with n = 1.2*n`" : "");
   }
@@ -1059,7 +1094,7 @@ final class SyntaxMessages {
             "This line is indented differently from the first of its block.",
             "",
             "Indent all lines of a block alike")
-        .with(first, "");
+        .with(first, "the first");
   }
 
   Diagnostic indent(Span indent) {

@@ -17,7 +17,7 @@ import whorl.units.UnitText.Power;
  */
 final class UnitScanner {
   /** A unit has no more symbols than this, each counted as often as its exponent says. */
-  private static final int HIGHEST_DEGREE = 40;
+  private static final int HIGHEST_DEGREE = 200;
 
   private final Cursor cursor;
   private final SyntaxMessages messages;
@@ -78,6 +78,11 @@ final class UnitScanner {
   /** Whether the next word would be read as a unit behind a number. */
   boolean isAhead() {
     return couldBegin(cursor.peek()) && units.knows(cursor.peek().text());
+  }
+
+  /** Whether a word is the symbol of a unit. */
+  boolean isSymbol(Token word) {
+    return units.knows(word.text());
   }
 
   /** Whether a word is a name of the sheet, or of the function or motion at hand. */
@@ -234,17 +239,18 @@ final class UnitScanner {
         cursor.take();
         factor(under, true);
       } else if (isGroupOfSymbols()) {
-        cursor.skip(2);
+        cursor.take();
+        Span opened = cursor.take().span();
         int first = open.size();
         factor(under, true);
         while (!cursor.at(Kind.CLOSE)) {
           cursor.take();
           factor(under, true);
         }
-        Span close = cursor.take().span();
+        Span group = opened.to(cursor.take().span());
         // Taken for a formula, the group would count as a whole.
         open.subList(first, open.size())
-            .replaceAll(word -> new OpenWord(word.name(), word.word(), word.factor().to(close)));
+            .replaceAll(word -> new OpenWord(word.name(), word.word(), group));
       }
     }
 
@@ -323,7 +329,7 @@ final class UnitScanner {
           if (names.test(word.name())) {
             Span whole = holder.to(word.factor());
             throw cursor.refusal(
-                messages.unitOrName(whole, holder, word.factor(), text, word.name()));
+                messages.unitOrName(whole, holder, word.word(), word.factor(), text, word.name()));
           }
         }
         open.forEach(word -> unitWords.add(new UnitWord(word.name(), word.word())));
@@ -523,7 +529,8 @@ final class UnitScanner {
         spaced(under);
         Span whole = first.to(cursor.previous().span());
         throw cursor.refusal(
-            messages.unitAfterSlash(whole, messages.inBrackets(new UnitText(over, merged(under)))));
+            messages.unitAfterSlashInBrackets(
+                whole, messages.inBrackets(new UnitText(over, merged(under)))));
       }
     }
 
