@@ -44,9 +44,15 @@ record Declaration(
     return wanted.isEmpty() ? unit.readings() : Readings.of(wanted.get(0));
   }
 
-  /** A value that fits, shown in the declared unit. */
+  /** A value that fits, shown in the declared unit as a unit of the kind that it settled to. */
   Formula formula(Typed typed) {
     Readings readings = typed.operand().readings();
-    return new Formula(typed.operation(), typed.type(), unit, true, Kinds.words(readings));
+    Unit serving =
+        readings.kinds().stream()
+            .findFirst()
+            .flatMap(kind -> UnitCatalogue.standard().resolve(bracket.unit(), kind))
+            .filter(narrowed -> narrowed.factor().equals(unit.factor()))
+            .orElse(unit);
+    return new Formula(typed.operation(), typed.type(), serving, true, Kinds.words(readings));
   }
 }

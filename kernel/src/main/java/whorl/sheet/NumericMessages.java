@@ -3,7 +3,7 @@ package whorl.sheet;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import whorl.check.CallSites;
+import whorl.check.Mentions;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
@@ -26,7 +26,7 @@ final class NumericMessages {
     Span span = failure.span();
     if (inBody) {
       text = results.definingNode(failure.inFunction()).map(Node::source).orElse(node.source());
-      span = CallSites.of(failure.inFunction(), node.statement()).orElse(node.statement().span());
+      span = Mentions.ofCall(failure.inFunction(), node.statement()).orElse(node.statement().span());
     }
     String part = text.slice(failure.span());
     String where = inBody ? "In " + failure.inFunction() + ", " : "";

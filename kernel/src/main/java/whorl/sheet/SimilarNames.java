@@ -20,7 +20,8 @@ final class SimilarNames {
 
   /** Up to four names near to one, the nearest first; none if all are far. */
   List<String> to(String name) {
-    int reach = Math.max(1, name.length() / 3);
+    // In a name of one or two letters any other name is near: only the case may differ.
+    int reach = name.length() < 3 ? 0 : Math.max(1, name.length() / 3);
     return Stream.concat(names.stream(), Vocabulary.atHand().stream())
         .filter(candidate -> distance(name, candidate, reach) <= reach)
         .sorted(

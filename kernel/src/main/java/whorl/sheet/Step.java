@@ -4,7 +4,9 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
+import whorl.check.Mentions;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Span;
 import whorl.syntax.Statement;
 
 /** What a statement left in the note: the material of one row of the ruled table. */
@@ -215,7 +217,8 @@ public sealed interface Step {
               .flatMap(name -> near.get(names.indexOf(name)).stream())
               .distinct()
               .toList();
-      return Optional.of(SheetMessages.undefined(statement.span(), missing, alike));
+      Span first = Mentions.ofName(missing.get(0), statement).orElse(statement.span());
+      return Optional.of(SheetMessages.undefined(first, missing, alike));
     }
 
     @Override
