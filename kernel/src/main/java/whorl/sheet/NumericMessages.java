@@ -26,7 +26,8 @@ final class NumericMessages {
     Span span = failure.span();
     if (inBody) {
       text = results.definingNode(failure.inFunction()).map(Node::source).orElse(node.source());
-      span = Mentions.ofCall(failure.inFunction(), node.statement()).orElse(node.statement().span());
+      span =
+          Mentions.ofCall(failure.inFunction(), node.statement()).orElse(node.statement().span());
     }
     String part = text.slice(failure.span());
     String where = inBody ? "In " + failure.inFunction() + ", " : "";

@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SplittableRandom;
 import java.util.stream.Collectors;
 import java.util.stream.LongStream;
@@ -29,6 +30,10 @@ class RandomFormulasTest {
 
   private static void recipe(String kind, String unit, String... ways) {
     RECIPES.put(kind, new Recipe(unit, List.of(ways)));
+  }
+
+  private static Recipe recipe(String kind) {
+    return Optional.ofNullable(RECIPES.get(kind)).orElseThrow();
   }
 
   static {
@@ -64,7 +69,7 @@ class RandomFormulasTest {
     var value = Rational.of(numerator, denominator);
     inputs.put(name, value);
     sheet
-        .append(name + " [" + RECIPES.get(kind).unit() + "] = ")
+        .append(name + " [" + recipe(kind).unit() + "] = ")
         .append(value.doubleValue())
         .append('\n');
     return new Made(name, value);
@@ -81,7 +86,7 @@ class RandomFormulasTest {
       return new Made(
           "(" + first.text() + " + " + second.text() + ")", first.value().plus(second.value()));
     }
-    List<String> ways = RECIPES.get(kind).ways();
+    List<String> ways = recipe(kind).ways();
     return way(random, ways.get(random.nextInt(ways.size())), depth - 1);
   }
 
@@ -89,7 +94,7 @@ class RandomFormulasTest {
     var text = new StringBuilder("(");
     var product = Rational.ONE;
     boolean divides = false;
-    for (String token : way.replaceAll("\\{([a-z]+) ([a-z]+)}", "{$1_$2}").split(" ")) {
+    for (String token : way.replaceAll("\\{([a-z]+) ([a-z]+)}", "{$1_$2}").split(" ", -1)) {
       if (token.equals("*") || token.equals("/")) {
         divides = token.equals("/");
         text.append(' ').append(token).append(' ');
@@ -121,7 +126,7 @@ class RandomFormulasTest {
     var kinds = new ArrayList<>(RECIPES.keySet());
     String kind = kinds.get(random.nextInt(kinds.size()));
     Made made = make(random, kind, 2);
-    sheet.append("result [" + RECIPES.get(kind).unit() + "] = " + made.text());
+    sheet.append("result [" + recipe(kind).unit() + "] = " + made.text());
     var fresh = new Sheet();
     CellOutcome outcome = fresh.run(new CellId("a"), "cell [1]", sheet.toString());
     assertEquals(

@@ -9,8 +9,10 @@ import java.util.Collections;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Random;
 import java.util.Set;
+import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
 import whorl.diagnostic.Diagnostic;
 import whorl.eval.Value;
@@ -130,7 +132,7 @@ class SheetTest {
     good("2", "v [m/s] = s / (2 s)");
     good("1", "s [kg] = 4");
     Step.Broken broken = (Step.Broken) step("2", 0);
-    assertEquals(2, ((Value.Real) broken.last().value()).value());
+    assertEquals(2, ((Value.Real) Objects.requireNonNull(broken.last()).value()).value());
     good("1", "s [m] = 6");
     assertEquals(3, si("v"));
   }
@@ -251,12 +253,15 @@ class SheetTest {
     cells.put("e", "v_t = v(D/2)\nt [s] = L / T\ncheck t <= 2 min");
     cells.put("f", "T [N·m] = 350\nr = if E > 1 MJ then v_t else v_t / 2");
     List<List<Step>> reference = null;
-    var order = new ArrayList<>(new java.util.TreeSet<>(cells.keySet()));
+    var order = new ArrayList<>(new TreeSet<>(cells.keySet()));
     for (int seed = 0; seed < 50; seed++) {
       Collections.shuffle(order, new Random(seed));
       var fresh = new Sheet();
       for (String cell : order) {
-        assertTrue(fresh.run(new CellId(cell), cell, cells.get(cell)).tookEffect());
+        assertTrue(
+            fresh
+                .run(new CellId(cell), cell, Objects.requireNonNull(cells.get(cell)))
+                .tookEffect());
       }
       List<List<Step>> steps =
           cells.keySet().stream().sorted().map(cell -> fresh.steps(new CellId(cell))).toList();

@@ -23,7 +23,7 @@ class WrongSheetsTest {
   private record WrongSheet(String text, String message) {}
 
   private static List<WrongSheet> table() throws IOException {
-    List<String> parts = List.of(Files.readString(TABLE).strip().split(CASE_BREAK));
+    List<String> parts = List.of(Files.readString(TABLE).strip().split(CASE_BREAK, -1));
     var table = new ArrayList<WrongSheet>();
     for (String part : parts.subList(1, parts.size())) {
       String[] halves = (part + "\n").split(MESSAGE_BREAK, 2);
@@ -69,7 +69,7 @@ class WrongSheetsTest {
   }
 
   private static void rewrite() throws IOException {
-    String head = Files.readString(TABLE).strip().split(CASE_BREAK)[0];
+    String head = Files.readString(TABLE).strip().split(CASE_BREAK, -1)[0];
     String body =
         table().stream()
             .map(wrong -> wrong.text() + MESSAGE_BREAK + answer(wrong.text()))
