@@ -30,14 +30,15 @@ final class HtmlTable implements Piece.Cases<Html> {
     return Html.styled(
         "div",
         Look.SCROLL,
-        Html.styled("table", Look.TABLE, head(), Html.element("tbody", Html.all(body))));
+        Html.styled("table", Look.TABLE, head(rows), Html.element("tbody", Html.all(body))));
   }
 
-  private static Html head() {
+  private static Html head(List<Row> rows) {
+    boolean nothingWentIn = rows.stream().allMatch(row -> row.with().isEmpty());
     var cells = new ArrayList<Html>();
     for (String word : Row.HEADS) {
       Html label = Html.styled("span", Look.QUIET, Html.text(word));
-      String style = Look.head(word);
+      String style = Look.head(word, nothingWentIn);
       cells.add(
           word.equals("gives")
               ? Html.styled("th", style, "colspan", "3", label)
@@ -96,7 +97,7 @@ final class HtmlTable implements Piece.Cases<Html> {
   }
 
   private static Html math(String text) {
-    return Html.styled("span", Look.FORMULA, FormulaHtml.value(text));
+    return Html.styled("span", Look.VALUE, FormulaHtml.value(text));
   }
 
   /** One column of the results, which stand one under another in the same three columns. */

@@ -17,7 +17,7 @@ final class Look {
   static final String SCROLL = "overflow-x:auto;margin:0 0 6px 0";
   // Notebook pages centre tables, stripe their rows and set the text of cells to the right.
   static final String TABLE =
-      "border-collapse:collapse;width:100%;min-width:46em;margin:0;table-layout:auto;"
+      "border-collapse:collapse;width:100%;min-width:40em;margin:0;table-layout:auto;"
           + "font-size:100%;line-height:1.4;border-top:2px solid;border-bottom:2px solid";
   static final String HEAD_ROW = "background:transparent;border-bottom:1px solid";
   static final String ROW =
@@ -37,7 +37,7 @@ final class Look {
           + "white-space:nowrap;"
           + MATH;
   static final String UNIT = CELL + "padding:5px 10px 5px 0;white-space:nowrap;" + MATH;
-  static final String GIVES = CELL + "padding:5px 10px 5px 8px;white-space:nowrap";
+  static final String GIVES = CELL + "padding:5px 10px 5px 8px;min-width:11em;white-space:normal";
   static final String GIVES_BELOW = CELL + "padding:0 10px 5px 8px;white-space:nowrap";
   static final String WHY = CELL + "padding:5px 4px 5px 10px;min-width:9em;border-left:" + HAIRLINE;
   static final String CARD = CELL + "padding:2px 8px 8px 14px;white-space:normal";
@@ -60,6 +60,10 @@ final class Look {
   static final String BOLD_ITALIC = "font-style:italic;font-weight:bold";
   static final String UPRIGHT = "font-style:normal";
   static final String UNBROKEN = "white-space:nowrap";
+
+  /** A number keeps its sign and its unit beside it. */
+  static final String VALUE = FORMULA + ";" + UNBROKEN;
+
   static final String TERM = "display:inline-block;text-indent:0";
   static final String RAISED = "font-size:72%;line-height:0;vertical-align:0.5em";
   static final String LOWERED = "font-size:72%;line-height:0;vertical-align:-0.28em";
@@ -88,14 +92,19 @@ final class Look {
 
   private Look() {}
 
-  /** The head of a column, with its share of the width. */
-  static String head(String word) {
+  /**
+   * The head of a column, with its share of the width.
+   *
+   * @param nothingWentIn whether no row has anything in “with”, as in a table of inputs, so that
+   *     the remarks can have its room
+   */
+  static String head(String word, boolean nothingWentIn) {
     return switch (word) {
       case "quantity" -> HEAD + ";width:8%;border-left:4px solid transparent";
-      case "rule" -> HEAD + ";width:25%";
-      case "with" -> HEAD + ";width:24%";
+      case "rule" -> HEAD + ";width:" + (nothingWentIn ? "16%" : "25%");
+      case "with" -> HEAD + ";width:" + (nothingWentIn ? "6%" : "24%");
       case "gives" -> HEAD + ";width:19%";
-      default -> HEAD + ";width:24%;border-left:" + HAIRLINE;
+      default -> HEAD + ";width:" + (nothingWentIn ? "51%" : "24%") + ";border-left:" + HAIRLINE;
     };
   }
 
