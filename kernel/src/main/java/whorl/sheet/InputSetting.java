@@ -1,7 +1,7 @@
 package whorl.sheet;
 
 import java.util.Optional;
-import whorl.check.CatalogueWords;
+import whorl.syntax.CatalogueWords;
 import whorl.check.InputForm;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.DiagnosticText;

@@ -14,7 +14,7 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Availability;
-import whorl.check.CatalogueWords;
+import whorl.syntax.CatalogueWords;
 import whorl.check.DefinedNames;
 import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;

@@ -13,7 +13,6 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.DiagnosticText;
 import whorl.diagnostic.Source;
 

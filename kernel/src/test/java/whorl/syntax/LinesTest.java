@@ -8,7 +8,6 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.Source;
 
 /** Every line of the table is read as the table says. */

@@ -12,7 +12,6 @@ import java.util.TreeSet;
 import java.util.stream.Collector;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 

@@ -6,7 +6,6 @@ import java.io.IOException;
 import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.Source;
 
 /** Whole calculation notes are read, and their canonical text says the same. */

@@ -9,7 +9,6 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.Source;
 
 /** Canonical text reads as the tree that it was made from. */

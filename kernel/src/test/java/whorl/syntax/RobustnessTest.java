@@ -13,7 +13,6 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
-import whorl.check.CatalogueWords;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.DiagnosticText;
 import whorl.diagnostic.Source;

@@ -1,7 +1,6 @@
-package whorl.check;
+package whorl.syntax;
 
 import java.util.List;
-import whorl.syntax.UnitWords;
 import whorl.units.UnitCatalogue;
 import whorl.units.UnitText;
 import whorl.units.UnknownUnitException;
