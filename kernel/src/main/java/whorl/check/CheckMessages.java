@@ -50,6 +50,11 @@ final class CheckMessages {
         "");
   }
 
+  /** What looks odd in a formula that is sound. */
+  static Diagnostic remark(String sentence, Expr place) {
+    return Diagnostic.of("remark", quoted(place) + ": " + sentence, place.span(), "", "");
+  }
+
   // Characters: number, vector, condition.
 
   static CheckFailure vectorForNumber(Expr expr) {

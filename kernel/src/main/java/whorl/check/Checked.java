@@ -6,36 +6,17 @@ import whorl.units.Unit;
 
 /** A checked statement. */
 public sealed interface Checked {
-  /** The names that go into its frame, in order of first mention. */
-  List<Meaning.Input> inputs();
-
-  /** Number of doubles in its frame. */
-  int frameSize();
+  /** What it is worked out from. */
+  Basis basis();
 
   /** A definition or a shown expression. */
-  record Value(List<Meaning.Input> inputs, int frameSize, Formula formula) implements Checked {
-    /** Copies the list. */
-    public Value {
-      inputs = List.copyOf(inputs);
-    }
-  }
+  record Value(Basis basis, Formula formula) implements Checked {}
 
   /** A function; its inputs are what its body reads from the sheet. */
-  record Function(List<Meaning.Input> inputs, int frameSize, Meaning.Function meaning, String kind)
-      implements Checked {
-    /** Copies the list. */
-    public Function {
-      inputs = List.copyOf(inputs);
-    }
-  }
+  record Function(Basis basis, Meaning.Function meaning, String kind) implements Checked {}
 
   /** A check or an assumption. */
-  record Condition(List<Meaning.Input> inputs, int frameSize, Clause clause) implements Checked {
-    /** Copies the list. */
-    public Condition {
-      inputs = List.copyOf(inputs);
-    }
-  }
+  record Condition(Basis basis, Clause clause) implements Checked {}
 
   /**
    * A hand-worked value to be reproduced.
@@ -43,19 +24,8 @@ public sealed interface Checked {
    * @param relative whether {@code within} is a fraction of the stated value; otherwise it is of
    *     its kind
    */
-  record Reproduction(
-      List<Meaning.Input> inputs,
-      int frameSize,
-      Formula value,
-      Formula stated,
-      Formula within,
-      boolean relative)
-      implements Checked {
-    /** Copies the list. */
-    public Reproduction {
-      inputs = List.copyOf(inputs);
-    }
-  }
+  record Reproduction(Basis basis, Formula value, Formula stated, Formula within, boolean relative)
+      implements Checked {}
 
   /** A condition taken apart into its comparisons, so that each can be shown with its numbers. */
   sealed interface Clause {

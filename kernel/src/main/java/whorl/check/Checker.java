@@ -88,7 +88,7 @@ public final class Checker {
                 checker,
                 definition.value(),
                 Declaration.of(definition.name(), definition.bracket()));
-    return new Checked.Value(frame.inputs(), frame.size(), formula);
+    return new Checked.Value(checker.basis(), formula);
   }
 
   private Checked show(Statement.Show show) {
@@ -98,7 +98,7 @@ public final class Checker {
         show.bracket() == null
             ? undeclared(checker, show.value())
             : declared(checker, show.value(), Declaration.of(null, show.bracket()));
-    return new Checked.Value(frame.inputs(), frame.size(), formula);
+    return new Checked.Value(checker.basis(), formula);
   }
 
   private Checked function(Statement.Function function) {
@@ -121,7 +121,7 @@ public final class Checker {
             formula.chosen(),
             body,
             frame.inputs());
-    return new Checked.Function(frame.inputs(), frame.size(), meaning, formula.kind());
+    return new Checked.Function(checker.basis(), meaning, formula.kind());
   }
 
   private static Meaning.Parameter parameter(Statement.Parameter parameter) {
@@ -135,8 +135,9 @@ public final class Checker {
 
   private Checked condition(Expr condition) {
     var frame = new Frame(0);
-    Checked.Clause clause = clause(new ExpressionChecker(scope, List.of(), frame), condition);
-    return new Checked.Condition(frame.inputs(), frame.size(), clause);
+    var checker = new ExpressionChecker(scope, List.of(), frame);
+    Checked.Clause clause = clause(checker, condition);
+    return new Checked.Condition(checker.basis(), clause);
   }
 
   private Checked.Clause clause(ExpressionChecker checker, Expr condition) {
@@ -176,8 +177,7 @@ public final class Checker {
     Optional<Unit> valueUnit = checker.writtenUnit(reproduction.value());
     Optional<Unit> statedUnit = checker.writtenUnit(reproduction.stated());
     return new Checked.Reproduction(
-        frame.inputs(),
-        frame.size(),
+        checker.basis(),
         formula(value.read(met.operand()), statedUnit.or(() -> valueUnit)),
         formula(stated.read(met.operand()), statedUnit.or(() -> valueUnit)),
         formula(within, checker.writtenUnit(reproduction.within())),

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
+import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
@@ -22,6 +23,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   private final Scope scope;
   private final List<Meaning.Parameter> parameters;
   private final Frame frame;
+  private final List<Diagnostic> remarks = new ArrayList<>();
 
   /**
    * A checker for a formula of the sheet or the body of a function.
@@ -33,6 +35,16 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     this.scope = scope;
     this.parameters = parameters;
     this.frame = frame;
+  }
+
+  /** What has been read so far, and what looked odd. */
+  Basis basis() {
+    return new Basis(frame.inputs(), frame.size(), remarks);
+  }
+
+  /** Notes something that looks odd, though it is sound. */
+  void remark(Diagnostic remark) {
+    remarks.add(remark);
   }
 
   Typed check(Expr expr) {

@@ -3,13 +3,16 @@ package whorl.check;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.function.Consumer;
 import java.util.function.Function;
 import java.util.stream.Collectors;
+import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
 import whorl.units.Rational;
 import whorl.units.Unit;
 import whorl.units.UnitCatalogue;
+import whorl.units.kind.Explanation;
 import whorl.units.kind.Judgement;
 import whorl.units.kind.Kind;
 import whorl.units.kind.KindAlgebra;
@@ -93,9 +96,19 @@ final class Kinds {
     return total.read(((Judgement.Accepted) judgement).operand());
   }
 
-  static Typed product(List<Powered> factors, Expr.Product product, Operation operation) {
-    Operand operand = accepted(KindAlgebra.product(factors), product);
-    return typed(operation, operand).madeOf(factors);
+  static Typed product(
+      List<Powered> factors,
+      Expr.Product product,
+      Operation operation,
+      Consumer<Diagnostic> remarks) {
+    Judgement judgement = KindAlgebra.product(factors);
+    if (judgement instanceof Judgement.Accepted accepted) {
+      accepted
+          .remark()
+          .map(remark -> CheckMessages.remark(Explanation.of(remark), product))
+          .ifPresent(remarks);
+    }
+    return typed(operation, accepted(judgement, product)).madeOf(factors);
   }
 
   static Typed power(Expr.Power power, Typed base, Rational exponent, Operation.Real operation) {

@@ -102,9 +102,9 @@ final class ProductChecker {
           reals.size() == 1 && !reals.get(0).divisor()
               ? reals.get(0).value()
               : new Operation.Product(span, reals);
-      return Kinds.product(kinds.list(), product, whole);
+      return Kinds.product(kinds.list(), product, whole, checker::remark);
     }
     Operation.Vector whole = reals.isEmpty() ? vector : new Operation.Scaled(span, vector, reals);
-    return Kinds.product(kinds.list(), product, whole);
+    return Kinds.product(kinds.list(), product, whole, checker::remark);
   }
 }

@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
-import org.jspecify.annotations.Nullable;
 import whorl.eval.Value;
 import whorl.sheet.Comparison;
 import whorl.sheet.Given;
@@ -110,19 +109,22 @@ final class StepRows implements Step.Cases<Row> {
                 new Layout.Group(parameters)));
     var with = new ArrayList<Line>();
     for (Statement.Parameter parameter : statement.parameters()) {
+      Piece symbol = new Piece.Formula(FormulaLayout.symbol(parameter.name().name(), false));
+      Statement.Bracket bracket = parameter.bracket();
       with.add(
-          Line.of(
-              new Piece.Formula(FormulaLayout.symbol(parameter.name().name(), false)),
-              Piece.quiet(" in "),
-              inBracket(parameter.bracket())));
+          bracket == null || bracket.unit().equals(UnitText.ONE)
+              ? Line.of(symbol, Piece.quiet(" is a plain number"))
+              : Line.of(
+                  symbol, Piece.quiet(" in "), new Piece.Value(UnitSigns.of(bracket.unit()))));
     }
     with.addAll(givens(function.with().stream()));
     var gives = new ArrayList<Line>();
     if (!function.resultKind().isEmpty()) {
       gives.add(Line.of(Piece.words(function.resultKind())));
     }
-    if (statement.bracket() != null) {
-      gives.add(Line.of(Piece.quiet("in "), inBracket(statement.bracket())));
+    Statement.Bracket result = statement.bracket();
+    if (result != null && !result.unit().equals(UnitText.ONE)) {
+      gives.add(Line.of(Piece.quiet("in "), new Piece.Value(UnitSigns.of(result.unit()))));
     }
     return new Row(
         function.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL,
@@ -134,12 +136,6 @@ final class StepRows implements Step.Cases<Row> {
         gives,
         why(function),
         null);
-  }
-
-  private static Piece inBracket(Statement.@Nullable Bracket bracket) {
-    return bracket == null || bracket.unit().equals(UnitText.ONE)
-        ? Piece.words("a plain number")
-        : new Piece.Value(UnitSigns.of(bracket.unit()));
   }
 
   @Override

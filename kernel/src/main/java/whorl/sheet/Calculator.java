@@ -88,8 +88,8 @@ final class Calculator {
 
   /** The values of the names that a statement reads, each in its slots. */
   private double[] frame(Checked checked) {
-    var frame = new double[checked.frameSize()];
-    for (Meaning.Input input : checked.inputs()) {
+    var frame = new double[checked.basis().frameSize()];
+    for (Meaning.Input input : checked.basis().inputs()) {
       var valued = (Result.Valued) results.of(input.name()).orElseThrow();
       if (valued.value() instanceof Value.Real real) {
         frame[input.slot()] = real.value();

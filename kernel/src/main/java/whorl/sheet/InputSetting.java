@@ -1,12 +1,12 @@
 package whorl.sheet;
 
 import java.util.Optional;
-import whorl.syntax.CatalogueWords;
 import whorl.check.InputForm;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.DiagnosticText;
 import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
+import whorl.syntax.CatalogueWords;
 import whorl.syntax.Expr;
 import whorl.syntax.Parsed;
 import whorl.syntax.Parser;

@@ -8,14 +8,30 @@ import whorl.eval.Value;
 
 /** What a statement came to. */
 sealed interface Result {
+  /** What looks odd in the statement, though it is sound. */
+  default List<Diagnostic> remarks() {
+    return List.of();
+  }
+
+  /** A result of a statement that passed the check. */
+  sealed interface Sound extends Result {
+    /** The checked statement. */
+    Checked checked();
+
+    @Override
+    default List<Diagnostic> remarks() {
+      return checked().basis().remarks();
+    }
+  }
+
   /** A definition or shown expression with its value. */
-  record Valued(Checked.Value checked, Value value) implements Result {}
+  record Valued(Checked.Value checked, Value value) implements Sound {}
 
   /** A function, ready to be called. */
-  record Callable(Checked.Function checked) implements Result {}
+  record Callable(Checked.Function checked) implements Sound {}
 
   /** A condition that was judged. */
-  record Judged(Checked.Condition checked, Verdict verdict) implements Result {}
+  record Judged(Checked.Condition checked, Verdict verdict) implements Sound {}
 
   /**
    * A hand-worked value compared.
@@ -25,7 +41,7 @@ sealed interface Result {
    */
   record Compared(
       Checked.Reproduction checked, Value computed, Value stated, double deviation, double within)
-      implements Result {
+      implements Sound {
     boolean holds() {
       return Math.abs(deviation) <= within;
     }

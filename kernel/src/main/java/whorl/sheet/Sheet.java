@@ -14,11 +14,11 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Availability;
-import whorl.syntax.CatalogueWords;
 import whorl.check.DefinedNames;
 import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
+import whorl.syntax.CatalogueWords;
 import whorl.syntax.Parsed;
 import whorl.syntax.Parser;
 import whorl.syntax.Statement;
@@ -274,11 +274,16 @@ public final class Sheet {
         attempted);
   }
 
-  private static List<Diagnostic> notices(CellContent content) {
-    return content.nodes().stream()
-        .filter(node -> node.defines().filter(Vocabulary::isFunction).isPresent())
-        .map(node -> SheetMessages.hides(node.statement(), node.defines().orElseThrow()))
-        .toList();
+  private List<Diagnostic> notices(CellContent content) {
+    var notices = new ArrayList<Diagnostic>();
+    for (Node node : content.nodes()) {
+      node.defines()
+          .filter(Vocabulary::isFunction)
+          .map(name -> SheetMessages.hides(node.statement(), name))
+          .ifPresent(notices::add);
+      notices.addAll(results.of(node).map(Result::remarks).orElse(List.of()));
+    }
+    return notices;
   }
 
   private List<Step> steps(CellContent content, Doubts doubts) {

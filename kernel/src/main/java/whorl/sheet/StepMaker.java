@@ -70,7 +70,7 @@ final class StepMaker {
   /** The names that a statement itself mentions, with the quantities that they stand for. */
   List<Given> given(Checked checked) {
     var given = new ArrayList<Given>();
-    for (Meaning.Input input : checked.inputs()) {
+    for (Meaning.Input input : checked.basis().inputs()) {
       if (input.direct()) {
         results
             .quantity(input.name())

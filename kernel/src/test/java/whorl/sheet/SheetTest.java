@@ -202,6 +202,15 @@ class SheetTest {
   }
 
   @Test
+  void whatLooksOddThoughItIsSoundIsNoticed() {
+    CellOutcome outcome = good("1", "f [Hz] = 50\nw [rad/s] = 2*pi*f/60\nmin = 3");
+    assertEquals(
+        List.of("remark", "hides"), outcome.notices().stream().map(Diagnostic::code).toList());
+    // A cell that is run again says so again.
+    assertEquals(2, good("1", "\nf [Hz] = 50\nw [rad/s] = 2*pi*f/60\nmin = 3").notices().size());
+  }
+
+  @Test
   void vectorsHaveCrossAndDotProducts() {
     good(
         "1", "F = (0, 0, 5) N\nr = (2, 0, 0) m\nM [N·m] = r × F\nW [J] = F · (1, 1, 3) m\ns = |M|");
