@@ -9,7 +9,6 @@ import whorl.diagnostic.Span;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
 import whorl.units.Unit;
-import whorl.units.kind.Kind;
 import whorl.units.kind.Readings;
 
 /**
@@ -17,9 +16,6 @@ import whorl.units.kind.Readings;
  * {@link CheckFailure}; names that have no meaning were found before.
  */
 final class ExpressionChecker implements Expr.Cases<Typed> {
-  private static final Readings ACCELERATION = Readings.of(Kind.named("acceleration"));
-  private static final double STANDARD_FREE_FALL = 9.80665;
-
   private final Scope scope;
   private final List<Meaning.Parameter> parameters;
   private final Frame frame;
@@ -178,11 +174,10 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     if (slot >= 0) {
       return Typed.of(new Operation.Input(name.span(), slot), parameters.get(slot).readings());
     }
-    if (name.name().equals("π")) {
-      return Typed.of(new Operation.Constant(name.span(), Math.PI), Readings.PI);
-    }
-    if (name.name().equals("g_n")) {
-      return Typed.of(new Operation.Constant(name.span(), STANDARD_FREE_FALL), ACCELERATION);
+    Optional<ConstantAtHand> constant = ConstantAtHand.named(name.name());
+    if (constant.isPresent()) {
+      return Typed.of(
+          new Operation.Constant(name.span(), constant.get().value()), constant.get().readings());
     }
     Optional<Meaning> meaning = scope.meaning(name.name());
     if (meaning.isEmpty()) {

@@ -25,7 +25,7 @@ public final class FreeNames {
   }
 
   private static void collect(Expr expr, Set<String> names) {
-    if (expr instanceof Expr.Name name && !Vocabulary.CONSTANTS.contains(name.name())) {
+    if (expr instanceof Expr.Name name && ConstantAtHand.named(name.name()).isEmpty()) {
       names.add(name.name());
     }
     if (expr instanceof Expr.Call call) {

@@ -6,9 +6,6 @@ import java.util.stream.Stream;
 
 /** Words of the language that are no names of a sheet. */
 public final class Vocabulary {
-  /** Constants at hand. */
-  public static final Set<String> CONSTANTS = Set.of("π", "g_n");
-
   /**
    * Bodies, references and their functions: words of the language that this version does not work
    * out.
@@ -57,11 +54,6 @@ public final class Vocabulary {
 
   private Vocabulary() {}
 
-  /** Whether a name is a constant or a function at hand. */
-  public static boolean isAtHand(String name) {
-    return CONSTANTS.contains(name) || FunctionAtHand.named(name).isPresent();
-  }
-
   /** Whether a name is a function at hand, which a definition may hide. */
   public static boolean isFunction(String name) {
     return FunctionAtHand.named(name).isPresent();
@@ -75,7 +67,8 @@ public final class Vocabulary {
   /** Every name at hand. */
   public static List<String> atHand() {
     return Stream.concat(
-            CONSTANTS.stream(), Stream.of(FunctionAtHand.values()).map(FunctionAtHand::word))
+            Stream.of(ConstantAtHand.values()).map(ConstantAtHand::symbol),
+            Stream.of(FunctionAtHand.values()).map(FunctionAtHand::word))
         .sorted()
         .toList();
   }

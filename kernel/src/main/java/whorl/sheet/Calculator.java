@@ -112,7 +112,8 @@ final class Calculator {
     }
     NumericFailure failure = ((Outcome.Failed) outcome).failure();
     throw new NoResult(
-        NumericMessages.of(failure, node, new StepMaker(results).given(checked), results));
+        NumericMessages.of(
+            failure, node, new StepMaker(results).given(node.statement(), checked), results));
   }
 
   private double number(Node node, Checked checked, Formula formula, double[] frame)

@@ -2,6 +2,7 @@ package whorl.sheet;
 
 import org.jspecify.annotations.Nullable;
 import whorl.check.Checked;
+import whorl.check.ConstantAtHand;
 import whorl.check.Formula;
 import whorl.eval.Value;
 import whorl.syntax.Expr;
@@ -15,6 +16,16 @@ final class Quantities {
   /** A value of a formula. */
   static Quantity of(Formula formula, Value value) {
     return new Quantity(value, formula.unit(), formula.chosen(), formula.kind(), null);
+  }
+
+  /** The value of a constant, with all its digits. */
+  static Quantity of(ConstantAtHand constant) {
+    return new Quantity(
+        new Value.Real(constant.value()),
+        constant.unit(),
+        true,
+        "",
+        Double.toString(constant.value()));
   }
 
   /** What a definition or shown expression came to, with its digits as written for an input. */

@@ -3,10 +3,13 @@ package whorl.sheet;
 import java.util.ArrayList;
 import java.util.List;
 import whorl.check.Checked;
+import whorl.check.ConstantAtHand;
 import whorl.check.InputForm;
 import whorl.check.Meaning;
+import whorl.check.Mentions;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
+import whorl.units.Unit;
 
 /** Makes the step of a statement from what it came to. */
 final class StepMaker {
@@ -33,7 +36,7 @@ final class StepMaker {
       return new Step.Function(
           place,
           (Statement.Function) statement,
-          given(callable.checked()),
+          given(statement, callable.checked()),
           callable.checked().kind(),
           doubts);
     } else if (result instanceof Result.Compared compared) {
@@ -41,7 +44,7 @@ final class StepMaker {
       return new Step.Reproduced(
           place,
           (Statement.Reproduction) statement,
-          given(checked),
+          given(statement, checked),
           Quantities.of(checked.value(), compared.computed()),
           Quantities.of(checked.stated(), compared.stated()),
           compared.deviation(),
@@ -49,7 +52,7 @@ final class StepMaker {
           compared.holds(),
           doubts);
     } else if (result instanceof Result.Judged judged) {
-      List<Given> given = given(judged.checked());
+      List<Given> given = given(statement, judged.checked());
       return statement instanceof Statement.Check check
           ? new Step.Checked(place, check, given, judged.verdict(), doubts)
           : new Step.Assumed(
@@ -57,7 +60,7 @@ final class StepMaker {
     }
     var valued = (Result.Valued) result;
     Quantity gives = Quantities.of(node, valued);
-    List<Given> given = given(valued.checked());
+    List<Given> given = given(statement, valued.checked());
     if (statement instanceof Statement.Definition definition) {
       boolean input = InputForm.isInput(definition.value());
       return new Step.Defined(place, definition, input, given, gives, doubts);
@@ -67,14 +70,23 @@ final class StepMaker {
     return new Step.Shown(place, show, name ? List.of() : given, gives, doubts);
   }
 
-  /** The names that a statement itself mentions, with the quantities that they stand for. */
-  List<Given> given(Checked checked) {
+  /**
+   * What a statement itself names, with the quantities that stand for it: names of the sheet, then
+   * constants that have a unit.
+   */
+  List<Given> given(Statement statement, Checked checked) {
     var given = new ArrayList<Given>();
     for (Meaning.Input input : checked.basis().inputs()) {
       if (input.direct()) {
         results
             .quantity(input.name())
             .ifPresent(quantity -> given.add(new Given(input.name(), quantity)));
+      }
+    }
+    for (ConstantAtHand constant : ConstantAtHand.values()) {
+      boolean named = Mentions.ofName(constant.symbol(), statement).isPresent();
+      if (named && !constant.unit().equals(Unit.ONE)) {
+        given.add(new Given(constant.symbol(), Quantities.of(constant)));
       }
     }
     return given;

@@ -211,6 +211,15 @@ class SheetTest {
   }
 
   @Test
+  void aStepListsTheConstantsWithAUnitThatWentIn() {
+    good("1", "m [kg] = 40\nF [N] = m * g_n\nA [m²] = pi * (2 m)^2");
+    var with = ((Step.Defined) step("1", 1)).with();
+    assertEquals(List.of("m", "g_n"), with.stream().map(Given::name).toList());
+    assertEquals("9.80665", with.get(1).quantity().written());
+    assertEquals(List.of(), ((Step.Defined) step("1", 2)).with());
+  }
+
+  @Test
   void vectorsHaveCrossAndDotProducts() {
     good(
         "1", "F = (0, 0, 5) N\nr = (2, 0, 0) m\nM [N·m] = r × F\nW [J] = F · (1, 1, 3) m\ns = |M|");
