@@ -227,7 +227,8 @@ final class CheckMessages {
         "The unit "
             + inUnit.unit().text().typeset()
             + " stands behind "
-            + (kind.isEmpty() ? "a quantity" : "something that already is " + kind)
+            + "something that already is "
+            + kind
             + ".",
         inUnit.unit().span(),
         "A unit makes a quantity of a plain number; `" + group + "` already has one.",

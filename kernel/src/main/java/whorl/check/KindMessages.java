@@ -4,15 +4,18 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
 import whorl.syntax.Expr;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 import whorl.units.Dimension;
+import whorl.units.Rational;
 import whorl.units.Unit;
 import whorl.units.kind.Context;
 import whorl.units.kind.Explanation;
+import whorl.units.kind.Powered;
 import whorl.units.kind.Readings;
 import whorl.units.kind.Refusal;
 
@@ -30,11 +33,11 @@ final class KindMessages {
     }
   }
 
-  static CheckFailure refused(Refusal refusal, Expr expr) {
+  static CheckFailure refused(Refusal refusal, Expr expr, List<Powered> factors) {
     return new CheckFailure(
         names ->
             diagnostic(
-                Explanation.of(refusal, context(names, expr).of(Printer.expression(expr))),
+                Explanation.of(refusal, context(names, expr).madeOf(named(factors))),
                 expr.span(),
                 ""));
   }
@@ -42,7 +45,7 @@ final class KindMessages {
   static CheckFailure unlike(Refusal refusal, Kinds.Together together, Part left, Part right) {
     return new CheckFailure(
         names -> {
-          Context context = context(names, left.expr(), right.expr()).of(left.text(), right.text());
+          Context context = context(names, left.expr(), right.expr());
           Explanation explanation = Explanation.of(refusal, context);
           if (lacksUnit(left, right)) {
             explanation = missingUnit(explanation.problem(), left, right);
@@ -80,7 +83,7 @@ final class KindMessages {
     String example =
         Kinds.usualUnit(other.typed().operand().readings())
             .map(unit -> ", such as " + inUnit(bare, unit))
-            .orElse("");
+            .orElse(".");
     return new Explanation(
         problem, "`" + bare.text() + "` has no unit.", "Write it with its unit" + example);
   }
@@ -94,7 +97,7 @@ final class KindMessages {
     return new CheckFailure(
         names ->
             diagnostic(
-                Explanation.of(refusal, context(names, argument.expr()).of(argument.text())),
+                Explanation.of(refusal, context(names, argument)),
                 argument.span(),
                 label(argument.typed())));
   }
@@ -102,7 +105,7 @@ final class KindMessages {
   static CheckFailure declared(Refusal refusal, Part value, Declaration declaration) {
     return new CheckFailure(
         names -> {
-          Context context = context(names, value.expr()).of(value.text());
+          Context context = context(names, value);
           if (declaration.name() != null) {
             context = context.declaring(declaration.name().name());
           }
@@ -132,7 +135,7 @@ final class KindMessages {
                       "",
                       "`" + value.text() + "` has no unit.",
                       "Write it with its unit, such as " + inUnit(value, parameter.unit()))
-                  : Explanation.of(refusal, context(names, value.expr()).of(value.text()));
+                  : Explanation.of(refusal, context(names, value));
           return diagnostic(
               new Explanation(problem, explanation.reason(), explanation.fix()),
               value.span(),
@@ -171,6 +174,19 @@ final class KindMessages {
     return words.isEmpty() ? readings.unit() : words;
   }
 
+  private static Context context(Map<String, Readings> names, Part part) {
+    List<Powered> factors = part.typed().factors();
+    var whole = new Powered(part.text(), part.typed().operand(), Rational.ONE);
+    return context(names, part.expr()).madeOf(factors.isEmpty() ? List.of(whole) : named(factors));
+  }
+
+  /** The factors, if each has its text as the key: a product of two vectors has none. */
+  private static List<Powered> named(List<Powered> factors) {
+    return factors.stream().allMatch(factor -> factor.key() instanceof String)
+        ? factors
+        : List.of();
+  }
+
   private static Context context(Map<String, Readings> names, Expr... parts) {
     Map<String, Readings> inside = new LinkedHashMap<>();
     for (Expr part : parts) {
@@ -181,7 +197,11 @@ final class KindMessages {
         }
       }
     }
-    return Context.NONE.with(inside).among(names);
+    return Context.NONE
+        .of(Stream.of(parts).map(Printer::expression).toArray(String[]::new))
+        .counting(WrittenNumbers.in(parts))
+        .with(inside)
+        .among(names);
   }
 
   private static List<String> namesIn(Expr root) {

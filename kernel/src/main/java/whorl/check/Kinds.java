@@ -5,7 +5,6 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.function.Function;
-import java.util.stream.Collectors;
 import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
@@ -38,12 +37,8 @@ final class Kinds {
 
   /** The kinds of a quantity in words, or empty where only the dimension is known. */
   static String words(Readings readings) {
-    return readings.kinds().stream()
-        .filter(kind -> !kind.isInternal())
-        .map(Kind::words)
-        .distinct()
-        .limit(2)
-        .collect(Collectors.joining(" or "));
+    boolean named = readings.kinds().stream().anyMatch(kind -> !kind.isInternal());
+    return named ? readings.words() : "";
   }
 
   /** The unit in which a quantity is shown where the author chose none, if there is one. */
@@ -62,7 +57,7 @@ final class Kinds {
 
   static void plainNumberBeforeUnit(Typed group, Expr.InUnit inUnit) {
     if (!isNumber(group)) {
-      throw CheckMessages.unitBehindQuantity(inUnit, words(group.operand().readings()));
+      throw CheckMessages.unitBehindQuantity(inUnit, group.operand().readings().withArticle());
     }
   }
 
@@ -108,7 +103,7 @@ final class Kinds {
           .map(remark -> CheckMessages.remark(Explanation.of(remark), product))
           .ifPresent(remarks);
     }
-    return typed(operation, accepted(judgement, product)).madeOf(factors);
+    return typed(operation, accepted(judgement, product, factors)).madeOf(factors);
   }
 
   static Typed power(Expr.Power power, Typed base, Rational exponent, Operation.Real operation) {
@@ -215,8 +210,12 @@ final class Kinds {
   }
 
   private static Operand accepted(Judgement judgement, Expr text) {
+    return accepted(judgement, text, List.of());
+  }
+
+  private static Operand accepted(Judgement judgement, Expr text, List<Powered> factors) {
     if (judgement instanceof Judgement.Refused refused) {
-      throw KindMessages.refused(refused.refusal(), text);
+      throw KindMessages.refused(refused.refusal(), text, factors);
     }
     return ((Judgement.Accepted) judgement).operand();
   }

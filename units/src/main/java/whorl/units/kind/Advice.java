@@ -50,6 +50,8 @@ record Advice(Kind found, Kind wanted, String difference, String way) {
   }
 
   private static String words(String place, Context context, String foundText) {
-    return place.equals("found") ? foundText : context.nameOf(Kind.named(place));
+    return place.equals("found")
+        ? FactorText.dividend(foundText)
+        : context.nameFor(Kind.named(place), foundText);
   }
 }

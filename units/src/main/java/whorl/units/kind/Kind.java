@@ -27,7 +27,8 @@ public final class Kind {
     RATE,
     COUNT,
     ALONE,
-    ASIDE
+    ASIDE,
+    PLAIN
   }
 
   private final int index;

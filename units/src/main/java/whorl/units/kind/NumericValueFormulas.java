@@ -16,7 +16,7 @@ final class NumericValueFormulas {
       new NumericValueFormulas(KindTable.STANDARD, ResourceLines.of("numeric-values.txt"));
 
   /** What a constant is wrong beside: all kinds of one of the sets. */
-  private record Line(List<Set<Kind>> beside, String formula) {}
+  private record Line(List<Set<Kind>> beside, Optional<String> formula) {}
 
   private final Map<Rational, List<Line>> lines = new HashMap<>();
 
@@ -27,7 +27,7 @@ final class NumericValueFormulas {
           words(columns[1], " +").stream()
               .map(set -> Set.copyOf(words(set, "\\+").stream().map(kinds::named).toList()))
               .toList();
-      var line = new Line(beside, columns[2]);
+      var line = new Line(beside, Optional.of(columns[2]).filter(formula -> !formula.isEmpty()));
       for (String constant : words(columns[0], " +")) {
         this.lines.computeIfAbsent(Rational.parse(constant), key -> new ArrayList<>()).add(line);
       }

@@ -28,6 +28,10 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
           .thenComparing(Reading::tainted)
           .thenComparingInt(Reading::turn);
 
+  private static final String NUMBER_OF_TURNS = "number of turns";
+
+  private static final Kind ANGLE = Kind.named("angle");
+
   /** A pure number. */
   public static final Readings NUMBER = of(Kind.named("number"));
 
@@ -106,18 +110,24 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
    */
   public String words() {
     List<Kind> named = namedKinds();
+    if (isNumberOfTurns()) {
+      return NUMBER_OF_TURNS;
+    }
     return named.isEmpty() ? unit() : joined(named.stream().map(Kind::words).toList());
   }
 
   /** The same as the object of a sentence: {@code a torque or an energy}. */
   public String withArticle() {
     List<Kind> named = namedKinds();
+    if (isNumberOfTurns()) {
+      return "a " + NUMBER_OF_TURNS;
+    }
     return named.isEmpty()
         ? "a quantity in " + unit()
         : joined(named.stream().map(Kind::withArticle).toList());
   }
 
-  /** The unit of the quantity in SI base units and, where rotation took part, radians. */
+  /** The coherent SI unit of the quantity; in base units with radians where rotation took part. */
   public String unit() {
     return CoherentUnit.text(this);
   }
@@ -126,7 +136,7 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
    * The kinds that have words. A special case of a kind that is itself there says nothing more, and
    * some kinds are named only where no other is left.
    */
-  private List<Kind> namedKinds() {
+  List<Kind> namedKinds() {
     List<Kind> kinds = kinds();
     List<Kind> named =
         kinds.stream()
@@ -135,6 +145,11 @@ public record Readings(Dimension dimension, Set<Reading> readings) {
             .toList();
     List<Kind> usual = named.stream().filter(kind -> !kind.has(Kind.Mark.ASIDE)).toList();
     return usual.isEmpty() ? named : usual;
+  }
+
+  /** Whether this is an angle that is one turn short, as a frequency times a time. */
+  private boolean isNumberOfTurns() {
+    return all(reading -> reading.kind() == ANGLE && reading.turn() == -1);
   }
 
   private static String joined(List<String> words) {

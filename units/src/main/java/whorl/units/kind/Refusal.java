@@ -1,6 +1,7 @@
 package whorl.units.kind;
 
 import java.util.List;
+import java.util.Optional;
 import whorl.units.Dimension;
 import whorl.units.Rational;
 
@@ -77,9 +78,9 @@ public sealed interface Refusal {
    * A constant that holds for numbers in fixed units stands in a formula between quantities.
    *
    * @param constant as written
-   * @param formula for which the constant is known, without it
+   * @param formula that holds between quantities; empty if it is the one written, without numbers
    */
-  record NumericValue(Rational constant, String formula) implements Refusal {
+  record NumericValue(Rational constant, Optional<String> formula) implements Refusal {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.numericValue(this);

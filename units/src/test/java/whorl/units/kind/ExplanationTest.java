@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvFileSource;
@@ -119,7 +120,7 @@ class ExplanationTest {
         new Explanation(
             "A velocity cannot be raised to the power 2.8.",
             "Powers like this stem from formulas fitted to numbers in fixed units.",
-            "Divide by a reference quantity first, as (v/v_0)^2.8"),
+            "Divide by a reference quantity first, such as (v/v_0)^2.8"),
         Explanation.of(refusal, Context.NONE));
   }
 
@@ -136,5 +137,53 @@ class ExplanationTest {
         "The 60 looks like a conversion from per minute to per second. An angular velocity carries"
             + " its unit, and no conversion is needed.",
         Explanation.of(new Remark(Rational.of(60), Kind.named("angular_velocity"))));
+  }
+
+  private static Context turning(String part, WrittenPi pi) {
+    return Context.NONE
+        .of(part)
+        .with(Map.of("n", Readings.of(Kind.named("angular_velocity"))))
+        .counting(new Context.Numbers(List.of(pi), List.of()));
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      textBlock =
+          """
+          2*pi*n/60 | 2*pi/60 | 1   | 1  | Leave out `2*pi/60`.
+          pi*n      | pi      | 1/2 | 1  | Write 1/2 in place of `pi`.
+          n/pi      | pi      | 1/2 | -1 | Divide by 2*pi: (n/pi)/(2*pi)
+          """)
+  void turnsTooManyAreTakenFromTheAuthorsOwnPi(
+      String part, String text, String rest, int power, String fix) {
+    var turned = new Reading(Kind.named("angular_velocity"), 1, true);
+    Kind wanted = Kind.named("angular_velocity");
+    var refusal =
+        new Refusal.WrongKind(
+            new Readings(wanted.dimension(), Set.of(turned)), List.of(wanted), wanted.dimension());
+    var pi = new WrittenPi(text, Rational.parse(rest), power);
+    assertEquals(fix, Explanation.of(refusal, turning(part, pi)).fix());
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      textBlock =
+          """
+          3.14   | Write pi in its place: 2*pi*f
+          6.2832 | Write 2*pi in its place: 2*pi*f
+          """)
+  void roundedPiIsToldFromPi(String numeral, String fix) {
+    Kind wanted = Kind.named("angular_velocity");
+    var refusal =
+        new Refusal.WrongKind(
+            Readings.of(Kind.named("frequency")), List.of(wanted), wanted.dimension());
+    var context =
+        Context.NONE
+            .of(numeral + "*f")
+            .with(Map.of("f", Readings.of(Kind.named("frequency"))))
+            .counting(new Context.Numbers(List.of(), List.of("2", numeral)));
+    assertEquals(fix, Explanation.of(refusal, context).fix());
   }
 }
