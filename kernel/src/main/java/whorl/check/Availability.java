@@ -3,6 +3,7 @@ package whorl.check;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Predicate;
 import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
@@ -16,8 +17,12 @@ public final class Availability {
 
   private Availability() {}
 
-  /** The first thing in a statement that this version does not work out, or none. */
-  public static List<Diagnostic> gaps(Statement statement) {
+  /**
+   * The first thing in a statement that this version does not work out, or none.
+   *
+   * @param defined whether the sheet gives a name its own meaning, which hides that of the language
+   */
+  public static List<Diagnostic> gaps(Statement statement, Predicate<String> defined) {
     if (statement instanceof Statement.Definition definition && !definition.changes().isEmpty()) {
       return List.of(CheckMessages.notAvailable("“with”", definition.changes().get(0).span()));
     }
@@ -28,12 +33,12 @@ public final class Availability {
     }
     var gaps = new ArrayList<Diagnostic>();
     for (Expr root : expressions) {
-      Expressions.walk(root, expr -> gap(expr).ifPresent(gaps::add));
+      Expressions.walk(root, expr -> gap(expr, defined).ifPresent(gaps::add));
     }
     return gaps.stream().limit(1).toList();
   }
 
-  private static Optional<Diagnostic> gap(Expr expr) {
+  private static Optional<Diagnostic> gap(Expr expr, Predicate<String> defined) {
     if (expr instanceof Expr.Tolerance tolerance) {
       return Optional.of(CheckMessages.notAvailable("A tolerance with ±", tolerance.span()));
     } else if (expr instanceof Expr.InFrame inFrame) {
@@ -44,7 +49,9 @@ public final class Availability {
       return Optional.of(CheckMessages.notAvailable("A rate of a motion", rate.span()));
     } else if (expr instanceof Expr.Text text) {
       return Optional.of(CheckMessages.textHasNoUse(text.span()));
-    } else if (expr instanceof Expr.Call call && Vocabulary.isLater(call.function().name())) {
+    } else if (expr instanceof Expr.Call call
+        && Vocabulary.isLater(call.function().name())
+        && !defined.test(call.function().name())) {
       return Optional.of(
           CheckMessages.notAvailable("“" + call.function().name() + "”", call.function().span()));
     }

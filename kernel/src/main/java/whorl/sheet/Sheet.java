@@ -54,11 +54,14 @@ public final class Sheet {
             CatalogueWords.STANDARD);
     var nodes = nodes(cell, source, parsed.statements());
     var rules = new NameRules(cells, graph, cell, nodes);
+    Set<String> here = names(nodes);
     var errors = new ArrayList<Diagnostic>(parsed.errors());
     var sound = new ArrayList<Node>();
     for (Node node : nodes) {
       var faults = new ArrayList<>(rules.broken(node));
-      faults.addAll(Availability.gaps(node.statement()));
+      faults.addAll(
+          Availability.gaps(
+              node.statement(), name -> here.contains(name) || graph.definition(name).isPresent()));
       errors.addAll(faults);
       if (faults.isEmpty()) {
         sound.add(node);

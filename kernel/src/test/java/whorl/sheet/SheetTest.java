@@ -289,4 +289,11 @@ class SheetTest {
       assertEquals(reference.toString(), steps.toString());
     }
   }
+
+  @Test
+  void aFunctionOfTheSheetHidesAWordThatIsNotAvailableYet() {
+    WorkedSheet worked = WorkedSheet.of("ring(d [mm]) [mm²] = pi/4 * d^2\nA [mm²] = ring(2 mm)");
+    worked.assertWhole();
+    worked.assertGives("A = 3.141592653589793 mm^2 to 1e-15");
+  }
 }

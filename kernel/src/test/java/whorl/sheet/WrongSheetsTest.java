@@ -12,7 +12,6 @@ import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
-import whorl.diagnostic.DiagnosticText;
 
 /** The table of mistakes and the exact words that answer them. */
 class WrongSheetsTest {
@@ -32,14 +31,6 @@ class WrongSheetsTest {
     return table;
   }
 
-  private static String answer(String text) {
-    CellOutcome outcome = new Sheet().run(new CellId("a"), "cell [1]", text);
-    return outcome.errors().stream()
-        .map(error -> DiagnosticText.render(error, outcome.source()))
-        .collect(joining("\n\n"))
-        .strip();
-  }
-
   @TestFactory
   Stream<DynamicTest> everyMistakeIsAnsweredInTheseWords() throws IOException {
     if (Boolean.getBoolean("whorl.rewrite")) {
@@ -51,7 +42,8 @@ class WrongSheetsTest {
         .map(
             wrong ->
                 DynamicTest.dynamicTest(
-                    wrong.text(), () -> assertEquals(wrong.message(), answer(wrong.text()))));
+                    wrong.text(),
+                    () -> assertEquals(wrong.message(), WorkedSheet.of(wrong.text()).messages())));
   }
 
   @TestFactory
@@ -72,7 +64,7 @@ class WrongSheetsTest {
     String head = Files.readString(TABLE).strip().split(CASE_BREAK, -1)[0];
     String body =
         table().stream()
-            .map(wrong -> wrong.text() + MESSAGE_BREAK + answer(wrong.text()))
+            .map(wrong -> wrong.text() + MESSAGE_BREAK + WorkedSheet.of(wrong.text()).messages())
             .collect(joining(CASE_BREAK));
     Files.writeString(TABLE, head + CASE_BREAK + body + "\n");
   }
