@@ -337,7 +337,8 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
         throw CheckMessages.mixedCharacters(first.value().span(), total, term.value().span(), next);
       }
       collect(term, next, reals, vectors);
-      total = Kinds.added(total, upTo(sum, i), term.subtracted(), next, term.value());
+      int terms = i;
+      total = Kinds.added(total, () -> upTo(sum, terms), term.subtracted(), next, term.value());
     }
     Operation whole =
         vectors.isEmpty()

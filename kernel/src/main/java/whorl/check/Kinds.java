@@ -5,6 +5,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.function.Function;
+import java.util.function.Supplier;
 import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
@@ -78,15 +79,20 @@ final class Kinds {
     return left.read(((Judgement.Accepted) judgement).operand());
   }
 
-  /** A sum or difference so far, with the next term. */
-  static Typed added(Typed total, Expr soFar, boolean subtracted, Typed next, Expr nextText) {
+  /**
+   * A sum or difference so far, with the next term.
+   *
+   * @param soFar the sum so far as written, asked for only where it goes into a message
+   */
+  static Typed added(
+      Typed total, Supplier<Expr> soFar, boolean subtracted, Typed next, Expr nextText) {
     Judgement judgement =
         subtracted
             ? KindAlgebra.minus(total.operand(), next.operand())
             : KindAlgebra.plus(total.operand(), next.operand());
     if (judgement instanceof Judgement.Refused refused) {
       throw KindMessages.unlike(
-          refused.refusal(), Together.COMPARED, part(soFar, total), part(nextText, next));
+          refused.refusal(), Together.COMPARED, part(soFar.get(), total), part(nextText, next));
     }
     return total.read(((Judgement.Accepted) judgement).operand());
   }

@@ -67,7 +67,7 @@ public final class Vocabulary {
   /** Every name at hand. */
   public static List<String> atHand() {
     return Stream.concat(
-            Stream.of(ConstantAtHand.values()).map(ConstantAtHand::symbol),
+            ConstantAtHand.all().stream().map(ConstantAtHand::symbol),
             Stream.of(FunctionAtHand.values()).map(FunctionAtHand::word))
         .sorted()
         .toList();

@@ -16,6 +16,9 @@ final class TextWrap {
   private static final String SIGNS = "+−±≤≥<>=≈×";
   private static final String INDENT = "  ";
 
+  /** A line is looked for in this many times its width, since marks take no room. */
+  private static final int HEAD = 4;
+
   private TextWrap() {}
 
   /** A text without the marks that say where it may break and where not. */
@@ -26,17 +29,25 @@ final class TextWrap {
   /** The lines of a text; all but the first are indented. */
   static List<String> wrap(String text, int width) {
     var lines = new ArrayList<String>();
-    String rest = text;
-    while (TextWidth.of(rest) > width) {
-      int[] points = rest.codePoints().toArray();
-      int room = fitting(points, width);
-      int least = lines.isEmpty() ? 1 : INDENT.length() + 1;
-      int cut = cut(points, Math.max(least, room), least);
+    int[] all = text.codePoints().toArray();
+    int start = 0;
+    while (true) {
+      // A line is cut from the head of what is left, so that long texts take no longer a line.
+      int end = Math.min(all.length, start + HEAD * width);
+      String head = (lines.isEmpty() ? "" : INDENT) + new String(all, start, end - start);
+      if (end == all.length && TextWidth.of(head) <= width) {
+        lines.add(head);
+        return lines;
+      }
+      int[] points = head.codePoints().toArray();
+      int indent = lines.isEmpty() ? 0 : INDENT.length();
+      int cut = cut(points, Math.max(indent + 1, fitting(points, width)), indent + 1);
       lines.add(new String(points, 0, cut).stripTrailing());
-      rest = INDENT + new String(points, cut, points.length - cut).stripLeading();
+      start += cut - indent;
+      while (start < all.length && Character.isWhitespace(all[start])) {
+        start++;
+      }
     }
-    lines.add(rest);
-    return lines;
   }
 
   /** How many code points fit. */

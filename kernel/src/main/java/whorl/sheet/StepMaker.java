@@ -83,7 +83,7 @@ final class StepMaker {
             .ifPresent(quantity -> given.add(new Given(input.name(), quantity)));
       }
     }
-    for (ConstantAtHand constant : ConstantAtHand.values()) {
+    for (ConstantAtHand constant : ConstantAtHand.all()) {
       boolean named = Mentions.ofName(constant.symbol(), statement).isPresent();
       if (named && !constant.unit().equals(Unit.ONE)) {
         given.add(new Given(constant.symbol(), Quantities.of(constant)));
