@@ -47,7 +47,9 @@ final class RunCommand implements Callable<Integer> {
   @Option(
       names = "--out",
       paramLabel = "FILE.ipynb",
-      description = "write the note with its results; inputs that were set are changed there")
+      description =
+          "write the note with its results, unless it has an error; inputs that were set are"
+              + " changed there")
   private @Nullable Path out;
 
   @Option(
@@ -80,9 +82,19 @@ final class RunCommand implements Callable<Integer> {
       AtomicFile.replace(json, record.getBytes(StandardCharsets.UTF_8));
     }
     if (out != null) {
-      AtomicFile.replace(out, note.executed(run.executions()).getBytes(StandardCharsets.UTF_8));
+      write(out, note, run, status);
     }
     return status.code();
+  }
+
+  /** A note in error replaces no file: what stands there may be the last good one. */
+  private void write(Path target, Note note, NoteRun run, ExitStatus status)
+      throws NoteFileException {
+    if (status == ExitStatus.ERROR) {
+      spec.commandLine().getErr().println(target + " was not written, for the note has an error.");
+    } else {
+      AtomicFile.replace(target, note.executed(run.executions()).getBytes(StandardCharsets.UTF_8));
+    }
   }
 
   private Note set(Note note) throws NoteFileException {
