@@ -44,6 +44,36 @@ class UcumLibraryTest {
     }
   }
 
+  /**
+   * Rows that UCUM has no code for, by what the trade defines them as: the multiples are common
+   * practice, the watts of the boiler and water horsepower those of NIST SP 811, Appendix B.
+   */
+  private static final Map<String, String> DEFINED_BY =
+      Map.of(
+          "tonf force", "2000.[lbf_av]",
+          "kip·ft torque", "1000.[lbf_av].[ft_i]",
+          "hp_M power", "75.kgf.m/s",
+          "hp_E power", "746.W",
+          "hp_S power", "98095.W/10",
+          "hp_W power", "746043.W/1000",
+          "tons_ref power", "12000.[Btu_IT]/h",
+          "kgf·m^2 flywheel_effect", "kg.m2",
+          "kgf·cm^2 flywheel_effect", "kg.cm2",
+          "lb·ft^2 flywheel_effect", "[lb_av].[ft_i]2");
+
+  static Stream<CatalogueRow> rowsWithoutCode() {
+    return CatalogueFile.rows().stream().filter(row -> row.ucum().isEmpty());
+  }
+
+  @ParameterizedTest
+  @MethodSource("rowsWithoutCode")
+  void whatTheLibraryHasNoCodeForAgreesWithItsDefinition(CatalogueRow row) throws UcumException {
+    String name = row.text().plain() + " " + row.kind().name();
+    UcumDefinitions.Size size = UCUM.size(DEFINED_BY.getOrDefault(name, "no definition: " + name));
+    assertEquals(row.kind().dimension(), size.dimension());
+    assertEquals(row.factor(), size.factor());
+  }
+
   @ParameterizedTest
   @MethodSource("randomCodes")
   void productsHaveTheSameSize(UnitText text, String code) throws UcumException {
