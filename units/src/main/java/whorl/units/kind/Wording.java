@@ -60,7 +60,7 @@ final class Wording implements Refusal.Cases<Explanation> {
   /** A mistake in the turns, unless more is known of just these kinds. */
   private Optional<Explanation> slip(Readings found, List<Kind> wanted, String problem) {
     boolean advised =
-        Advice.on(found.kinds(), wanted).isPresent() && context.insideOf(FREQUENCY).isEmpty();
+        Advice.on(found.namedKinds(), wanted).isPresent() && context.insideOf(FREQUENCY).isEmpty();
     return advised ? Optional.empty() : turns.slip(found, wanted, problem);
   }
 
