@@ -71,6 +71,11 @@ public final class Availability {
     }
 
     @Override
+    public String published(Statement.Published published) {
+      return "";
+    }
+
+    @Override
     public String show(Statement.Show show) {
       return "";
     }

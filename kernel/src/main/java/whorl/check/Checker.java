@@ -4,6 +4,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Supplier;
+import java.util.stream.IntStream;
 import whorl.diagnostic.Diagnostic;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
@@ -33,8 +35,17 @@ public final class Checker {
 
   /** Checks a statement. */
   public Result check(Statement statement) {
+    return check(statement, () -> checked(statement));
+  }
+
+  /** Checks the head of a function that a routine works out. */
+  public Result check(Statement.Published head, Routine routine) {
+    return check(head, () -> published(head, routine));
+  }
+
+  private Result check(Statement statement, Supplier<Checked> check) {
     try {
-      return new Result.Passed(checked(statement));
+      return new Result.Passed(check.get());
     } catch (CheckFailure failure) {
       return new Result.Refused(failure.among(readings(statement)));
     }
@@ -75,7 +86,10 @@ public final class Checker {
     } else if (statement instanceof Statement.Reproduction reproduction) {
       return reproduction(reproduction);
     }
-    throw new IllegalStateException("answered by Availability before the check: " + statement);
+    throw new IllegalStateException(
+        statement instanceof Statement.Published
+            ? "a head is checked with its routine: " + statement
+            : "answered by Availability before the check: " + statement);
   }
 
   private Checked definition(Statement.Definition definition) {
@@ -110,18 +124,38 @@ public final class Checker {
             ? undeclared(checker, function.body())
             : declared(
                 checker, function.body(), Declaration.of(function.name(), function.bracket()));
-    String name = function.name().name();
-    var body = new Operation.Body(name, formula.operation(), frame.size());
+    return function(function.name(), parameters, formula, checker.basis());
+  }
+
+  private static Checked published(Statement.Published head, Routine routine) {
+    var parameters = head.parameters().stream().map(Checker::parameter).toList();
+    var declaration = Declaration.of(head.name(), head.bracket());
+    List<Operation.Real> arguments =
+        IntStream.range(0, parameters.size())
+            .mapToObj(slot -> new Operation.Input(head.parameters().get(slot).span(), slot))
+            .map(Operation.Real.class::cast)
+            .toList();
+    var call =
+        new Operation.RoutineCall(
+            head.span(), new RoutineInUnits(routine, parameters, declaration.unit()), arguments);
+    Formula formula = declaration.formula(Typed.of(call, declaration.usualReadings()));
+    var basis = new Basis(List.of(), parameters.size(), List.of());
+    return function(head.name(), parameters, formula, basis);
+  }
+
+  private static Checked function(
+      Expr.Name name, List<Meaning.Parameter> parameters, Formula formula, Basis basis) {
+    var body = new Operation.Body(name.name(), formula.operation(), basis.frameSize());
     var meaning =
         new Meaning.Function(
-            name,
+            name.name(),
             parameters,
             formula.type(),
             formula.unit(),
             formula.chosen(),
             body,
-            frame.inputs());
-    return new Checked.Function(checker.basis(), meaning, formula.kind());
+            basis.inputs());
+    return new Checked.Function(basis, meaning, formula.kind());
   }
 
   private static Meaning.Parameter parameter(Statement.Parameter parameter) {

@@ -26,6 +26,11 @@ public final class DefinedNames {
     }
 
     @Override
+    public List<Expr.Name> published(Statement.Published published) {
+      return List.of(published.name());
+    }
+
+    @Override
     public List<Expr.Name> show(Statement.Show show) {
       return List.of();
     }

@@ -69,6 +69,8 @@ public sealed interface Operation {
     R angleBetween(AngleBetween angle);
 
     R call(Call call);
+
+    R routineCall(RoutineCall call);
   }
 
   /**
@@ -301,6 +303,23 @@ public sealed interface Operation {
     @Override
     public <R> R match(RealCases<R> cases) {
       return cases.call(this);
+    }
+  }
+
+  /**
+   * A call of a routine, which is worked out outside the sheet.
+   *
+   * @param routine takes and gives coherent SI units, and leaves its arguments as they are
+   */
+  record RoutineCall(Span span, Routine routine, List<Real> arguments) implements Real {
+    /** Copies the arguments. */
+    public RoutineCall {
+      arguments = List.copyOf(arguments);
+    }
+
+    @Override
+    public <R> R match(RealCases<R> cases) {
+      return cases.routineCall(this);
     }
   }
 

@@ -12,7 +12,7 @@ import whorl.check.Operation;
  * <p>The formulas are worked out a block of rows at a time, operation by operation, in registers
  * that fit into the cache; what formulas have in common is worked out once, what does not vary once
  * a run. Functions are written out in place of their calls. A formula that would be too large when
- * written out is worked out row by row instead.
+ * written out, or that calls a routine, is worked out row by row instead.
  *
  * <p>Every number is the same, to the last bit, as {@link ScalarEvaluator} gives for that row, and
  * so is every failure: a row in which a result comes out infinite or NaN is worked out again by
@@ -64,7 +64,7 @@ public final class BlockProgram {
         for (int node : writer.write(formula)) {
           results.add(new BlockPlanner.Result(node, next++));
         }
-      } catch (RowGraphWriter.TooLarge tooLarge) {
+      } catch (RowGraphWriter.RowByRow rowByRow) {
         inBlocks = false;
       }
       RowFormula rowFormula = RowFormula.of(formula, column, inBlocks);

@@ -1,5 +1,7 @@
 package whorl.eval;
 
+import java.util.List;
+import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
 
 /**
@@ -12,8 +14,29 @@ import whorl.diagnostic.Span;
  * @param operand the number at fault, in coherent SI units: the divisor, the operand of the root,
  *     and where a result is too large the last number that went in; where the evaluation was ended,
  *     the number of operations or levels it had come to
+ * @param call the call of a routine that gave no number; null in any other case
  */
-public record NumericFailure(Reason reason, Span span, String inFunction, double operand) {
+public record NumericFailure(
+    Reason reason, Span span, String inFunction, double operand, @Nullable Call call) {
+
+  /**
+   * A call of a routine that gave no number.
+   *
+   * @param arguments in coherent SI units
+   * @param said what the routine said; empty where it gave infinity or NaN
+   */
+  public record Call(List<Double> arguments, String said) {
+    /** Copies the arguments. */
+    public Call {
+      arguments = List.copyOf(arguments);
+    }
+  }
+
+  /** A failure of the sheet's own arithmetic. */
+  public NumericFailure(Reason reason, Span span, String inFunction, double operand) {
+    this(reason, span, inFunction, operand, null);
+  }
+
   /** The ways in which a part can have no value. */
   public enum Reason {
     /** A divisor is zero. */
@@ -30,6 +53,8 @@ public record NumericFailure(Reason reason, Span span, String inFunction, double
     DIRECTION_OF_ZERO,
     /** Zero to a negative power. */
     ZERO_TO_NEGATIVE_POWER,
+    /** A routine gave infinity or NaN, which is the operand, or failed; the operand is then NaN. */
+    ROUTINE_WITHOUT_VALUE,
     /** The evaluation was interrupted. */
     INTERRUPTED,
     /** The evaluation took more operations than allowed. */

@@ -16,6 +16,7 @@ import whorl.check.Operation.Power;
 import whorl.check.Operation.Product;
 import whorl.check.Operation.Real;
 import whorl.check.Operation.RealCases;
+import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Unary;
 import whorl.check.Operation.UnaryFunction;
@@ -167,5 +168,11 @@ final class RealCodeWriter implements RealCases<Code.Real> {
   @Override
   public Code.Real call(Call call) {
     return CallCode.of(call.callee(), call.arguments(), writer)::real;
+  }
+
+  @Override
+  public Code.Real routineCall(RoutineCall call) {
+    Code.Real[] arguments = call.arguments().stream().map(writer::real).toArray(Code.Real[]::new);
+    return new RoutineCode(writer.site(call.span()), call.routine(), arguments);
   }
 }

@@ -15,6 +15,7 @@ import whorl.check.Operation.Part;
 import whorl.check.Operation.Power;
 import whorl.check.Operation.Product;
 import whorl.check.Operation.RealCases;
+import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Term;
 import whorl.check.Operation.Unary;
@@ -188,5 +189,11 @@ final class RealNodes implements RealCases<Integer> {
   @Override
   public Integer call(Call call) {
     return writer.call(call.callee(), call.arguments()).get(0);
+  }
+
+  /** Routines are called row by row: a row that does not need one must not call it. */
+  @Override
+  public Integer routineCall(RoutineCall call) {
+    throw new RowGraphWriter.RowByRow();
   }
 }

@@ -21,12 +21,12 @@ final class RowGraphWriter {
   /** Levels of operations and calls to write, for the sake of the stack. */
   private static final int MOST_LEVELS = 1_000;
 
-  /** Says that a formula is too large to be written out. */
-  static final class TooLarge extends RuntimeException {
+  /** Says that a formula is not to be written out but worked out row by row. */
+  static final class RowByRow extends RuntimeException {
     private static final long serialVersionUID = 1L;
 
-    private TooLarge() {
-      super("formula with its functions is too large to be written out", null, false, false);
+    RowByRow() {
+      super("formula is worked out row by row", null, false, false);
     }
   }
 
@@ -55,7 +55,7 @@ final class RowGraphWriter {
   /**
    * The nodes of a formula's value: one, or three for a vector.
    *
-   * @throws TooLarge if it is; the writer stays usable
+   * @throws RowByRow if it is too large or calls a routine; the writer stays usable
    */
   List<Integer> write(Operation formula) {
     frame = formulaFrame;
@@ -98,7 +98,7 @@ final class RowGraphWriter {
     operations++;
     level++;
     if (operations > MOST_OPERATIONS || level > MOST_LEVELS) {
-      throw new TooLarge();
+      throw new RowByRow();
     }
   }
 

@@ -13,4 +13,11 @@ record Site(Span span, String inFunction) {
   NoValue noValue(NumericFailure.Reason reason, double operand) {
     return new NoValue(new NumericFailure(reason, span, inFunction, operand));
   }
+
+  /** What to throw where this part calls a routine that gives no number. */
+  NoValue noValue(NumericFailure.Call call, double given) {
+    return new NoValue(
+        new NumericFailure(
+            NumericFailure.Reason.ROUTINE_WITHOUT_VALUE, span, inFunction, given, call));
+  }
 }

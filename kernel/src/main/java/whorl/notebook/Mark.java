@@ -37,6 +37,11 @@ public enum Mark {
           }
 
           @Override
+          public Mark published(Step.Published published) {
+            return NONE;
+          }
+
+          @Override
           public Mark shown(Step.Shown shown) {
             return NONE;
           }

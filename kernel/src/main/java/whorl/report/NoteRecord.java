@@ -15,17 +15,20 @@ import whorl.sheet.Quantity;
 import whorl.sheet.Step;
 import whorl.sheet.Verdict;
 import whorl.syntax.Printer;
+import whorl.syntax.Statement;
 import whorl.units.Unit;
 
 /**
- * The results of a note for tools, as {@value #MEDIA_TYPE}: definitions by name, checks,
- * assumptions and errors, in the order of the note, at full double precision.
+ * The results of a note for tools, as {@value #MEDIA_TYPE}: definitions by name, functions
+ * published from Java if there are any, checks, assumptions and errors, in the order of the note,
+ * at full double precision.
  */
 public final class NoteRecord implements Step.Cases<NoteRecord> {
   /** Media type of the record. */
   public static final String MEDIA_TYPE = "application/x-whorl-steps+json";
 
   private final JsonObject definitions = new JsonObject();
+  private final JsonObject published = new JsonObject();
   private final JsonArray checks = new JsonArray();
   private final JsonArray assumptions = new JsonArray();
   private final JsonArray errors = new JsonArray();
@@ -47,6 +50,9 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     faults.forEach(record::fault);
     var object = new JsonObject();
     object.add("definitions", record.definitions);
+    if (!record.published.isEmpty()) {
+      object.add("published", record.published);
+    }
     object.add("checks", record.checks);
     object.add("assumptions", record.assumptions);
     object.add("errors", record.errors);
@@ -140,6 +146,17 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
 
   @Override
   public NoteRecord function(Step.Function function) {
+    return this;
+  }
+
+  @Override
+  public NoteRecord published(Step.Published step) {
+    Statement.Published statement = step.statement();
+    var function = new JsonObject();
+    function.addProperty("kind", step.resultKind());
+    function.addProperty("unit", statement.bracket().unit().typeset());
+    function.addProperty("head", Printer.unremarked(statement));
+    published.add(statement.name().name(), function);
     return this;
   }
 

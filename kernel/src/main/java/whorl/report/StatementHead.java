@@ -30,6 +30,11 @@ record StatementHead(Line quantity, Line rule) {
     }
 
     @Override
+    public StatementHead published(Statement.Published published) {
+      return firstLine(symbol(published.name()), published);
+    }
+
+    @Override
     public StatementHead show(Statement.Show show) {
       return formula(word("show"), show.value());
     }

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import whorl.eval.Value;
 import whorl.sheet.Comparison;
 import whorl.sheet.Given;
@@ -97,45 +98,79 @@ final class StepRows implements Step.Cases<Row> {
   @Override
   public Row function(Step.Function function) {
     Statement.Function statement = function.statement();
-    List<Layout> parameters =
-        statement.parameters().stream()
+    List<Line> with = parameters(statement.parameters());
+    with.addAll(givens(function.with().stream()));
+    return ofFunction(
+        function,
+        head(statement.name(), statement.parameters()),
+        function.resultKind(),
+        formula(statement.body(), vectors(function.with())),
+        with,
+        statement.bracket());
+  }
+
+  @Override
+  public Row published(Step.Published published) {
+    Statement.Published statement = published.statement();
+    return ofFunction(
+        published,
+        head(statement.name(), statement.parameters()),
+        published.resultKind(),
+        Line.of(Piece.quiet("Java, " + published.label())),
+        parameters(statement.parameters()),
+        statement.bracket());
+  }
+
+  private static Row ofFunction(
+      Step step,
+      Line head,
+      String kind,
+      Line rule,
+      List<Line> with,
+      Statement.@Nullable Bracket result) {
+    var gives = new ArrayList<Line>();
+    if (!kind.isEmpty()) {
+      gives.add(Line.of(Piece.words(kind)));
+    }
+    if (result != null && !result.unit().equals(UnitText.ONE)) {
+      gives.add(Line.of(Piece.quiet("in "), new Piece.Value(UnitSigns.of(result.unit()))));
+    }
+    return new Row(
+        step.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL,
+        head,
+        kind,
+        List.of(rule),
+        with,
+        List.of(),
+        gives,
+        why(step),
+        null);
+  }
+
+  private static Line head(Expr.Name name, List<Statement.Parameter> parameters) {
+    List<Layout> symbols =
+        parameters.stream()
             .map(parameter -> (Layout) FormulaLayout.symbol(parameter.name().name(), false))
             .toList();
-    Layout head =
-        new Layout.SideBySide(
-            Layout.Binding.ATOM,
-            List.of(
-                FormulaLayout.symbol(statement.name().name(), false),
-                new Layout.Group(parameters)));
-    var with = new ArrayList<Line>();
-    for (Statement.Parameter parameter : statement.parameters()) {
+    return Line.of(
+        new Piece.Formula(
+            new Layout.SideBySide(
+                Layout.Binding.ATOM,
+                List.of(FormulaLayout.symbol(name.name(), false), new Layout.Group(symbols)))));
+  }
+
+  private static List<Line> parameters(List<Statement.Parameter> parameters) {
+    var lines = new ArrayList<Line>();
+    for (Statement.Parameter parameter : parameters) {
       Piece symbol = new Piece.Formula(FormulaLayout.symbol(parameter.name().name(), false));
       Statement.Bracket bracket = parameter.bracket();
-      with.add(
+      lines.add(
           bracket == null || bracket.unit().equals(UnitText.ONE)
               ? Line.of(symbol, Piece.quiet(" is a plain number"))
               : Line.of(
                   symbol, Piece.quiet(" in "), new Piece.Value(UnitSigns.of(bracket.unit()))));
     }
-    with.addAll(givens(function.with().stream()));
-    var gives = new ArrayList<Line>();
-    if (!function.resultKind().isEmpty()) {
-      gives.add(Line.of(Piece.words(function.resultKind())));
-    }
-    Statement.Bracket result = statement.bracket();
-    if (result != null && !result.unit().equals(UnitText.ONE)) {
-      gives.add(Line.of(Piece.quiet("in "), new Piece.Value(UnitSigns.of(result.unit()))));
-    }
-    return new Row(
-        function.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL,
-        Line.of(new Piece.Formula(head)),
-        function.resultKind(),
-        List.of(formula(statement.body(), vectors(function.with()))),
-        with,
-        List.of(),
-        gives,
-        why(function),
-        null);
+    return lines;
   }
 
   @Override

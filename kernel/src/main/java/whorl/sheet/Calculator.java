@@ -8,6 +8,7 @@ import whorl.check.Checker;
 import whorl.check.Formula;
 import whorl.check.Meaning;
 import whorl.check.Operation;
+import whorl.check.Routine;
 import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;
 import whorl.eval.NumericFailure;
@@ -34,7 +35,7 @@ final class Calculator {
     if (!open.isEmpty()) {
       return new Result.Waiting(open);
     }
-    Checker.Result result = new Checker(results).check(node.statement());
+    Checker.Result result = checked(node);
     if (result instanceof Checker.Result.Refused refused) {
       return new Result.Broken(refused.diagnostic(), null);
     }
@@ -45,6 +46,14 @@ final class Calculator {
     } catch (NoResult failure) {
       return new Result.Broken(failure.diagnostic, null);
     }
+  }
+
+  private Checker.Result checked(Node node) {
+    var checker = new Checker(results);
+    Routine routine = node.routine();
+    return node.statement() instanceof Statement.Published head && routine != null
+        ? checker.check(head, routine)
+        : checker.check(node.statement());
   }
 
   /**
@@ -112,8 +121,7 @@ final class Calculator {
     }
     NumericFailure failure = ((Outcome.Failed) outcome).failure();
     throw new NoResult(
-        NumericMessages.of(
-            failure, node, new StepMaker(results).given(node.statement(), checked), results));
+        NumericMessages.of(failure, node, Givens.of(node.statement(), checked, results), results));
   }
 
   private double number(Node node, Checked checked, Formula formula, double[] frame)

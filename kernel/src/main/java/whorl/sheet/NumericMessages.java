@@ -1,8 +1,10 @@
 package whorl.sheet;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import whorl.check.Meaning;
 import whorl.check.Mentions;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
@@ -10,6 +12,7 @@ import whorl.diagnostic.Span;
 import whorl.eval.NumericFailure;
 import whorl.eval.Value;
 import whorl.units.Dimension;
+import whorl.units.Unit;
 
 /** The messages about formulas that have no value: the one place for their wording. */
 final class NumericMessages {
@@ -29,6 +32,11 @@ final class NumericMessages {
       span =
           Mentions.ofCall(failure.inFunction(), node.statement()).orElse(node.statement().span());
     }
+    NumericFailure.Call call = failure.call();
+    if (call != null
+        && results.of(failure.inFunction()).orElse(null) instanceof Result.Callable f) {
+      return routine(call, f.checked().meaning(), failure.operand(), span);
+    }
     String part = text.slice(failure.span());
     String where = inBody ? "In " + failure.inFunction() + ", " : "";
     return Diagnostic.of(
@@ -37,6 +45,32 @@ final class NumericMessages {
         span,
         with(given),
         fix(failure.reason(), part));
+  }
+
+  private static Diagnostic routine(
+      NumericFailure.Call call, Meaning.Function function, double gave, Span span) {
+    var arguments = new ArrayList<String>();
+    for (int i = 0; i < function.parameters().size(); i++) {
+      Meaning.Parameter parameter = function.parameters().get(i);
+      double value = parameter.unit().fromSi(call.arguments().get(i));
+      arguments.add(stated(parameter.name(), Digits.of(value), parameter.unit()));
+    }
+    return Diagnostic.of(
+        code(NumericFailure.Reason.ROUTINE_WITHOUT_VALUE),
+        function.name() + " gives no number for " + String.join(", ", arguments) + ".",
+        span,
+        "Its Java code " + said(call, gave),
+        fix(NumericFailure.Reason.ROUTINE_WITHOUT_VALUE, ""));
+  }
+
+  private static String said(NumericFailure.Call call, double gave) {
+    if (call.said().isEmpty()) {
+      return Double.isNaN(gave)
+          ? "returns NaN, which is no number."
+          : "returns a number that is too large.";
+    }
+    return "says: "
+        + (call.said().length() <= 300 ? call.said() : call.said().substring(0, 298) + " …");
   }
 
   private static String sentence(String where, String problem) {
@@ -67,6 +101,7 @@ final class NumericMessages {
       case DIRECTION_OF_ZERO -> "`" + part + "` has length zero, and so no direction.";
       case ZERO_TO_NEGATIVE_POWER ->
           "division by zero: `" + part + "` is 0 and stands under a negative power.";
+      case ROUTINE_WITHOUT_VALUE -> "`" + part + "` gives no number.";
       case INTERRUPTED -> "the calculation was interrupted.";
       case TOO_LONG -> "the calculation takes too many operations and was stopped.";
       case TOO_DEEP -> "functions call each other too deeply.";
@@ -75,7 +110,7 @@ final class NumericMessages {
 
   private static String fix(NumericFailure.Reason reason, String part) {
     return switch (reason) {
-      case DIVISION_BY_ZERO, ZERO_TO_NEGATIVE_POWER ->
+      case DIVISION_BY_ZERO, ZERO_TO_NEGATIVE_POWER, ROUTINE_WITHOUT_VALUE ->
           "Check what goes in, or treat the case by itself: if … then … else …";
       case OVERFLOW -> "Check the units and the exponents of what goes in.";
       case ROOT_OF_NEGATIVE, LOGARITHM_OF_NON_POSITIVE, ARC_OUT_OF_RANGE ->
@@ -106,9 +141,11 @@ final class NumericMessages {
         quantity.written() == null
             ? Digits.of(quantity.unit().fromSi(real.value()))
             : quantity.written();
-    boolean plain =
-        quantity.unit().dimension().equals(Dimension.ONE) && quantity.unit().symbol().equals("1");
-    return Optional.of(
-        given.name() + " = " + digits + (plain ? "" : " " + quantity.unit().symbol()));
+    return Optional.of(stated(given.name(), digits, quantity.unit()));
+  }
+
+  private static String stated(String name, String digits, Unit unit) {
+    boolean plain = unit.dimension().equals(Dimension.ONE) && unit.symbol().equals("1");
+    return name + " = " + digits + (plain ? "" : " " + unit.symbol());
   }
 }

@@ -47,12 +47,43 @@ public final class Sheet {
    */
   public CellOutcome run(CellId cell, String label, String text) {
     var source = new Source(text);
-    Parsed parsed =
-        Parser.parse(
-            source,
-            name -> graph.definition(name).filter(in(cell).negate()).isPresent(),
-            CatalogueWords.STANDARD);
-    var nodes = nodes(cell, source, parsed.statements());
+    Parsed parsed = Parser.parse(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
+    return take(cell, label, source, parsed, nodes(cell, source, parsed.statements()));
+  }
+
+  /**
+   * Makes functions from Java the content of a cell, in place of what it defined before.
+   *
+   * @param cell its id
+   * @param label how messages call it, as {@code cell [2]}
+   * @param functions their heads are the text that messages point into, one a line; none withdraws
+   *     what the cell defined
+   */
+  public CellOutcome publish(CellId cell, String label, List<PublishedFunction> functions) {
+    var source =
+        new Source(
+            functions.stream()
+                .map(function -> function.head().strip().replaceAll("\\R", " "))
+                .collect(Collectors.joining("\n")));
+    if (functions.isEmpty()) {
+      return withdraw(cell);
+    }
+    Parsed parsed = Parser.heads(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
+    var nodes = new ArrayList<Node>();
+    for (Statement statement : parsed.statements()) {
+      int line = source.line(statement.span().start());
+      var place = new Place(cell, nodes.size(), line);
+      nodes.add(new Node(place, source, statement, functions.get(line - 1).routine()));
+    }
+    return take(cell, label, source, parsed, nodes);
+  }
+
+  private Predicate<String> isDefinedOutside(CellId cell) {
+    return name -> graph.definition(name).filter(in(cell).negate()).isPresent();
+  }
+
+  private CellOutcome take(
+      CellId cell, String label, Source source, Parsed parsed, List<Node> nodes) {
     var rules = new NameRules(cells, graph, cell, nodes);
     Set<String> here = names(nodes);
     var errors = new ArrayList<Diagnostic>(parsed.errors());
@@ -290,7 +321,7 @@ public final class Sheet {
   }
 
   private List<Step> steps(CellContent content, Doubts doubts) {
-    var maker = new StepMaker(results);
+    var maker = new StepMaker(results, content.label());
     var near = new SimilarNames(graph.names());
     return content.nodes().stream()
         .map(node -> maker.step(node, results.of(node).orElseThrow(), doubts.on(node), near))

@@ -59,7 +59,7 @@ final class SheetMessages {
       }
       return (value.length() <= 40 ? value : value.substring(0, 38) + " …") + unit;
     }
-    return "a function";
+    return node.statement() instanceof Statement.Published ? "a function from Java" : "a function";
   }
 
   static Diagnostic readAsUnit(String name, Span span, UnitWord word, CellContent other) {
@@ -155,8 +155,11 @@ final class SheetMessages {
   }
 
   static Span nameSpan(Statement statement) {
-    return statement instanceof Statement.Definition definition
-        ? definition.name().span()
+    if (statement instanceof Statement.Definition definition) {
+      return definition.name().span();
+    }
+    return statement instanceof Statement.Published published
+        ? published.name().span()
         : ((Statement.Function) statement).name().span();
   }
 }

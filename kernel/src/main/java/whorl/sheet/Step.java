@@ -36,6 +36,8 @@ public sealed interface Step {
 
     R function(Function function);
 
+    R published(Published published);
+
     R shown(Shown shown);
 
     R checked(Checked checked);
@@ -97,6 +99,25 @@ public sealed interface Step {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.function(this);
+    }
+  }
+
+  /**
+   * A function published from a Java cell.
+   *
+   * @param label how messages call its cell
+   * @param resultKind the kind of its result in words, or empty
+   */
+  record Published(Place place, String label, Statement.Published statement, String resultKind)
+      implements Step {
+    @Override
+    public List<String> doubts() {
+      return List.of();
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.published(this);
     }
   }
 

@@ -1,22 +1,24 @@
 package whorl.sheet;
 
-import java.util.ArrayList;
 import java.util.List;
 import whorl.check.Checked;
-import whorl.check.ConstantAtHand;
 import whorl.check.InputForm;
-import whorl.check.Meaning;
-import whorl.check.Mentions;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
-import whorl.units.Unit;
 
 /** Makes the step of a statement from what it came to. */
 final class StepMaker {
   private final Results results;
+  private final String label;
 
-  StepMaker(Results results) {
+  /**
+   * Makes the steps of a cell.
+   *
+   * @param label how messages call the cell
+   */
+  StepMaker(Results results, String label) {
     this.results = results;
+    this.label = label;
   }
 
   /**
@@ -33,6 +35,9 @@ final class StepMaker {
     } else if (result instanceof Result.Broken broken) {
       return new Step.Broken(place, statement, broken.diagnostic(), broken.last());
     } else if (result instanceof Result.Callable callable) {
+      if (statement instanceof Statement.Published published) {
+        return new Step.Published(place, label, published, callable.checked().kind());
+      }
       return new Step.Function(
           place,
           (Statement.Function) statement,
@@ -70,25 +75,7 @@ final class StepMaker {
     return new Step.Shown(place, show, name ? List.of() : given, gives, doubts);
   }
 
-  /**
-   * What a statement itself names, with the quantities that stand for it: names of the sheet, then
-   * constants that have a unit.
-   */
-  List<Given> given(Statement statement, Checked checked) {
-    var given = new ArrayList<Given>();
-    for (Meaning.Input input : checked.basis().inputs()) {
-      if (input.direct()) {
-        results
-            .quantity(input.name())
-            .ifPresent(quantity -> given.add(new Given(input.name(), quantity)));
-      }
-    }
-    for (ConstantAtHand constant : ConstantAtHand.all()) {
-      boolean named = Mentions.ofName(constant.symbol(), statement).isPresent();
-      if (named && !constant.unit().equals(Unit.ONE)) {
-        given.add(new Given(constant.symbol(), Quantities.of(constant)));
-      }
-    }
-    return given;
+  private List<Given> given(Statement statement, Checked checked) {
+    return Givens.of(statement, checked, results);
   }
 }

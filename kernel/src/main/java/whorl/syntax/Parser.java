@@ -7,6 +7,7 @@ import java.util.Set;
 import java.util.function.Predicate;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
+import whorl.diagnostic.Span;
 import whorl.syntax.Token.Kind;
 
 /**
@@ -45,6 +46,56 @@ public final class Parser {
     List<Statement> statements = statements(split.lines(), reading);
     var reported = errors.subList(0, Math.min(errors.size(), MOST_ERRORS));
     return new Parsed(statements, split.remarks(), reported, unitWords);
+  }
+
+  /**
+   * Reads heads of functions that are worked out outside the sheet, one a line.
+   *
+   * @param names as for a text of the sheet
+   * @param units what is known of units
+   */
+  public static Parsed heads(Source source, Predicate<String> names, UnitWords units) {
+    var messages = new SyntaxMessages(source);
+    var statements = new ArrayList<Statement>();
+    var errors = new ArrayList<Diagnostic>();
+    var reading = new Reading(messages, names, units, new ArrayList<>(), errors);
+    for (List<Token> line : lines(Lexer.tokens(source, messages))) {
+      try {
+        statements.add(head(line, reading));
+      } catch (Refusal refusal) {
+        errors.add(refusal.diagnostic());
+      }
+    }
+    var reported = errors.subList(0, Math.min(errors.size(), MOST_ERRORS));
+    return new Parsed(statements, List.of(), reported, reading.unitWords());
+  }
+
+  /** The tokens of each line, with the end of the line behind them. */
+  private static List<List<Token>> lines(List<Token> tokens) {
+    var lines = new ArrayList<List<Token>>();
+    int start = 0;
+    for (int i = 0; i < tokens.size(); i++) {
+      if (tokens.get(i).is(Kind.LINE_END)) {
+        lines.add(tokens.subList(start, i + 1));
+        start = i + 1;
+      }
+    }
+    return lines;
+  }
+
+  private static Statement head(List<Token> line, Reading reading) {
+    var tokens = new ArrayList<>(line);
+    Token end = tokens.remove(tokens.size() - 1);
+    String remark = "";
+    if (!tokens.isEmpty() && tokens.get(tokens.size() - 1).is(Kind.REMARK)) {
+      remark = tokens.remove(tokens.size() - 1).text();
+    }
+    if (tokens.isEmpty()) {
+      throw new Refusal(reading.messages().headEmpty(end.span()));
+    }
+    Span behind = tokens.get(tokens.size() - 1).span().behind();
+    tokens.add(new Token(Kind.END, behind, "", false, null));
+    return StatementParser.head(new LogicalLine(tokens, new Span(0, 0), remark), reading);
   }
 
   private static List<Statement> statements(List<LogicalLine> lines, Reading reading) {

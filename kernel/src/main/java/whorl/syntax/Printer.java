@@ -28,7 +28,12 @@ public final class Printer {
 
   /** A statement with its remark; a block on the lines below its head. */
   public static String statement(Statement statement) {
-    return statement.match(new Statements(List.of()));
+    return statement.match(new Statements(List.of(), true));
+  }
+
+  /** A statement without the remark behind it. */
+  public static String unremarked(Statement statement) {
+    return statement.match(new Statements(List.of(), false));
   }
 
   /** A whole text with the remarks that stand alone, one line each. */
@@ -39,7 +44,7 @@ public final class Printer {
       takeBefore(statement.span().start(), remarks)
           .forEach(remark -> lines.add(remark(remark.text())));
       var inside = takeBefore(statement.span().end(), remarks);
-      lines.add(statement.match(new Statements(inside)));
+      lines.add(statement.match(new Statements(inside, true)));
     }
     remarks.forEach(remark -> lines.add(remark(remark.text())));
     return String.join("\n", lines);
@@ -100,8 +105,18 @@ public final class Printer {
     return head + "\n" + INDENT + inOrder(lines).replace("\n", "\n" + INDENT);
   }
 
-  /** Statements, with the remarks that stand between the lines of their blocks. */
-  private record Statements(List<Remark> inside) implements Statement.Cases<String> {
+  /**
+   * Statements.
+   *
+   * @param inside the remarks that stand between the lines of their blocks
+   * @param withRemark whether with the remark behind them
+   */
+  private record Statements(List<Remark> inside, boolean withRemark)
+      implements Statement.Cases<String> {
+    private String said(String text, String remark) {
+      return withRemark ? remarked(text, remark) : text;
+    }
+
     @Override
     public String definition(Statement.Definition definition) {
       var changes = definition.changes();
@@ -110,7 +125,7 @@ public final class Printer {
               + " = "
               + expression(definition.value())
               + (changes.isEmpty() ? "" : " with " + list(changes, Statements::change));
-      return remarked(text, definition.remark());
+      return said(text, definition.remark());
     }
 
     private static String change(Statement.Change change) {
@@ -120,24 +135,35 @@ public final class Printer {
     @Override
     public String function(Statement.Function function) {
       String text =
-          function.name().name()
-              + "("
-              + list(function.parameters(), one -> head(one.name(), one.bracket()))
-              + ")"
-              + bracket(function.bracket())
+          function(function.name(), function.parameters(), function.bracket())
               + " = "
               + expression(function.body());
-      return remarked(text, function.remark());
+      return said(text, function.remark());
+    }
+
+    private static String function(
+        Expr.Name name, List<Statement.Parameter> parameters, Statement.@Nullable Bracket bracket) {
+      return name.name()
+          + "("
+          + list(parameters, one -> head(one.name(), one.bracket()))
+          + ")"
+          + bracket(bracket);
+    }
+
+    @Override
+    public String published(Statement.Published published) {
+      String text = function(published.name(), published.parameters(), published.bracket());
+      return said(text, published.remark());
     }
 
     @Override
     public String show(Statement.Show show) {
-      return remarked(atMargin(show.value()) + bracket(show.bracket()), show.remark());
+      return said(atMargin(show.value()) + bracket(show.bracket()), show.remark());
     }
 
     @Override
     public String check(Statement.Check check) {
-      return remarked(
+      return said(
           "check " + (check.nominal() ? "nominal " : "") + condition(check), check.remark());
     }
 
@@ -161,12 +187,12 @@ public final class Printer {
               + expression(reproduction.stated())
               + " within "
               + expression(reproduction.within());
-      return remarked(text, reproduction.remark());
+      return said(text, reproduction.remark());
     }
 
     @Override
     public String assumption(Statement.Assumption assumption) {
-      return remarked("assume " + expression(assumption.condition()), assumption.remark());
+      return said("assume " + expression(assumption.condition()), assumption.remark());
     }
 
     private static String columns(
@@ -181,7 +207,7 @@ public final class Printer {
 
     @Override
     public String caseSet(Statement.CaseSet set) {
-      String head = remarked(columns("cases", set.name(), set.file(), set.columns()), set.remark());
+      String head = said(columns("cases", set.name(), set.file(), set.columns()), set.remark());
       var rows = set.rows().stream().map(row -> new Placed(row.span(), row(row))).toList();
       return set.file() == null ? block(head, rows, inside) : head;
     }
@@ -193,8 +219,7 @@ public final class Printer {
 
     @Override
     public String data(Statement.Data data) {
-      String head =
-          remarked(columns("data", data.name(), data.file(), data.columns()), data.remark());
+      String head = said(columns("data", data.name(), data.file(), data.columns()), data.remark());
       var rows =
           data.rows().stream()
               .map(
@@ -215,7 +240,7 @@ public final class Printer {
                       new Placed(
                           line.span(), remarked(line.match(new MotionLines()), line.remark())))
               .toList();
-      return block(remarked("motion " + motion.name().name(), motion.remark()), lines, inside);
+      return block(said("motion " + motion.name().name(), motion.remark()), lines, inside);
     }
 
     @Override
@@ -238,7 +263,7 @@ public final class Printer {
         text.append(goal.aim() == Statement.Aim.LEAST ? " for least " : " for most ")
             .append(expression(goal.value()));
       }
-      return remarked(text.toString(), solve.remark());
+      return said(text.toString(), solve.remark());
     }
 
     private static String unknown(Statement.Unknown unknown) {
@@ -267,7 +292,7 @@ public final class Printer {
               + list(vary.ranges(), Statements::range)
               + ": "
               + list(vary.outputs(), Statements::output);
-      return remarked(text, vary.remark());
+      return said(text, vary.remark());
     }
 
     private static String range(Statement.Range range) {
@@ -302,7 +327,7 @@ public final class Printer {
     @Override
     public String plot(Statement.Plot plot) {
       String text = "plot " + list(plot.outputs(), Statements::output) + against(plot.against());
-      return remarked(text, plot.remark());
+      return said(text, plot.remark());
     }
 
     private static String against(Statement.@Nullable Abscissa against) {
@@ -317,17 +342,17 @@ public final class Printer {
 
     @Override
     public String sketch(Statement.Sketch sketch) {
-      return remarked("sketch " + list(sketch.things(), Printer::expression), sketch.remark());
+      return said("sketch " + list(sketch.things(), Printer::expression), sketch.remark());
     }
 
     @Override
     public String spread(Statement.Spread spread) {
-      return remarked("spread " + spread.name().name(), spread.remark());
+      return said("spread " + spread.name().name(), spread.remark());
     }
 
     @Override
     public String review(Statement.Review review) {
-      return remarked("review", review.remark());
+      return said("review", review.remark());
     }
   }
 

@@ -26,6 +26,8 @@ public sealed interface Statement {
 
     R function(Function function);
 
+    R published(Published published);
+
     R show(Show show);
 
     R check(Check check);
@@ -104,6 +106,21 @@ public sealed interface Statement {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.function(this);
+    }
+  }
+
+  /** {@code f(x [unit], …) [unit]}: the head of a function that is worked out outside the sheet. */
+  record Published(
+      Span span, Expr.Name name, List<Parameter> parameters, Bracket bracket, String remark)
+      implements Statement {
+    /** Copies the parameters. */
+    public Published {
+      parameters = List.copyOf(parameters);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.published(this);
     }
   }
 

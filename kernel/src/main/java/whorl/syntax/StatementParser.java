@@ -34,6 +34,15 @@ final class StatementParser extends LineParser {
     return new StatementParser(line, block, reading.with(parameters)).statement();
   }
 
+  /**
+   * Reads the head of a function that is worked out outside the sheet.
+   *
+   * @throws Refusal at the first mistake
+   */
+  static Statement head(LogicalLine line, Reading reading) {
+    return new StatementParser(line, List.of(), reading).published();
+  }
+
   private Statement statement() {
     Token first = line.first();
     if (first.isReservedWord() && Shapes.definesValue(line.tokens())) {
@@ -118,6 +127,39 @@ final class StatementParser extends LineParser {
   // function = name "(" parameter { "," parameter } ")" [ bracket ] "=" expression
   private Statement function() {
     Expr.Name name = definedName("a name");
+    List<Statement.Parameter> parameters = parameters();
+    Statement.Bracket bracket = optionalBracket();
+    cursor.take();
+    Expr body = expressions.expression();
+    end();
+    return new Statement.Function(line.span(), name, parameters, bracket, body, line.remark());
+  }
+
+  // published = name "(" parameter { "," parameter } ")" bracket
+  private Statement published() {
+    Token start = cursor.peek();
+    Expr.Name name = definedName("the head of a function, such as `f(x [m], k) [N]`");
+    Token open = cursor.peek();
+    if (!open.is(Kind.OPEN)) {
+      throw cursor.refusal(messages.headWithoutParameters(start.span()));
+    }
+    if (!start.touches(open)) {
+      throw new Refusal(messages.callBlank(start.span().gapTo(open.span()), start.span()));
+    }
+    List<Statement.Parameter> parameters = parameters();
+    Statement.Bracket bracket = optionalBracket();
+    if (cursor.at(Kind.EQUALS)) {
+      throw cursor.refusal(messages.headWithFormula(cursor.peek().span(), since(start)));
+    }
+    endOfHead();
+    if (bracket == null) {
+      throw new Refusal(messages.headWithoutUnit(line.span()));
+    }
+    return new Statement.Published(line.span(), name, parameters, bracket, line.remark());
+  }
+
+  // parameters = "(" parameter { "," parameter } ")"
+  private List<Statement.Parameter> parameters() {
     cursor.take();
     var parameters = new ArrayList<Statement.Parameter>();
     var taken = new HashSet<String>();
@@ -127,11 +169,7 @@ final class StatementParser extends LineParser {
     if (!cursor.accept(Kind.CLOSE)) {
       throw cursor.refusal(messages.parameterForm(cursor.peek().span()));
     }
-    Statement.Bracket bracket = optionalBracket();
-    cursor.take();
-    Expr body = expressions.expression();
-    end();
-    return new Statement.Function(line.span(), name, parameters, bracket, body, line.remark());
+    return parameters;
   }
 
   // parameter = name [ bracket ]

@@ -1009,6 +1009,44 @@ final class SyntaxMessages {
         "Give one of them another name");
   }
 
+  Diagnostic headEmpty(Span span) {
+    return message(
+        "head-empty",
+        span,
+        "The head of a function published from Java is empty.",
+        "",
+        "Write its name, its parameters and the unit of its result: `f(x [m], k) [N]`");
+  }
+
+  Diagnostic headWithoutParameters(Span name) {
+    return message(
+        "head-form",
+        name,
+        "A function published from Java needs parameters behind its name.",
+        "A value that takes none is an input: define it in a cell of the sheet.",
+        "Write " + code(text(name) + "(x [m], k) [N]"));
+  }
+
+  Diagnostic headWithFormula(Span equals, Span head) {
+    return message(
+        "head-form",
+        equals,
+        "No formula follows the head of a function published from Java.",
+        "It is worked out by the Java code that is published with the head.",
+        "Write " + code(head));
+  }
+
+  Diagnostic headWithoutUnit(Span head) {
+    return message(
+        "head-form",
+        head.behind(),
+        "The unit of the result is missing.",
+        "A number from Java says nothing of its unit.",
+        "Write it in brackets behind the head: "
+            + code(text(head) + " [N]")
+            + ", or `[1]` for a plain number");
+  }
+
   Diagnostic checkWithin(Span span, Span line) {
     return message(
         "check-within",

@@ -17,8 +17,12 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import whorl.check.Operation;
 import whorl.check.Operation.Body;
+import whorl.check.Operation.Choice;
 import whorl.check.Operation.Real;
+import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.UnaryFunction;
+import whorl.check.Routine;
+import whorl.check.RoutineFailure;
 import whorl.eval.NumericFailure.Reason;
 
 class BlockProgramTest {
@@ -210,6 +214,49 @@ class BlockProgramTest {
     Rows rows = run(program, new double[1], columns, 3);
 
     assertEquals(byRow(program, formulas, slots(0), new double[1], columns, 3), rows);
+  }
+
+  @Test
+  void aRoutineIsCalledForTheRowsThatNeedItAndGivesWhatItGivesAlone() throws InterruptedException {
+    List<Double> seen = new ArrayList<>();
+    Routine routine =
+        arguments -> {
+          seen.add(arguments[0]);
+          if (arguments[0] == 3) {
+            throw new RoutineFailure("three");
+          }
+          return arguments[0] == 4 ? Double.POSITIVE_INFINITY : 10 / arguments[0];
+        };
+    Real x = Written.input(0);
+    Body body = new Body("f", new RoutineCall(Written.ANYWHERE, routine, List.of(x)), 1);
+    List<Operation> formulas =
+        List.of(
+            new Choice(
+                Written.ANYWHERE,
+                Written.less(x, Written.constant(9)),
+                Written.call(body, x),
+                Written.constant(7)),
+            Written.unary(UnaryFunction.SQRT, x));
+    BlockProgram program = BlockProgram.compile(formulas, 1, slots(0));
+    double[][] columns = {{1, 2, 3, 4, 9}};
+
+    Rows rows = run(program, new double[1], columns, 5);
+
+    assertEquals(List.of(1.0, 2.0, 3.0, 4.0), seen);
+    assertEquals(List.of(10.0, 5.0, Double.NaN, Double.NaN, 7.0), rows.results().get(0));
+    assertEquals(byRow(program, formulas, slots(0), new double[1], columns, 5), rows);
+  }
+
+  @Test
+  void aRoutineThatIsInterruptedEndsTheRun() {
+    Routine routine =
+        arguments -> {
+          throw RoutineFailure.ofInterrupt();
+        };
+    Operation call = new RoutineCall(Written.ANYWHERE, routine, List.of());
+    BlockProgram program = BlockProgram.compile(List.of(call), 1, slots(0));
+    assertThrows(
+        InterruptedException.class, () -> run(program, new double[1], new double[1][2], 2));
   }
 
   @Test

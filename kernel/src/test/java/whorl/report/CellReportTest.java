@@ -18,6 +18,7 @@ import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
 import whorl.sheet.CellId;
 import whorl.sheet.Given;
+import whorl.sheet.PublishedFunction;
 import whorl.sheet.Sheet;
 import whorl.sheet.Step;
 
@@ -209,5 +210,32 @@ class CellReportTest {
 
     assertEquals("", report.html());
     assertEquals("", report.text());
+  }
+
+  @Test
+  void aFunctionFromJavaShowsItsHeadAndItsCell() {
+    var sheet = new Sheet();
+    var id = new CellId("java");
+    var function =
+        new PublishedFunction("drag(v [km/h], A [m²], c_w) [N]  # wind <tunnel>", x -> x[0]);
+    CellReport report = CellReport.of(sheet.publish(id, "cell [3]", List.of(function)));
+    assertEquals(
+        """
+        quantity         rule            with                   gives  why
+        ────────────────────────────────────────────────────────────────────────────
+        drag(v, A, c_w)  Java, cell [3]  v in km/h              force  wind <tunnel>
+                                         A in m²                in N
+                                         c_w is a plain number
+        ────────────────────────────────────────────────────────────────────────────""",
+        report.text());
+    assertEquals(
+        "{\"drag\":{\"kind\":\"force\",\"unit\":\"N\",\"head\":\"drag(v [km/h], A [m^2], c_w) [N]\"}}",
+        report.record().get("published").toString());
+    assertOnlyKeptMarkup(Page.of(report.html()));
+    assertTrue(report.html().contains("Java, cell [3]"), report.html());
+    assertTrue(report.html().contains("wind &lt;tunnel&gt;"), report.html());
+    sheet.run(new CellId("a"), "cell [1]", "F = drag(3 km/h, 1 m², 1)");
+    assertFalse(
+        CellReport.of(sheet.run(new CellId("b"), "cell [2]", "x = 2")).record().has("published"));
   }
 }
