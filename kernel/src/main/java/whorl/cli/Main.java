@@ -5,6 +5,7 @@ import java.io.FileOutputStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import java.util.concurrent.Callable;
+import java.util.stream.Collectors;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.IVersionProvider;
@@ -18,7 +19,13 @@ import whorl.notebook.NoteFileException;
 @Command(
     name = "whorl",
     description = "Checked calculation notes for engineers who calculate things that spin.",
-    subcommands = {RunCommand.class, RecheckCommand.class},
+    subcommands = {
+      RunCommand.class,
+      RecheckCommand.class,
+      InstallCommand.class,
+      LabCommand.class,
+      RehearseCommand.class
+    },
     mixinStandardHelpOptions = true,
     versionProvider = Main.Version.class,
     exitCodeListHeading = "%nExit status:%n",
@@ -79,7 +86,11 @@ public final class Main implements Callable<Integer> {
   }
 
   private static String commands(CommandLine command) {
-    return String.join(", ", command.getSubcommands().keySet());
+    return command.getSubcommands().values().stream()
+        .map(CommandLine::getCommandSpec)
+        .filter(spec -> !spec.usageMessage().hidden())
+        .map(CommandSpec::name)
+        .collect(Collectors.joining(", "));
   }
 
   private static int failure(Exception e, CommandLine command, CommandLine.ParseResult parsed)

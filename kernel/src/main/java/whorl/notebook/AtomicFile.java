@@ -7,7 +7,6 @@ import java.nio.channels.FileChannel;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.FileSystemException;
 import java.nio.file.Files;
-import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
@@ -61,7 +60,7 @@ public final class AtomicFile {
     } catch (NoteFileException e) {
       throw e;
     } catch (IOException e) {
-      throw new NoteFileException(file + " cannot be written: " + reason(e, file), e);
+      throw NoteFileException.unwritten(file, e);
     }
   }
 
@@ -124,19 +123,5 @@ public final class AtomicFile {
     } catch (IOException notOffered) {
       // The file is replaced all the same.
     }
-  }
-
-  private static String reason(IOException e, Path file) {
-    if (e instanceof NoSuchFileException) {
-      return "there is no folder " + file.toAbsolutePath().getParent();
-    }
-    if (e instanceof AccessDeniedException) {
-      return "there is no permission";
-    }
-    String said = e instanceof FileSystemException f ? f.getReason() : e.getMessage();
-    if (said == null) {
-      return e.getClass().getSimpleName();
-    }
-    return said.contains("No space left") || said.contains("quota") ? "the disk is full" : said;
   }
 }
