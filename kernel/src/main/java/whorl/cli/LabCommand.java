@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
@@ -20,6 +19,8 @@ import picocli.CommandLine.Spec;
       "Open a note in JupyterLab, which is put into a Python environment of its own on first use;"
           + " this needs Python 3.9 or newer and a network, and takes a minute or two."
     },
+    mixinStandardHelpOptions = true,
+    customSynopsis = "whorl lab [-hV] [NOTE] [OPTION...]",
     footerHeading = "%nEnvironment variables:%n",
     footer = {
       "  WHORL_LAB      the folder of the Python environment;",
@@ -29,27 +30,18 @@ import picocli.CommandLine.Spec;
 final class LabCommand implements Callable<Integer> {
   @Spec private CommandSpec spec = CommandSpec.create();
 
-  @Option(
-      names = {"-h", "--help"},
-      usageHelp = true,
-      description = "show this help")
-  private boolean help;
-
   @Parameters(
-      arity = "0..1",
-      paramLabel = "NOTE",
-      description = "a notebook; without one the demo notes are opened")
-  private String note = "";
-
-  @Parameters(
-      index = "1..*",
-      paramLabel = "OPTION",
-      description = "options for JupyterLab, such as --no-browser --port=8890")
-  private List<String> options = new ArrayList<>();
+      paramLabel = "NOTE OPTION",
+      description = {
+        "a notebook, and options for JupyterLab such as --no-browser --port=8890;",
+        "without a notebook the demo notes are opened"
+      })
+  private List<String> words = new ArrayList<>();
 
   @Override
   public Integer call() {
     throw new ParameterException(
-        spec.commandLine(), "JupyterLab is started by the launcher, kernel/bin/whorl lab");
+        spec.commandLine(),
+        "JupyterLab is started by the launcher: kernel/bin/whorl lab " + String.join(" ", words));
   }
 }
