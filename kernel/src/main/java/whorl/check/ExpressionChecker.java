@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Span;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
@@ -44,6 +45,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   }
 
   Typed check(Expr expr) {
+    Interruption.poll();
     return expr.match(this);
   }
 

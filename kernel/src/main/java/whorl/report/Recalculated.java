@@ -22,6 +22,9 @@ final class Recalculated {
     for (CellOutcome.Turn turn : outcome.turned()) {
       parts.add((turn.holds() ? "holds now: " : "FAILS now: ") + turn.text());
     }
+    if (!outcome.stopped().isEmpty()) {
+      parts.add("come to nothing now: " + String.join(", ", outcome.stopped()));
+    }
     return parts.isEmpty()
         ? Optional.empty()
         : Optional.of(TextWrap.plain("Recalculated elsewhere: " + String.join("; ", parts)));

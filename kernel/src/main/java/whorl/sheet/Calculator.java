@@ -11,6 +11,7 @@ import whorl.check.Operation;
 import whorl.check.Routine;
 import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
 import whorl.eval.NumericFailure;
 import whorl.eval.Outcome;
 import whorl.eval.ScalarEvaluator;
@@ -120,6 +121,9 @@ final class Calculator {
       return done.value();
     }
     NumericFailure failure = ((Outcome.Failed) outcome).failure();
+    if (failure.reason() == NumericFailure.Reason.INTERRUPTED) {
+      throw new Interruption();
+    }
     throw new NoResult(
         NumericMessages.of(failure, node, Givens.of(node.statement(), checked, results), results));
   }

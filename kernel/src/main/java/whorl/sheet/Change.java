@@ -1,7 +1,6 @@
 package whorl.sheet;
 
 import java.util.Optional;
-import whorl.syntax.Printer;
 
 /** Tells what a recalculation changed. */
 final class Change {
@@ -28,10 +27,23 @@ final class Change {
     Optional<Boolean> is = now.flatMap(Change::holds);
     return is.isEmpty() || was.isEmpty() || was.equals(is)
         ? Optional.empty()
-        : Optional.of(new CellOutcome.Turn(Printer.statement(node.statement()), is.get()));
+        : Optional.of(new CellOutcome.Turn(node.text(), is.get()));
   }
 
-  private static Optional<Boolean> holds(Result result) {
+  /** A definition, check or assumption that came to something and now comes to nothing. */
+  static Optional<String> stop(Node node, Optional<Result> before, Optional<Result> now) {
+    boolean stopped =
+        before.orElse(null) instanceof Result.Sound
+            && now.isPresent()
+            && !(now.get() instanceof Result.Sound);
+    if (!stopped) {
+      return Optional.empty();
+    }
+    return node.defines().or(() -> Optional.of(node.text()).filter(text -> node.judges()));
+  }
+
+  /** Whether a check or an assumption holds, if it was judged. */
+  static Optional<Boolean> holds(Result result) {
     if (result instanceof Result.Judged judged) {
       return Optional.of(judged.verdict().holds());
     }

@@ -1,8 +1,8 @@
 package whorl.sheet;
 
-import java.util.Collection;
 import java.util.Collections;
-import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -14,28 +14,31 @@ import whorl.syntax.Statement;
 
 /** Which statements rest on names of an assumption that fails now. */
 final class Doubts {
-  private final Map<Node, SortedSet<String>> doubts = new HashMap<>();
+  /** No doubts. */
+  static final Doubts NONE = new Doubts(Map.of());
 
-  private Doubts() {}
+  private final Map<Node, SortedSet<String>> doubts;
+
+  private Doubts(Map<Node, SortedSet<String>> doubts) {
+    this.doubts = doubts;
+  }
 
   /** The doubts on a sheet as it stands. */
-  static Doubts in(Collection<CellContent> cells, Graph graph, Results results) {
-    var found = new Doubts();
-    for (CellContent cell : cells) {
-      for (Node node : cell.nodes()) {
-        if (node.statement() instanceof Statement.Assumption assumption
-            && results.of(node).orElse(null) instanceof Result.Judged judged
-            && !judged.verdict().holds()) {
-          String text = Printer.expression(assumption.condition());
-          for (Node doubtful : graph.downstream(node.uses())) {
-            if (doubtful != node) {
-              found.doubts.computeIfAbsent(doubtful, key -> new TreeSet<>()).add(text);
-            }
+  static Doubts in(Graph graph, Results results) {
+    var doubts = new LinkedHashMap<Node, SortedSet<String>>();
+    for (Node node : graph.assumptions()) {
+      if (node.statement() instanceof Statement.Assumption assumption
+          && results.of(node).orElse(null) instanceof Result.Judged judged
+          && !judged.verdict().holds()) {
+        String text = Printer.expression(assumption.condition());
+        for (Node doubtful : graph.downstream(node.uses())) {
+          if (doubtful != node) {
+            doubts.computeIfAbsent(doubtful, key -> new TreeSet<>()).add(text);
           }
         }
       }
     }
-    return found;
+    return new Doubts(doubts);
   }
 
   /** The failing assumptions that a statement rests on, as written. */
@@ -45,7 +48,7 @@ final class Doubts {
 
   /** The statements on which the doubts are not what they were. */
   Stream<Node> differingFrom(Doubts before) {
-    Set<Node> all = new java.util.LinkedHashSet<>(before.doubts.keySet());
+    Set<Node> all = new LinkedHashSet<>(before.doubts.keySet());
     all.addAll(doubts.keySet());
     return all.stream().filter(node -> !on(node).equals(before.on(node)));
   }

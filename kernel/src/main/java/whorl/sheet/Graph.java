@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import whorl.syntax.Statement;
 
 /**
  * Which statement defines a name and which statements use it. Walks cost what they reach, not the
@@ -19,12 +20,16 @@ import java.util.Set;
 final class Graph {
   private final Map<String, Node> definitions = new HashMap<>();
   private final Map<String, Set<Node>> users = new HashMap<>();
+  private final Set<Node> assumptions = new LinkedHashSet<>();
 
   void add(Collection<Node> nodes) {
     for (Node node : nodes) {
       node.defines().ifPresent(name -> definitions.put(name, node));
       for (String name : node.uses()) {
         users.computeIfAbsent(name, key -> new LinkedHashSet<>()).add(node);
+      }
+      if (node.statement() instanceof Statement.Assumption) {
+        assumptions.add(node);
       }
     }
   }
@@ -38,6 +43,7 @@ final class Graph {
           users.remove(name);
         }
       }
+      assumptions.remove(node);
     }
   }
 
@@ -47,6 +53,11 @@ final class Graph {
 
   Collection<String> names() {
     return definitions.keySet();
+  }
+
+  /** The assumptions. */
+  Set<Node> assumptions() {
+    return assumptions;
   }
 
   /** The statements that use a name. */

@@ -10,18 +10,26 @@ import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
 import whorl.syntax.UnitWord;
 
-/** One name, one definition; and no name for what was read as a unit. */
+/**
+ * One name, one definition; and no name for what was read as a unit. What is typed in a console
+ * takes over a name that has its definition elsewhere, and leaves it to whoever defines it next: it
+ * has no place on a page where its author could change it.
+ */
 final class NameRules {
-  private final Map<CellId, CellContent> cells;
-  private final Graph graph;
+  private final Contents contents;
   private final CellId cell;
+  private final boolean typed;
   private final Map<String, Node> first = new HashMap<>();
 
-  /** The rules as they bear on the statements of a cell that is to run. */
-  NameRules(Map<CellId, CellContent> cells, Graph graph, CellId cell, List<Node> nodes) {
-    this.cells = cells;
-    this.graph = graph;
+  /**
+   * The rules as they bear on the statements of a cell that is to run.
+   *
+   * @param typed whether it is typed in a console
+   */
+  NameRules(Contents contents, CellId cell, List<Node> nodes, boolean typed) {
+    this.contents = contents;
     this.cell = cell;
+    this.typed = typed;
     nodes.forEach(node -> node.defines().ifPresent(name -> first.putIfAbsent(name, node)));
   }
 
@@ -32,25 +40,37 @@ final class NameRules {
         .orElse(List.of());
   }
 
+  /** The definition in another cell that a statement takes the place of. */
+  Optional<Node> takenOver(Node node) {
+    return node.defines().flatMap(this::elsewhere).filter(this::yields);
+  }
+
+  private Optional<Node> elsewhere(String name) {
+    return contents.graph().definition(name).filter(other -> !other.place().cell().equals(cell));
+  }
+
+  private boolean yields(Node definition) {
+    return typed || contents.cellOf(definition).typed();
+  }
+
   private List<Diagnostic> broken(Node node, String name, Span span) {
     Node above = first.getOrDefault(name, node);
     if (above != node) {
       return List.of(SheetMessages.definedAbove(name, span, above));
     }
-    Optional<Node> elsewhere =
-        graph.definition(name).filter(other -> !other.place().cell().equals(cell));
-    if (elsewhere.isPresent()) {
-      CellContent other = Objects.requireNonNull(cells.get(elsewhere.get().place().cell()));
-      return List.of(SheetMessages.definedElsewhere(name, span, elsewhere.get(), other.label()));
+    Optional<Node> refusing = elsewhere(name).filter(other -> !yields(other));
+    if (refusing.isPresent()) {
+      String label = contents.cellOf(refusing.get()).label();
+      return List.of(SheetMessages.definedElsewhere(name, span, refusing.get(), label));
     }
     var errors = new ArrayList<Diagnostic>();
-    cells.forEach(
-        (id, other) -> {
-          if (!id.equals(cell)) {
-            unitWord(other.unitWords(), name)
-                .ifPresent(word -> errors.add(SheetMessages.readAsUnit(name, span, word, other)));
-          }
-        });
+    for (CellId id : contents.cellsThatReadAsUnit(name)) {
+      if (!id.equals(cell)) {
+        CellContent other = Objects.requireNonNull(contents.cell(id));
+        unitWord(other.unitWords(), name)
+            .ifPresent(word -> errors.add(SheetMessages.readAsUnit(name, span, word, other)));
+      }
+    }
     return errors;
   }
 

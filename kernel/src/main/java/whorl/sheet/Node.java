@@ -1,11 +1,13 @@
 package whorl.sheet;
 
+import java.util.Collections;
 import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import whorl.check.FreeNames;
 import whorl.check.Routine;
 import whorl.diagnostic.Source;
+import whorl.diagnostic.Span;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 
@@ -32,8 +34,8 @@ final class Node {
     this.source = source;
     this.statement = statement;
     this.routine = routine;
-    this.uses = Set.copyOf(FreeNames.in(statement));
-    this.text = Printer.statement(statement);
+    this.uses = Collections.unmodifiableSet(FreeNames.in(statement));
+    this.text = Printer.unremarked(statement);
   }
 
   Place place() {
@@ -54,7 +56,7 @@ final class Node {
     return routine;
   }
 
-  /** The names of the sheet that it uses. */
+  /** The names of the sheet that it uses, in order of first mention. */
   Set<String> uses() {
     return uses;
   }
@@ -71,8 +73,33 @@ final class Node {
     return Optional.empty();
   }
 
-  /** Whether another node says the same, so that its result can be kept. */
-  boolean saysTheSame(Node other) {
-    return text.equals(other.text) && routine == other.routine;
+  /**
+   * What a statement says; of two that say the same, one can keep the result of the other.
+   *
+   * @param text its canonical text
+   * @param routine what works out a published function
+   */
+  record Said(String text, String remark, @Nullable Routine routine) {}
+
+  /** What it says. */
+  Said said() {
+    return new Said(text, statement.remark(), routine);
+  }
+
+  /** Whether it is a check or an assumption. */
+  boolean judges() {
+    return statement instanceof Statement.Check
+        || statement instanceof Statement.Reproduction
+        || statement instanceof Statement.Assumption;
+  }
+
+  /** Its canonical text, without its remark. */
+  String text() {
+    return text;
+  }
+
+  /** Whether it holds a place in the text of its cell. */
+  boolean contains(Span place) {
+    return statement.span().start() <= place.start() && place.end() <= statement.span().end();
   }
 }

@@ -1,24 +1,23 @@
 package whorl.sheet;
 
 import java.util.ArrayList;
-import java.util.Collection;
-import java.util.Comparator;
-import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.LongSupplier;
 import java.util.function.Predicate;
+import java.util.function.Supplier;
 import java.util.stream.Collectors;
-import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Availability;
 import whorl.check.DefinedNames;
-import whorl.check.Vocabulary;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Source;
+import whorl.diagnostic.Span;
 import whorl.syntax.CatalogueWords;
+import whorl.syntax.GreekNames;
 import whorl.syntax.Parsed;
 import whorl.syntax.Parser;
 import whorl.syntax.Statement;
@@ -28,15 +27,35 @@ import whorl.syntax.Statement;
  * cell replaces what it defined before and recalculates what depends on it and nothing else; it
  * takes effect whole or not at all.
  *
- * <p>A sheet is used by one thread at a time.
+ * <p>A sheet is used by one thread at a time. If that thread is interrupted while a cell runs, the
+ * run ends soon, nothing is changed, and the outcome says so; the interrupt is then answered and
+ * the thread's interrupt status cleared.
  */
 public final class Sheet {
-  private static final int MOST_ERRORS = 10;
-
-  private final Map<CellId, CellContent> cells = new LinkedHashMap<>();
-  private final Graph graph = new Graph();
-  private final Results results = Results.of(graph);
+  private final Contents contents = new Contents();
+  private final Facts facts = new Facts(contents);
+  private final LongSupplier clock;
+  private Progress progress = (done, total) -> {};
   private long evaluations;
+
+  /** An empty sheet. */
+  public Sheet() {
+    this(System::nanoTime);
+  }
+
+  /**
+   * An empty sheet.
+   *
+   * @param clock gives nanoseconds
+   */
+  Sheet(LongSupplier clock) {
+    this.clock = clock;
+  }
+
+  /** Names who is told how far a long recalculation has come, from now on. */
+  public void onProgress(Progress listener) {
+    progress = listener;
+  }
 
   /**
    * Runs a cell.
@@ -46,9 +65,31 @@ public final class Sheet {
    * @param text its text
    */
   public CellOutcome run(CellId cell, String label, String text) {
-    var source = new Source(text);
-    Parsed parsed = Parser.parse(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
-    return take(cell, label, source, parsed, nodes(cell, source, parsed.statements()));
+    Source source = source(text);
+    return answering(source, cell, () -> take(read(cell, source), cell, label, source, false));
+  }
+
+  /**
+   * Runs what was typed in a console, which has no cells. A name that has its definition elsewhere
+   * is taken over. Definitions, checks and assumptions stay, a check until it is typed again;
+   * whoever defines one of the names next takes it over in turn. A shown value is shown once.
+   *
+   * @param fresh an id of its own
+   * @param label how messages call it, as {@code [7]}
+   * @param text what was typed
+   */
+  public CellOutcome runFromConsole(CellId fresh, String label, String text) {
+    Source source = source(text);
+    return answering(
+        source,
+        fresh,
+        () -> {
+          CellOutcome outcome = take(read(fresh, source), fresh, label, source, true);
+          if (outcome.tookEffect()) {
+            contents.forget(fresh, node -> node.statement() instanceof Statement.Show);
+          }
+          return outcome;
+        });
   }
 
   /**
@@ -60,77 +101,87 @@ public final class Sheet {
    *     what the cell defined
    */
   public CellOutcome publish(CellId cell, String label, List<PublishedFunction> functions) {
+    if (functions.isEmpty()) {
+      return withdraw(cell);
+    }
     var source =
         new Source(
             functions.stream()
                 .map(function -> function.head().strip().replaceAll("\\R", " "))
                 .collect(Collectors.joining("\n")));
-    if (functions.isEmpty()) {
-      return withdraw(cell);
-    }
-    Parsed parsed = Parser.heads(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
-    var nodes = new ArrayList<Node>();
-    for (Statement statement : parsed.statements()) {
-      int line = source.line(statement.span().start());
-      var place = new Place(cell, nodes.size(), line);
-      nodes.add(new Node(place, source, statement, functions.get(line - 1).routine()));
-    }
-    return take(cell, label, source, parsed, nodes);
-  }
-
-  private Predicate<String> isDefinedOutside(CellId cell) {
-    return name -> graph.definition(name).filter(in(cell).negate()).isPresent();
-  }
-
-  private CellOutcome take(
-      CellId cell, String label, Source source, Parsed parsed, List<Node> nodes) {
-    var rules = new NameRules(cells, graph, cell, nodes);
-    Set<String> here = names(nodes);
-    var errors = new ArrayList<Diagnostic>(parsed.errors());
-    var sound = new ArrayList<Node>();
-    for (Node node : nodes) {
-      var faults = new ArrayList<>(rules.broken(node));
-      faults.addAll(
-          Availability.gaps(
-              node.statement(), name -> here.contains(name) || graph.definition(name).isPresent()));
-      errors.addAll(faults);
-      if (faults.isEmpty()) {
-        sound.add(node);
-      }
-    }
-    // The sound statements of a cell in error are worked out too, so that all its mistakes are
-    // reported at once.
-    return replace(
-        cell, new CellContent(label, source, sound, parsed.unitWords()), errors, attempted(nodes));
+    return answering(
+        source,
+        cell,
+        () -> {
+          Parsed parsed = Parser.heads(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
+          var nodes = new ArrayList<Node>();
+          for (Statement statement : parsed.statements()) {
+            int line = source.line(statement.span().start());
+            var place = new Place(cell, nodes.size(), line);
+            nodes.add(new Node(place, source, statement, functions.get(line - 1).routine()));
+          }
+          return take(new Read(parsed, nodes), cell, label, source, false);
+        });
   }
 
   /** Withdraws what a cell defined. */
   public CellOutcome withdraw(CellId cell) {
-    var nothing = new CellContent("", new Source(""), List.of(), List.of());
-    CellOutcome outcome = replace(cell, nothing, List.of(), Set.of());
-    cells.remove(cell);
-    return outcome;
+    var source = new Source("");
+    var edit = new Edit(contents, cell, CellContent.nothing(source), List.of());
+    return answering(source, cell, () -> done(edit, List.of(), List.of()));
+  }
+
+  /** Withdraws a name; the other statements of its cell stay. */
+  public CellOutcome withdraw(String name) {
+    String folded = GreekNames.fold(name.strip());
+    var source = new Source(folded);
+    Optional<Node> node = contents.graph().definition(folded);
+    if (node.isEmpty()) {
+      List<String> near = new SimilarNames(contents.graph().names()).to(folded);
+      Diagnostic error = SheetMessages.notDefined(folded, new Span(0, source.length()), near);
+      return CellOutcome.refused(source, List.of(error), List.of(), Set.of());
+    }
+    Diagnostic notice =
+        SheetMessages.withdrawn(folded, node.get(), contents.cellOf(node.get()).label());
+    return answering(
+        source,
+        null,
+        () ->
+            done(
+                new Edit(contents, null, CellContent.nothing(source), List.of(node.get())),
+                List.of(),
+                List.of(notice)));
   }
 
   /** The steps of a cell as they stand now; none for a cell that never took effect. */
   public List<Step> steps(CellId cell) {
-    CellContent content = cells.get(cell);
-    return content == null ? List.of() : steps(content, Doubts.in(cells.values(), graph, results));
+    CellContent content = contents.cell(cell);
+    return content == null ? List.of() : contents.steps(content);
   }
 
   /** The cells that took effect, in the order in which they first did. */
   public List<CellId> cells() {
-    return List.copyOf(cells.keySet());
+    return List.copyOf(contents.cells().keySet());
   }
 
   /** What a name stands for, or empty if it has no value. */
   public Optional<Quantity> quantity(String name) {
-    return results.quantity(name);
+    return contents.results().quantity(GreekNames.fold(name));
+  }
+
+  /** All definitions, by cell in the order in which the cells first took effect. */
+  public List<Definition> definitions() {
+    return facts.definitions();
+  }
+
+  /** All that is known of a name; empty where it has no definition. */
+  public Optional<NameCard> card(String name) {
+    return facts.card(GreekNames.fold(name));
   }
 
   /** The text of a cell that took effect. */
   public Optional<Source> source(CellId cell) {
-    return Optional.ofNullable(cells.get(cell)).map(CellContent::source);
+    return Optional.ofNullable(contents.cell(cell)).map(CellContent::source);
   }
 
   /** How many statements were worked out since the sheet was made. */
@@ -138,23 +189,106 @@ public final class Sheet {
     return evaluations;
   }
 
-  private static Predicate<Node> in(CellId cell) {
-    return node -> node.place().cell().equals(cell);
+  /**
+   * The text of a cell. Of one so long that it will be refused the start is enough, which takes no
+   * more memory than the longest that is read.
+   */
+  private static Source source(String text) {
+    int surelyTooLong = 2 * Parser.LONGEST_TEXT + 1;
+    return new Source(text.length() < surelyTooLong ? text : text.substring(0, surelyTooLong));
   }
 
-  private static List<Node> nodes(CellId cell, Source source, List<Statement> statements) {
+  /** Does something to a cell that ends early if the thread is interrupted. */
+  private CellOutcome answering(Source source, @Nullable CellId cell, Supplier<CellOutcome> work) {
+    CellOutcome outcome;
+    try {
+      Interruption.poll();
+      outcome = work.get();
+    } catch (Interruption interruption) {
+      List<Step> standing = cell == null ? List.of() : steps(cell);
+      outcome = CellOutcome.interrupted(source, SheetMessages.interrupted(), standing, Set.of());
+    }
+    if (outcome.interrupted()) {
+      Thread.interrupted();
+    }
+    return outcome;
+  }
+
+  /** What was read from a text, with the statements in their places. */
+  private record Read(Parsed parsed, List<Node> nodes) {}
+
+  private Read read(CellId cell, Source source) {
+    Parsed parsed = Parser.parse(source, isDefinedOutside(cell), CatalogueWords.STANDARD);
     var nodes = new ArrayList<Node>();
-    for (Statement statement : statements) {
+    for (Statement statement : parsed.statements()) {
+      Interruption.poll();
       int line = source.line(statement.span().start());
       nodes.add(new Node(new Place(cell, nodes.size(), line), source, statement));
     }
-    return nodes;
+    return new Read(parsed, nodes);
   }
 
-  private static Set<String> names(Collection<Node> nodes) {
-    return nodes.stream()
-        .flatMap(node -> node.defines().stream())
-        .collect(Collectors.toCollection(LinkedHashSet::new));
+  private Predicate<String> isDefinedOutside(CellId cell) {
+    return name ->
+        contents
+            .graph()
+            .definition(name)
+            .filter(node -> !node.place().cell().equals(cell))
+            .isPresent();
+  }
+
+  /** Makes statements the content of a cell, unless one is at fault. */
+  private CellOutcome take(Read read, CellId cell, String label, Source source, boolean typed) {
+    Graph graph = contents.graph();
+    var rules = new NameRules(contents, cell, read.nodes(), typed);
+    Set<String> here =
+        read.nodes().stream().flatMap(node -> node.defines().stream()).collect(Collectors.toSet());
+    var errors = new ArrayList<>(read.parsed().errors());
+    var notices = new ArrayList<Diagnostic>();
+    var sound = new ArrayList<Node>();
+    var taken = new LinkedHashSet<Node>();
+    for (Node node : read.nodes()) {
+      var faults = new ArrayList<>(rules.broken(node));
+      faults.addAll(
+          Availability.gaps(
+              node.statement(), name -> here.contains(name) || graph.definition(name).isPresent()));
+      errors.addAll(faults);
+      if (faults.isEmpty()) {
+        sound.add(node);
+        rules
+            .takenOver(node)
+            .ifPresent(
+                other -> {
+                  taken.add(other);
+                  if (!other.text().equals(node.text())) {
+                    notices.add(
+                        SheetMessages.takesOver(node, other, contents.cellOf(other).label()));
+                  }
+                });
+      }
+    }
+    if (typed) {
+      taken.addAll(typedBefore(sound));
+    }
+    // The sound statements of a cell in error are worked out too, so that all its mistakes are
+    // reported at once.
+    var content = new CellContent(label, source, sound, read.parsed().unitWords(), typed);
+    var edit = new Edit(contents, cell, content, taken).attempting(attempted(read.nodes()));
+    return done(edit, errors, notices);
+  }
+
+  /** Checks and assumptions of the console that are typed once more. */
+  private List<Node> typedBefore(List<Node> nodes) {
+    Set<String> again =
+        nodes.stream().filter(Node::judges).map(Node::text).collect(Collectors.toSet());
+    if (again.isEmpty()) {
+      return List.of();
+    }
+    return contents.cells().values().stream()
+        .filter(CellContent::typed)
+        .flatMap(other -> other.nodes().stream())
+        .filter(node -> node.judges() && again.contains(node.text()))
+        .toList();
   }
 
   private static Set<String> attempted(List<Node> nodes) {
@@ -163,173 +297,9 @@ public final class Sheet {
         .collect(Collectors.toCollection(LinkedHashSet::new));
   }
 
-  private CellOutcome refused(
-      CellId cell, Source source, List<Diagnostic> errors, Set<String> attempted) {
-    List<Diagnostic> first =
-        errors.stream()
-            .sorted(Comparator.comparingInt(error -> error.span().start()))
-            .limit(MOST_ERRORS)
-            .toList();
-    return new CellOutcome(
-        source, first, List.of(), steps(cell), List.of(), List.of(), Set.of(), attempted);
-  }
-
-  private CellOutcome replace(
-      CellId cell, CellContent content, List<Diagnostic> faults, Set<String> attempted) {
-    List<Node> old = cells.containsKey(cell) ? cells.get(cell).nodes() : List.of();
-    Map<Node, Node> kept = kept(old, content.nodes());
-    List<Node> removed = old.stream().filter(node -> !kept.containsValue(node)).toList();
-    List<Node> added = content.nodes().stream().filter(node -> !kept.containsKey(node)).toList();
-    Doubts before = Doubts.in(cells.values(), graph, results);
-
-    graph.remove(old);
-    graph.add(content.nodes());
-    boolean done = false;
-    try {
-      var changed = new LinkedHashSet<>(names(removed));
-      changed.addAll(names(added));
-      var affected = new LinkedHashSet<>(added);
-      affected.addAll(graph.downstream(changed));
-      Graph.Order order = graph.order(affected);
-      if (order instanceof Graph.Order.Cycle cycle) {
-        var errors = new ArrayList<>(faults);
-        errors.add(SheetMessages.cycle(cycle.nodes(), in(cell), this::label));
-        return refused(cell, content.source(), errors, attempted);
-      }
-      Results staging = results.staging();
-      var calculator = new Calculator(staging);
-      keep(kept, affected, calculator, staging);
-      var errors = new ArrayList<>(faults);
-      errors.addAll(workOut(((Graph.Order.Sorted) order).nodes(), calculator, staging, cell));
-      evaluations += calculator.evaluations();
-      if (!errors.isEmpty()) {
-        return refused(cell, content.source(), errors, attempted);
-      }
-      done = true;
-      return settle(cell, content, old, affected, staging, before, attempted);
-    } finally {
-      if (!done) {
-        graph.remove(content.nodes());
-        graph.add(old);
-      }
-    }
-  }
-
-  /** New statements that say what an old one of the cell said, each with the old one. */
-  private Map<Node, Node> kept(List<Node> old, List<Node> nodes) {
-    var left = new ArrayList<>(old);
-    var kept = new LinkedHashMap<Node, Node>();
-    for (Node node : nodes) {
-      left.stream()
-          .filter(node::saysTheSame)
-          .findFirst()
-          // Messages of a broken statement point into the old text.
-          .filter(was -> results.of(was).filter(Result.Broken.class::isInstance).isEmpty())
-          .ifPresent(
-              was -> {
-                left.remove(was);
-                kept.put(node, was);
-              });
-    }
-    return kept;
-  }
-
-  /** Stages what the statements that were kept came to before. */
-  private void keep(
-      Map<Node, Node> kept, Set<Node> affected, Calculator calculator, Results staging) {
-    kept.forEach((node, was) -> staging.stage(node, results.of(was).orElseThrow()));
-    kept.forEach(
-        (node, was) -> {
-          if (!affected.contains(node) && !node.statement().equals(was.statement())) {
-            staging.stage(node, calculator.moved(node, results.of(was).orElseThrow()));
-          }
-        });
-  }
-
-  private List<Diagnostic> workOut(
-      List<Node> order, Calculator calculator, Results staging, CellId cell) {
-    var errors = new ArrayList<Diagnostic>();
-    for (Node node : order) {
-      Result result = calculator.result(node);
-      if (result instanceof Result.Broken broken) {
-        if (in(cell).test(node)) {
-          errors.add(broken.diagnostic());
-        }
-        result = new Result.Broken(broken.diagnostic(), lastGood(node));
-      }
-      staging.stage(node, result);
-    }
-    return errors;
-  }
-
-  private @Nullable Quantity lastGood(Node node) {
-    Result last = results.of(node).orElse(null);
-    if (last instanceof Result.Valued valued) {
-      return Quantities.of(node, valued);
-    }
-    return last instanceof Result.Broken broken ? broken.last() : null;
-  }
-
-  private CellOutcome settle(
-      CellId cell,
-      CellContent content,
-      List<Node> old,
-      Set<Node> affected,
-      Results staging,
-      Doubts before,
-      Set<String> attempted) {
-    var elsewhere = affected.stream().filter(in(cell).negate()).toList();
-    var changes = new ArrayList<CellOutcome.Change>();
-    var turned = new ArrayList<CellOutcome.Turn>();
-    for (Node node : elsewhere) {
-      Change.between(node, results.of(node), staging.of(node)).ifPresent(changes::add);
-      Change.turn(node, results.of(node), staging.of(node)).ifPresent(turned::add);
-    }
-    staging.settle(old);
-    if (content.nodes().isEmpty()) {
-      cells.remove(cell);
-    } else {
-      cells.put(cell, content);
-    }
-    Doubts now = Doubts.in(cells.values(), graph, results);
-    Set<CellId> refreshed =
-        Stream.concat(elsewhere.stream(), now.differingFrom(before))
-            .map(node -> node.place().cell())
-            .filter(id -> !id.equals(cell))
-            .collect(Collectors.toCollection(LinkedHashSet::new));
-    return new CellOutcome(
-        content.source(),
-        List.of(),
-        notices(content),
-        steps(content, now),
-        changes,
-        turned,
-        refreshed,
-        attempted);
-  }
-
-  private List<Diagnostic> notices(CellContent content) {
-    var notices = new ArrayList<Diagnostic>();
-    for (Node node : content.nodes()) {
-      node.defines()
-          .filter(Vocabulary::isFunction)
-          .map(name -> SheetMessages.hides(node.statement(), name))
-          .ifPresent(notices::add);
-      notices.addAll(results.of(node).map(Result::remarks).orElse(List.of()));
-    }
-    return notices;
-  }
-
-  private List<Step> steps(CellContent content, Doubts doubts) {
-    var maker = new StepMaker(results, content.label());
-    var near = new SimilarNames(graph.names());
-    return content.nodes().stream()
-        .map(node -> maker.step(node, results.of(node).orElseThrow(), doubts.on(node), near))
-        .toList();
-  }
-
-  private String label(CellId cell) {
-    CellContent content = cells.get(cell);
-    return content == null ? "this cell" : content.label();
+  private CellOutcome done(Edit edit, List<Diagnostic> faults, List<Diagnostic> notices) {
+    CellOutcome outcome = edit.done(faults, notices, total -> new Pace(progress, clock, total));
+    evaluations += edit.evaluations();
+    return outcome;
   }
 }

@@ -17,6 +17,11 @@ final class SheetMessages {
   private static final String ONE_DEFINITION =
       "A name has one definition, so that the order of cells never changes a result.";
 
+  private static final String AS_IT_WAS = "The sheet is as it was.";
+
+  /** The start of the text, for what has no place in it. */
+  private static final Span NOWHERE = new Span(0, 0);
+
   private SheetMessages() {}
 
   static Diagnostic definedAbove(String name, Span span, Node first) {
@@ -43,6 +48,68 @@ final class SheetMessages {
         "Change it there, or take another name here, such as " + another(name) + ".");
   }
 
+  /** What is typed in a console takes over a name. */
+  static Diagnostic takesOver(Node node, Node other, String label) {
+    String name = node.defines().orElseThrow();
+    return Diagnostic.of(
+        "takes-over",
+        name + " replaces its definition in " + label + ", " + said(other) + ".",
+        nameSpan(node.statement()),
+        "",
+        "");
+  }
+
+  static Diagnostic withdrawn(String name, Node node, String label) {
+    return Diagnostic.of(
+        "withdrawn",
+        name + " is withdrawn from " + label + "; it was " + said(node) + ".",
+        new Span(0, name.length()),
+        "",
+        "");
+  }
+
+  static Diagnostic notDefined(String name, Span span, List<String> near) {
+    return Diagnostic.of(
+        "undefined",
+        "No cell defines " + name + ".",
+        span,
+        "",
+        near.isEmpty() ? "" : "Names spelled alike: " + String.join(", ", near) + ".");
+  }
+
+  /** The run of a cell was interrupted before anything was worked out. */
+  static Diagnostic interrupted() {
+    return Diagnostic.of("interrupted", "The cell was interrupted.", NOWHERE, "", AS_IT_WAS);
+  }
+
+  /** The run was interrupted at a statement of the cell. */
+  static Diagnostic interrupted(Node at) {
+    return Diagnostic.of(
+        "interrupted",
+        "Interrupted while " + called(at) + " was worked out.",
+        at.statement().span(),
+        "",
+        AS_IT_WAS);
+  }
+
+  /** The run was interrupted at a statement of another cell, which depends on this one. */
+  static Diagnostic interrupted(Node at, String label) {
+    return Diagnostic.of(
+        "interrupted",
+        "Interrupted while " + called(at) + " in " + label + " was worked out anew.",
+        NOWHERE,
+        "",
+        AS_IT_WAS);
+  }
+
+  private static String called(Node node) {
+    return node.defines().orElse("`" + shortened(node.text()) + "`");
+  }
+
+  private static String shortened(String text) {
+    return text.length() <= 40 ? text : text.substring(0, 38) + " …";
+  }
+
   private static String another(String name) {
     return name.contains("_") ? name + "2" : name + "_2";
   }
@@ -57,7 +124,7 @@ final class SheetMessages {
       if (!unit.isEmpty()) {
         unit = " " + (InputForm.isBare(definition.value()) ? unit : "[" + unit + "]");
       }
-      return (value.length() <= 40 ? value : value.substring(0, 38) + " …") + unit;
+      return shortened(value) + unit;
     }
     return node.statement() instanceof Statement.Published ? "a function from Java" : "a function";
   }

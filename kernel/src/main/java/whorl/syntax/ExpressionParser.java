@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Span;
 import whorl.syntax.Token.Kind;
 
@@ -492,6 +493,7 @@ final class ExpressionParser {
   // primary = number [ bare ] | group [ bare ] | vector [ bare ] | "|" sum "|" | name | call
   //         | text | "true" | "false"
   private Expr primary(boolean exponent) {
+    Interruption.poll();
     Token token = cursor.peek();
     return switch (token.kind()) {
       case NUMBER -> number(exponent);

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Source;
 import whorl.syntax.Token.Kind;
 
@@ -44,6 +45,7 @@ final class Lexer {
   static List<Token> tokens(Source source, SyntaxMessages messages) {
     var lexer = new Lexer(source, messages);
     while (lexer.next < lexer.glyphs.count()) {
+      Interruption.poll();
       lexer.token();
     }
     lexer.add(Kind.LINE_END, lexer.next, "");

@@ -33,8 +33,7 @@ public final class Parser {
   public static Parsed parse(Source source, Predicate<String> names, UnitWords units) {
     var messages = new SyntaxMessages(source);
     if (source.length() > LONGEST_TEXT) {
-      return new Parsed(
-          List.of(), List.of(), List.of(messages.textTooLong(LONGEST_TEXT)), List.of());
+      return tooLong(messages);
     }
     LineSplitter.Split split = LineSplitter.split(Lexer.tokens(source, messages));
     Set<String> own = namesDefinedIn(split.lines());
@@ -48,6 +47,10 @@ public final class Parser {
     return new Parsed(statements, split.remarks(), reported, unitWords);
   }
 
+  private static Parsed tooLong(SyntaxMessages messages) {
+    return new Parsed(List.of(), List.of(), List.of(messages.textTooLong(LONGEST_TEXT)), List.of());
+  }
+
   /**
    * Reads heads of functions that are worked out outside the sheet, one a line.
    *
@@ -56,6 +59,9 @@ public final class Parser {
    */
   public static Parsed heads(Source source, Predicate<String> names, UnitWords units) {
     var messages = new SyntaxMessages(source);
+    if (source.length() > LONGEST_TEXT) {
+      return tooLong(messages);
+    }
     var statements = new ArrayList<Statement>();
     var errors = new ArrayList<Diagnostic>();
     var reading = new Reading(messages, names, units, new ArrayList<>(), errors);
