@@ -13,6 +13,7 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 import picocli.CommandLine.UnmatchedArgumentException;
+import whorl.jupyter.KernelException;
 import whorl.notebook.NoteFileException;
 
 /** The {@code whorl} command. */
@@ -22,6 +23,7 @@ import whorl.notebook.NoteFileException;
     subcommands = {
       RunCommand.class,
       RecheckCommand.class,
+      KernelCommand.class,
       InstallCommand.class,
       LabCommand.class,
       RehearseCommand.class
@@ -95,7 +97,7 @@ public final class Main implements Callable<Integer> {
 
   private static int failure(Exception e, CommandLine command, CommandLine.ParseResult parsed)
       throws Exception {
-    if (e instanceof NoteFileException) {
+    if (e instanceof NoteFileException || e instanceof KernelException) {
       command.getErr().println("whorl: " + e.getMessage());
       return ExitStatus.USAGE.code();
     }

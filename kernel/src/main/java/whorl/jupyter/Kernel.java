@@ -1,0 +1,216 @@
+package whorl.jupyter;
+
+import com.google.gson.JsonObject;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CountDownLatch;
+import java.util.function.Supplier;
+import org.jspecify.annotations.Nullable;
+import whorl.page.Page;
+import whorl.page.PlainLanguage;
+
+/**
+ * A page behind the connection of a front end.
+ *
+ * <p>Each thread has one task. That of the sockets takes messages in and out; those of shell and
+ * control serve requests; that of the outbox sends. Cells run on that of shell.
+ */
+public final class Kernel {
+  private static final long STACK_FOR_CELLS = 16 << 20;
+  private static final long DEFAULT_STACK = 0;
+
+  /** How long a thread may take to end, in milliseconds. */
+  private static final long PATIENCE = 1_000;
+
+  private final Log log;
+  private final Session session = new Session("kernel");
+  private final Inbox shellInbox = new Inbox();
+  private final Inbox controlInbox = new Inbox();
+  private final Questions questions;
+  private final Sockets sockets;
+  private final Outbox outbox;
+  private final CompletableFuture<Page> page = new CompletableFuture<>();
+  private final CountDownLatch ended = new CountDownLatch(1);
+  private volatile @Nullable KernelException failure;
+  private final Thread shell;
+  private final Thread control;
+  private final Thread sending;
+  private final Thread moving;
+  private final Thread loading;
+
+  /**
+   * Binds the sockets; from here on front ends can connect, though nothing is served yet.
+   *
+   * @param connection where front ends connect
+   * @param language of plain cells
+   * @param pages makes the page; called once, while first requests are served already
+   * @param err where trouble is told, one line each
+   */
+  public Kernel(
+      ConnectionFile connection, PlainLanguage language, Supplier<Page> pages, PrintWriter err)
+      throws KernelException {
+    log = new Log(err);
+    var format = new WireFormat(new Signatures(connection.key()));
+    sockets = new Sockets(connection, this::received, this::fail, log);
+    outbox = new Outbox(session, format, sockets, log);
+    questions = new Questions(session, format, outbox, log);
+    var info = new KernelInfo(language);
+
+    Map<String, Handler> onControl =
+        Map.of(
+            "kernel_info_request", info,
+            "interrupt_request", this::interrupt,
+            "shutdown_request", this::shutDown);
+    var history = new History();
+    var onShell = new HashMap<String, Handler>();
+    onShell.put("kernel_info_request", info);
+    onShell.put(
+        "execute_request", new Execution(page::join, shellInbox, history, outbox, questions, log));
+    onShell.put("history_request", history);
+    onShell.put("shutdown_request", this::shutDown);
+    onShell.putAll(new CodeQuestions(page::join).handlers());
+    onShell.putAll(Comms.handlers());
+
+    shell =
+        thread(
+            "shell",
+            STACK_FOR_CELLS,
+            new RequestLoop(Channel.SHELL, shellInbox, onShell, format, session, outbox, log));
+    control =
+        thread(
+            "control",
+            DEFAULT_STACK,
+            new RequestLoop(
+                Channel.CONTROL, controlInbox, onControl, format, session, outbox, log));
+    sending =
+        thread(
+            "outbox",
+            DEFAULT_STACK,
+            () -> {
+              outbox.run();
+              sockets.end();
+            });
+    moving = thread("sockets", DEFAULT_STACK, sockets);
+    loading = thread("page", DEFAULT_STACK, () -> page.complete(pages.get()));
+  }
+
+  private Thread thread(String name, long stack, Runnable task) {
+    var thread = new Thread(null, task, name, stack);
+    thread.setDaemon(true);
+    thread.setUncaughtExceptionHandler(this::fail);
+    return thread;
+  }
+
+  /**
+   * Serves until a front end, or {@link #stop}, shuts the kernel down.
+   *
+   * @throws KernelException if a part of the kernel failed so that the rest is of no use
+   */
+  public void run() throws KernelException {
+    List.of(moving, sending, control, shell, loading).forEach(Thread::start);
+    var state = new JsonObject();
+    state.addProperty("execution_state", "starting");
+    outbox.publish("status", new JsonObject(), state);
+    try {
+      ended.await();
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+    close();
+    if (failure != null) {
+      throw failure;
+    }
+  }
+
+  /** Makes {@link #run} return soon; from any thread. */
+  public void stop() {
+    ended.countDown();
+  }
+
+  /** A thread that everything else needs has ended. */
+  private void fail(Thread thread, Throwable cause) {
+    log.line("the thread " + thread.getName() + " failed", cause);
+    failure = new KernelException("the kernel had to end", cause);
+    page.completeExceptionally(cause);
+    stop();
+  }
+
+  private void received(Channel channel, List<byte[]> frames) {
+    switch (channel) {
+      case SHELL -> shellInbox.add(frames);
+      case CONTROL -> controlInbox.add(frames);
+      case STDIN -> questions.received(frames);
+      case IOPUB -> welcome(frames.get(0));
+      case HEARTBEAT -> throw new IllegalArgumentException("heartbeats are no messages");
+    }
+  }
+
+  /** Tells a front end that what is published from now on reaches it. */
+  private void welcome(byte[] subscription) {
+    if (subscription.length == 0 || subscription[0] != 1) {
+      return;
+    }
+    byte[] topic = Arrays.copyOfRange(subscription, 1, subscription.length);
+    var content = new JsonObject();
+    content.addProperty("subscription", new String(topic, StandardCharsets.UTF_8));
+    outbox.send(
+        Channel.IOPUB,
+        new Message(
+            List.of(topic),
+            session.header("iopub_welcome"),
+            new JsonObject(),
+            new JsonObject(),
+            content,
+            List.of()));
+  }
+
+  private void interrupt(Request request) {
+    interruptCell();
+    request.succeed(new JsonObject());
+  }
+
+  private void interruptCell() {
+    if (page.isDone() && !page.isCompletedExceptionally()) {
+      page.join().interrupt();
+    }
+    questions.cancel();
+  }
+
+  private void shutDown(Request request) throws BadContentException {
+    var content = new JsonObject();
+    content.addProperty("restart", request.content().flag("restart", false));
+    request.succeed(content);
+    request.publish("shutdown_reply", content);
+    stop();
+  }
+
+  /** Ends the threads in the order in which what one has left to do may still pass the next. */
+  private void close() {
+    controlInbox.end();
+    join(control);
+    interruptCell();
+    shellInbox.end();
+    boolean idle = join(shell);
+    outbox.end();
+    join(sending);
+    join(moving);
+    if (idle && page.isDone() && !page.isCompletedExceptionally()) {
+      page.join().close();
+    }
+  }
+
+  /** Whether the thread ended within a moment. */
+  private static boolean join(Thread thread) {
+    try {
+      thread.join(PATIENCE);
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+    return !thread.isAlive();
+  }
+}

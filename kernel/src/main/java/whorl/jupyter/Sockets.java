@@ -1,0 +1,205 @@
+package whorl.jupyter;
+
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.concurrent.TimeUnit;
+import org.jspecify.annotations.Nullable;
+import org.zeromq.SocketType;
+import org.zeromq.ZContext;
+import org.zeromq.ZMQ;
+import org.zeromq.ZMQ.Poller;
+import org.zeromq.ZMQ.Socket;
+import org.zeromq.ZMQException;
+
+/**
+ * The sockets. One thread of their own does nothing but take messages from one place to another, so
+ * that whatever runs elsewhere, requests are received and heartbeats returned.
+ */
+final class Sockets implements Runnable, Outbox.Carrier {
+  /** Is told what arrives. */
+  interface Receiver {
+    void received(Channel channel, List<byte[]> frames);
+  }
+
+  private static final Channel[] CHANNELS = Channel.values();
+  private static final String OUTGOING = "inproc://outgoing";
+
+  /** A frame that claims to be longer is not waited for. */
+  private static final long LONGEST_FRAME = 256L << 20;
+
+  /** How long replies have to leave when the sockets are closed, in milliseconds. */
+  private static final int LINGER = 1_000;
+
+  /** For each front end so many outputs wait here; beyond, they wait where they arise. */
+  private static final int MOST_OUTPUTS = 1_000;
+
+  private static final int MOST_OUTGOING = 100;
+
+  /** How long a message waits for room before others have their turn, in milliseconds. */
+  private static final int TURN = 5;
+
+  /** A front end that takes nothing for so long holds the others up no more: it misses outputs. */
+  private static final long PATIENCE = TimeUnit.SECONDS.toNanos(2);
+
+  private final ZContext context = new ZContext(1);
+  private final Map<Channel, Socket> sockets = new EnumMap<>(Channel.class);
+  private final Socket outgoing;
+  private final Socket toOutgoing;
+  private final Receiver receiver;
+
+  /** What could not be published yet. */
+  private @Nullable List<byte[]> waiting;
+
+  private long waitingSince;
+  private boolean ended;
+
+  /** Binds the sockets. */
+  Sockets(
+      ConnectionFile connection, Receiver receiver, Thread.UncaughtExceptionHandler fatal, Log log)
+      throws KernelException {
+    this.receiver = receiver;
+    context.setUncaughtExceptionHandler(fatal);
+    context.setNotificationExceptionHandler((thread, e) -> log.line("trouble with a socket", e));
+    for (Channel channel : Channel.values()) {
+      sockets.put(channel, bound(channel, connection));
+    }
+    outgoing = context.createSocket(SocketType.PULL);
+    outgoing.setRcvHWM(MOST_OUTGOING);
+    outgoing.bind(OUTGOING);
+    toOutgoing = context.createSocket(SocketType.PUSH);
+    toOutgoing.connect(OUTGOING);
+  }
+
+  private Socket bound(Channel channel, ConnectionFile connection) throws KernelException {
+    Socket socket =
+        context.createSocket(channel == Channel.IOPUB ? SocketType.XPUB : SocketType.ROUTER);
+    socket.setLinger(LINGER);
+    socket.setMaxMsgSize(LONGEST_FRAME);
+    socket.setIPv6(connection.isVersion6());
+    if (channel == Channel.IOPUB) {
+      socket.setXpubVerbose(true);
+      socket.setXpubNoDrop(true);
+      socket.setSndHWM(MOST_OUTPUTS);
+      socket.setSendTimeOut(TURN);
+    } else {
+      socket.setRouterHandover(true);
+      socket.setHWM(0);
+    }
+    String address = connection.address(channel);
+    try {
+      socket.bind(address);
+    } catch (ZMQException | IllegalArgumentException e) {
+      context.close();
+      throw new KernelException(
+          String.format(
+              "cannot listen at %s (%s): another program does, or the address is not one of this"
+                  + " machine's",
+              address, channel.portName()),
+          e);
+    }
+    return socket;
+  }
+
+  /** Hands a message to the thread of the sockets, from one thread only; none ends it. */
+  @Override
+  public void carry(Channel channel, List<byte[]> frames) {
+    toOutgoing.sendMore(new byte[] {(byte) channel.ordinal()});
+    isSent(toOutgoing, frames);
+  }
+
+  /** Ends the thread of the sockets, from the thread that hands messages to it. */
+  void end() {
+    toOutgoing.send(new byte[0]);
+  }
+
+  @Override
+  public void run() {
+    Poller poller = context.createPoller(sockets.size() + 1);
+    poller.register(outgoing, Poller.POLLIN);
+    sockets.values().forEach(socket -> poller.register(socket, Poller.POLLIN));
+    while (!ended) {
+      if (poller.poll(waiting == null ? -1 : 0) < 0) {
+        throw new IllegalStateException("the sockets cannot be watched");
+      }
+      sockets.forEach(this::takeIn);
+      if (waiting == null) {
+        sendOut(received(outgoing));
+      } else {
+        publish(waiting);
+      }
+    }
+    context.close();
+  }
+
+  private void takeIn(Channel channel, Socket socket) {
+    List<byte[]> frames = received(socket);
+    if (frames.isEmpty()) {
+      return;
+    }
+    if (channel == Channel.HEARTBEAT) {
+      isSent(socket, frames);
+    } else {
+      receiver.received(channel, frames);
+    }
+  }
+
+  private void sendOut(List<byte[]> outgoing) {
+    if (outgoing.isEmpty()) {
+      return;
+    }
+    byte[] address = outgoing.get(0);
+    List<byte[]> frames = outgoing.subList(1, outgoing.size());
+    if (address.length == 0) {
+      ended = true;
+    } else if (CHANNELS[address[0]] == Channel.IOPUB) {
+      publish(frames);
+    } else {
+      isSent(socket(CHANNELS[address[0]]), frames);
+    }
+  }
+
+  private void publish(List<byte[]> frames) {
+    Socket iopub = socket(Channel.IOPUB);
+    long now = System.nanoTime();
+    if (isSent(iopub, frames)) {
+      waiting = null;
+    } else if (waiting == null) {
+      waiting = frames;
+      waitingSince = now;
+    } else if (now - waitingSince > PATIENCE) {
+      waiting = null;
+      iopub.setXpubNoDrop(false);
+      isSent(iopub, frames);
+      iopub.setXpubNoDrop(true);
+    }
+  }
+
+  private Socket socket(Channel channel) {
+    return Objects.requireNonNull(sockets.get(channel));
+  }
+
+  /** Whether there was room for a message; if there is for its first part, there is for all. */
+  private static boolean isSent(Socket socket, List<byte[]> frames) {
+    int last = frames.size() - 1;
+    for (int i = 0; i < last; i++) {
+      if (!socket.send(frames.get(i), ZMQ.SNDMORE)) {
+        return false;
+      }
+    }
+    return socket.send(frames.get(last), 0);
+  }
+
+  /** A message that has arrived, or nothing. */
+  private static List<byte[]> received(Socket socket) {
+    var frames = new ArrayList<byte[]>();
+    byte[] frame = socket.recv(ZMQ.DONTWAIT);
+    while (frame != null) {
+      frames.add(frame);
+      frame = socket.hasReceiveMore() ? socket.recv() : null;
+    }
+    return frames;
+  }
+}
