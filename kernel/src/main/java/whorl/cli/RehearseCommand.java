@@ -1,12 +1,20 @@
 package whorl.cli;
 
+import com.google.gson.JsonObject;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.Writer;
+import java.net.InetAddress;
+import java.net.ServerSocket;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.concurrent.Callable;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
+import whorl.jupyter.ConnectionFile;
+import whorl.jupyter.Rehearsal;
 
 /**
  * {@code whorl rehearse}: does what most runs do, so that the JVM can archive the classes which
@@ -14,11 +22,14 @@ import picocli.CommandLine.Command;
  */
 @Command(name = "rehearse", hidden = true)
 final class RehearseCommand implements Callable<Integer> {
-  private static final String SHEET =
+  private static final String INPUTS =
       """
       m [kg] = 412           # weighed
       D [mm] = 900
       n [rpm] = 6000
+      """;
+  private static final String RESULTS =
+      """
       I [kg·m²] = 1/2 * m * (D/2)^2
       E [MJ] = 1/2 * I * n^2
       speed(r [m], n [rpm]) = r * n
@@ -26,21 +37,63 @@ final class RehearseCommand implements Callable<Integer> {
       check E <= 10 MJ
       assume v < 300 m/s
       E [ft·lbf]
-      wrong [s] = E
       """;
+  private static final String SLIP = "t [s] = E";
 
   @Override
-  public Integer call() throws IOException {
-    Path sheet = Files.createTempFile("whorl-", ".whorl");
-    Path record = Files.createTempFile("whorl-", ".json");
+  public Integer call() throws IOException, InterruptedException {
+    Path folder = Files.createTempDirectory("whorl-");
+    Path sheet = folder.resolve("sheet.whorl");
+    Path note = folder.resolve("note.ipynb");
+    Path record = folder.resolve("record.json");
+    Path connection = folder.resolve("connection.json");
     try {
-      Files.writeString(sheet, SHEET);
-      var nowhere = new PrintWriter(Writer.nullWriter());
-      Main.run(nowhere, nowhere, "run", sheet.toString(), "--json", record.toString());
+      Files.writeString(sheet, INPUTS + RESULTS);
+      whorl("run", sheet, "--out", note, "--json", record);
+      whorl("recheck", note);
+      Files.writeString(sheet, INPUTS + SLIP);
+      whorl("run", sheet);
+      Files.writeString(connection, connection().toString());
+      serve(connection);
     } finally {
-      Files.delete(sheet);
-      Files.delete(record);
+      for (Path file : List.of(sheet, note, record, connection, folder)) {
+        Files.deleteIfExists(file);
+      }
     }
     return ExitStatus.HOLDS.code();
+  }
+
+  private static void whorl(Object... words) {
+    var nowhere = new PrintWriter(Writer.nullWriter());
+    Main.run(nowhere, nowhere, Stream.of(words).map(Object::toString).toArray(String[]::new));
+  }
+
+  private static void serve(Path connection) throws IOException, InterruptedException {
+    var kernel = new Thread(() -> whorl("kernel", connection));
+    kernel.setDaemon(true);
+    kernel.start();
+    try (var front = new Rehearsal(ConnectionFile.read(connection))) {
+      front.run(List.of(INPUTS, RESULTS, SLIP, "n [rpm] = 7000", "%%java\n6 * 7"));
+    }
+    kernel.join();
+  }
+
+  /** A connection file with ports that are free. */
+  private static JsonObject connection() throws IOException {
+    var connection = new JsonObject();
+    connection.addProperty("key", "rehearsal");
+    var taken = new ArrayList<ServerSocket>();
+    try {
+      for (String channel : List.of("shell", "control", "stdin", "iopub", "hb")) {
+        var socket = new ServerSocket(0, 1, InetAddress.getLoopbackAddress());
+        taken.add(socket);
+        connection.addProperty(channel + "_port", socket.getLocalPort());
+      }
+    } finally {
+      for (ServerSocket socket : taken) {
+        socket.close();
+      }
+    }
+    return connection;
   }
 }

@@ -56,7 +56,7 @@ final class KernelFolder {
   void prepare(Program original) throws IOException {
     Files.createDirectories(program);
     original.copyTo(jar);
-    java.archive(jar, archive, words("rehearse"));
+    java.archive(jar, archive, List.of("rehearse"));
   }
 
   /** Lets Jupyter start what was prepared. */
@@ -66,7 +66,7 @@ final class KernelFolder {
     }
     Path json = folder.resolve("kernel.json");
     String before = Files.exists(json) ? Files.readString(json) : "";
-    List<String> command = java.start(jar, archive, words("kernel", "{connection_file}"));
+    List<String> command = java.start(jar, archive, spec.arguments());
     AtomicFile.replace(json, spec.json(command).getBytes(StandardCharsets.UTF_8));
     committed = true;
     for (Path other : programs()) {
@@ -82,13 +82,6 @@ final class KernelFolder {
       deleteIfPossible(program);
       folder.toFile().delete();
     }
-  }
-
-  private List<String> words(String command, String... more) {
-    var words = new ArrayList<>(List.of(command));
-    words.addAll(spec.mode());
-    words.addAll(List.of(more));
-    return words;
   }
 
   private List<Path> programs() throws IOException {

@@ -12,20 +12,29 @@ import java.util.List;
  * @param title by which people choose it
  * @param language of its cells; a notebook whose kernel is missing is opened with one of its
  *     language
- * @param mode what the kernel command is given to begin in this language
+ * @param arguments that start it
  * @param logos the folder of its logos among the resources
  */
-record Kernelspec(String name, String title, String language, List<String> mode, String logos) {
+record Kernelspec(
+    String name, String title, String language, List<String> arguments, String logos) {
+
+  /** Jupyter puts the path of the connection file in its place. */
+  private static final String CONNECTION = "{connection_file}";
 
   Kernelspec {
-    mode = List.copyOf(mode);
+    arguments = List.copyOf(arguments);
   }
 
   /** The two kernels of the program: one for the sheet language, one that begins in Java. */
   static List<Kernelspec> both(String name) {
     return List.of(
-        new Kernelspec(name, "Whorl", "whorl", List.of(), "sheet"),
-        new Kernelspec(name + "-java", "Java (Whorl)", "java", List.of("--java"), "java"));
+        new Kernelspec(name, "Whorl", "whorl", List.of("kernel", CONNECTION), "sheet"),
+        new Kernelspec(
+            name + "-java",
+            "Java (Whorl)",
+            "java",
+            List.of("kernel", "--java", CONNECTION),
+            "java"));
   }
 
   /** The text of {@code kernel.json}. */

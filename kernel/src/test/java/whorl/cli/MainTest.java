@@ -135,4 +135,10 @@ class MainTest {
     assertEquals(3, run("run", sheet.toString(), "--out", folder.resolve("o.txt").toString()));
     assertTrue(err.toString().contains("must end in .ipynb"), err::toString);
   }
+
+  @Test
+  void aRehearsalRunsANoteAndAKernel() {
+    assertEquals(0, run("rehearse"), err::toString);
+    assertEquals("", out.toString() + err);
+  }
 }
