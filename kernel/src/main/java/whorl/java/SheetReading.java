@@ -1,0 +1,11 @@
+package whorl.java;
+
+import java.util.Optional;
+import whorl.sheet.Quantity;
+
+/** The sheet as a cell in Java can read it. */
+@FunctionalInterface
+public interface SheetReading {
+  /** What a name stands for, or empty if it has no value. */
+  Optional<Quantity> quantity(String name);
+}

@@ -1,0 +1,4 @@
+@NullMarked
+package whorl.java;
+
+import org.jspecify.annotations.NullMarked;
