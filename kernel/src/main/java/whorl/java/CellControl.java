@@ -6,6 +6,7 @@ import java.lang.reflect.Method;
 import java.net.MalformedURLException;
 import java.nio.file.Path;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Supplier;
@@ -74,7 +75,7 @@ final class CellControl implements ExecutionControl {
       ran.put(className, new Ran(null, Optional.empty(), Optional.of(stop)));
       throw new StoppedException();
     } catch (InvocationTargetException e) {
-      Throwable cause = e.getCause();
+      Throwable cause = Objects.requireNonNullElse(e.getCause(), e);
       ran.put(className, new Ran(null, Optional.of(cause), Optional.empty()));
       throw forJShell(cause);
     } catch (Exception e) {

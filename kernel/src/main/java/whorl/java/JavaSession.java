@@ -2,6 +2,7 @@ package whorl.java;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutionException;
@@ -246,7 +247,7 @@ final class JavaSession implements AutoCloseable {
     } catch (Failure failure) {
       throw failure.within(text, place);
     } catch (ExecutionException e) {
-      throw errors.thrown(e.getCause(), text, place);
+      throw errors.thrown(Objects.requireNonNullElse(e.getCause(), e), text, place);
     } catch (Exception e) {
       throw errors.thrown(e, text, place);
     }

@@ -10,6 +10,7 @@ import org.dflib.jjava.jupyter.kernel.comm.CommManager;
 import org.dflib.jjava.jupyter.kernel.display.DisplayData;
 import org.dflib.jjava.jupyter.kernel.magic.MagicsRegistry;
 import org.dflib.jjava.jupyter.kernel.util.StringStyler;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The kernel as the display library knows it, for the extensions that render values and add magics:
@@ -74,7 +75,7 @@ final class NotebookKernel extends BaseKernel {
   }
 
   @Override
-  public Object evalRaw(String code) {
+  public @Nullable Object evalRaw(String code) {
     return session.evaluateWithin(code);
   }
 
