@@ -51,6 +51,15 @@ public final class Checker {
     }
   }
 
+  /** A statement that is sound; empty for one that is not, with no message worded. */
+  public Optional<Checked> sound(Statement statement) {
+    try {
+      return Optional.of(checked(statement));
+    } catch (CheckFailure failure) {
+      return Optional.empty();
+    }
+  }
+
   /** The names that a suggestion may use: parameters, then the sheet's. */
   private Map<String, Readings> readings(Statement statement) {
     var readings = new LinkedHashMap<String, Readings>();

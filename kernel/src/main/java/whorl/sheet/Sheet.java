@@ -12,6 +12,7 @@ import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Availability;
 import whorl.check.DefinedNames;
+import whorl.check.Scope;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Source;
@@ -162,6 +163,11 @@ public final class Sheet {
   /** The cells that took effect, in the order in which they first did. */
   public List<CellId> cells() {
     return List.copyOf(contents.cells().keySet());
+  }
+
+  /** The names that a formula could use, with what is known of them. */
+  public Scope scope() {
+    return contents.results();
   }
 
   /** What a name stands for, or empty if it has no value. */

@@ -1,5 +1,8 @@
 package whorl.syntax;
 
+import static java.util.stream.Collectors.joining;
+import static java.util.stream.Collectors.toMap;
+
 import java.util.HashMap;
 import java.util.Map;
 
@@ -31,11 +34,25 @@ public final class GreekNames {
     }
   }
 
+  private static final Map<String, String> NAMES =
+      LETTERS.entrySet().stream().collect(toMap(Map.Entry::getValue, Map.Entry::getKey));
+
   private GreekNames() {}
 
   /** The letters by name, for completion. */
   public static Map<String, String> letters() {
     return Map.copyOf(LETTERS);
+  }
+
+  /** A name as one types it on a plain keyboard, {@code omega_max} for {@code ω_max}. */
+  public static String spelled(String name) {
+    if (name.chars().allMatch(c -> c < 0x80)) {
+      return name;
+    }
+    return name.codePoints()
+        .mapToObj(Character::toString)
+        .map(letter -> NAMES.getOrDefault(letter, letter))
+        .collect(joining());
   }
 
   /** A name with every spelled letter replaced. */

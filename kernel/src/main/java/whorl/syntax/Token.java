@@ -12,9 +12,10 @@ import whorl.diagnostic.Span;
  * @param opensLine whether it is the first on its line
  * @param wrong what is wrong, for {@link Kind#WRONG} only
  */
-record Token(Kind kind, Span span, String text, boolean opensLine, @Nullable Diagnostic wrong) {
+public record Token(
+    Kind kind, Span span, String text, boolean opensLine, @Nullable Diagnostic wrong) {
   /** The kinds of token. */
-  enum Kind {
+  public enum Kind {
     NAME,
     NUMBER,
     RAISED,
@@ -51,7 +52,7 @@ record Token(Kind kind, Span span, String text, boolean opensLine, @Nullable Dia
     END;
 
     /** Whether it joins two operands, so that a line may end in it and none may begin with it. */
-    boolean isOperator() {
+    public boolean isOperator() {
       return switch (this) {
         case PLUS,
             MINUS,
@@ -75,36 +76,38 @@ record Token(Kind kind, Span span, String text, boolean opensLine, @Nullable Dia
     }
 
     /** Whether it compares two sides. */
-    boolean isRelation() {
+    public boolean isRelation() {
       return this == LESS || this == AT_MOST || this == MORE || this == AT_LEAST;
     }
   }
 
-  boolean is(Kind other) {
+  /** Whether it is of this kind. */
+  public boolean is(Kind other) {
     return kind == other;
   }
 
   /** Whether it is this word, in a place where the word has a meaning. */
-  boolean isWord(String word) {
+  public boolean isWord(String word) {
     return kind == Kind.NAME && text.equals(word);
   }
 
   /** Whether it is a word that can be a name. */
-  boolean isFreeName() {
+  public boolean isFreeName() {
     return kind == Kind.NAME && !Words.isReserved(text);
   }
 
-  boolean isReservedWord() {
+  /** Whether it is a word that cannot be a name. */
+  public boolean isReservedWord() {
     return kind == Kind.NAME && Words.isReserved(text);
   }
 
   /** Whether another stands right behind, with no blank between. */
-  boolean touches(Token next) {
+  public boolean touches(Token next) {
     return span.end() == next.span.start();
   }
 
   /** The name with spelled Greek letters folded. */
-  Expr.Name name() {
+  public Expr.Name name() {
     return new Expr.Name(span, GreekNames.fold(text));
   }
 }

@@ -32,6 +32,7 @@ final class CatalogueFile {
         new Memo<>(() -> Factor.parse(factor)),
         zero.isEmpty() ? Rational.ZERO : Rational.parse(zero),
         CommaSeparated.words(cells.get(7)),
-        cells.get(8).equals("SI"));
+        cells.get(8).equals("SI"),
+        cells.get(9));
   }
 }

@@ -15,6 +15,7 @@ import whorl.units.kind.Kind;
  * @param zero added to a reading before the factor; zero but for scales of temperature
  * @param ucum codes; the first is written, all are read
  * @param prefixable whether SI prefixes may stand in front of it
+ * @param source of the factor
  */
 record CatalogueRow(
     UnitText text,
@@ -25,7 +26,8 @@ record CatalogueRow(
     Memo<Factor> size,
     Rational zero,
     List<String> ucum,
-    boolean prefixable) {
+    boolean prefixable,
+    String source) {
 
   /** To coherent SI units. */
   Factor factor() {
@@ -34,11 +36,7 @@ record CatalogueRow(
 
   /** Whether the unit is written as one symbol, and not as a product of others. */
   boolean isSymbol() {
-    return isSymbol(text);
-  }
-
-  static boolean isSymbol(UnitText text) {
-    return text.under().isEmpty() && text.over().size() == 1 && text.over().get(0).exponent() == 1;
+    return text.isSymbol();
   }
 
   /** The symbol of a row that is one symbol. */

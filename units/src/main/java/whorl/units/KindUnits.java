@@ -50,6 +50,13 @@ final class KindUnits {
             () -> catalogue.resolve(ofBaseUnits(kind.dimension()).orElseThrow()).serving(kind));
   }
 
+  /** The units among which a quantity of a kind is shown; at least its usual one. */
+  List<Unit> choices(Kind kind) {
+    Unit usual = usual(kind);
+    List<Unit> choices = multiples(usual, kind).stream().map(text -> unit(text, kind)).toList();
+    return choices.isEmpty() ? List.of(usual) : choices;
+  }
+
   /** The coherent unit of a kind, as the trade writes it; empty for kinds that have no name. */
   Optional<Unit> coherent(Kind kind) {
     return line(kind).map(line -> unit(line.coherent(), kind));

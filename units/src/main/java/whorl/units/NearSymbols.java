@@ -42,7 +42,7 @@ final class NearSymbols {
           }
         }
       }
-      row.aliases().stream().filter(CatalogueRow::isSymbol).forEach(a -> plain.add(a.plain()));
+      row.aliases().stream().filter(UnitText::isSymbol).forEach(a -> plain.add(a.plain()));
     }
     for (List<String> cells : CommaSeparated.lines("trade-spellings.csv", 2)) {
       tradeSpellings.put(cells.get(0), CommaSeparated.words(cells.get(1)));

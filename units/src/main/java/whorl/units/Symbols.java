@@ -24,7 +24,7 @@ final class Symbols {
         add(row.symbol(), row);
       }
       for (UnitText alias : row.aliases()) {
-        if (CatalogueRow.isSymbol(alias)) {
+        if (alias.isSymbol()) {
           add(alias.over().get(0).symbol(), row);
         }
       }

@@ -54,6 +54,7 @@ public final class UnitCatalogue {
       new Memo<>(() -> new CoherentUnits(this, kindUnits.get()));
   private final Memo<NearSymbols> nearSymbols;
   private final Memo<UcumCodes> ucum;
+  private final Memo<UnitGuide> guide = new Memo<>(this::makeGuide);
 
   private UnitCatalogue(List<CatalogueRow> rows) {
     this.rows = List.copyOf(rows);
@@ -63,7 +64,7 @@ public final class UnitCatalogue {
     for (CatalogueRow row : rows) {
       enter(row.text(), row);
       for (UnitText alias : row.aliases()) {
-        if (!CatalogueRow.isSymbol(alias)) { // single symbols are in the other table
+        if (!alias.isSymbol()) { // single symbols are in the other table
           enter(alias, row);
         }
       }
@@ -307,6 +308,20 @@ public final class UnitCatalogue {
    */
   public Optional<String> ucumCode(UnitText text) {
     return ucum.get().write(text);
+  }
+
+  /** What people look up about the units. */
+  public UnitGuide guide() {
+    return guide.get();
+  }
+
+  private UnitGuide makeGuide() {
+    return new UnitGuide(this, rows, symbols);
+  }
+
+  /** The units among which a quantity of a kind is usually shown, from small to large. */
+  public List<Unit> usualUnits(Kind kind) {
+    return kindUnits.get().choices(kind);
   }
 
   UcumCodes ucum() {

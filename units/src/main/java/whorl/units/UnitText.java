@@ -49,6 +49,11 @@ public record UnitText(List<Power> over, List<Power> under) {
     return new UnitText(List.of(new Power(symbol, 1)), List.of());
   }
 
+  /** Whether this is one symbol, as {@code kN}, and no product, power or quotient. */
+  public boolean isSymbol() {
+    return under.isEmpty() && over.size() == 1 && over.get(0).exponent() == 1;
+  }
+
   /** All members in order, those behind the solidus with their exponents turned round. */
   public List<Power> members() {
     List<Power> members = new ArrayList<>(over);

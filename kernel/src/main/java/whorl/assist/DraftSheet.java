@@ -1,0 +1,168 @@
+package whorl.assist;
+
+import java.util.ArrayDeque;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import whorl.check.Availability;
+import whorl.check.Checked;
+import whorl.check.Checker;
+import whorl.check.FreeNames;
+import whorl.check.Meaning;
+import whorl.check.Scope;
+import whorl.check.Type;
+import whorl.check.Vocabulary;
+import whorl.diagnostic.Source;
+import whorl.syntax.CatalogueWords;
+import whorl.syntax.LogicalLine;
+import whorl.syntax.Parsed;
+import whorl.syntax.Parser;
+import whorl.syntax.Statement;
+import whorl.units.Unit;
+import whorl.units.kind.Readings;
+
+/**
+ * The names of a sheet as they would be with a cell as it stands in the editor: what its lines
+ * define hides what the sheet has. Lines are checked only when their names are asked for; nothing
+ * is worked out and the sheet is not touched.
+ */
+final class DraftSheet implements Scope {
+  private final Scope sheet;
+  private final Set<String> sheetNames;
+  private final Source source;
+  private final Map<String, LogicalLine> own = new LinkedHashMap<>();
+  private final Map<String, Meaning> checked = new HashMap<>();
+  private final Map<String, Meaning> standIns = new HashMap<>();
+  private final Set<String> settled = new HashSet<>();
+  private boolean settling;
+
+  /**
+   * A draft.
+   *
+   * @param lines the lines of the cell
+   * @param besides the line that is being written, which defines nothing yet
+   */
+  DraftSheet(Scope sheet, Source source, List<LogicalLine> lines, LogicalLine besides) {
+    this.sheet = sheet;
+    this.sheetNames = new HashSet<>(sheet.names());
+    this.source = source;
+    for (LogicalLine line : lines) {
+      if (!line.isIndented() && !line.equals(besides)) {
+        line.defines().ifPresent(name -> own.putIfAbsent(name.name(), line));
+      }
+    }
+  }
+
+  /** The lines of the cell that define a name, by the name, in order. */
+  Map<String, LogicalLine> own() {
+    return own;
+  }
+
+  /** The text of a line of the cell, without its remark. */
+  String text(LogicalLine line) {
+    return source.slice(line.span());
+  }
+
+  /** Whether the sheet or the cell defines a name. */
+  boolean defines(String name) {
+    return own.containsKey(name) || sheetNames.contains(name);
+  }
+
+  /** A name for a value of some kind that nobody has written yet, such as an argument to come. */
+  String standIn(Readings readings, Unit unit) {
+    int number = 1;
+    while (defines("stand_in_" + number) || standIns.containsKey("stand_in_" + number)) {
+      number++;
+    }
+    standIns.put("stand_in_" + number, new Meaning.Quantity(new Type.Real(readings), unit, true));
+    return "stand_in_" + number;
+  }
+
+  @Override
+  public Optional<Meaning> meaning(String name) {
+    if (!settling) {
+      settling = true;
+      settle(name);
+      settling = false;
+    }
+    return Optional.ofNullable(checked.get(name))
+        .or(() -> Optional.ofNullable(standIns.get(name)))
+        .or(() -> sheet.meaning(name));
+  }
+
+  /** Messages are not worded here, so no names are needed to suggest. */
+  @Override
+  public List<String> names() {
+    return List.of();
+  }
+
+  /** A statement if it can be read, uses only names that are known, and is sound. */
+  Optional<Checked> sound(String text) {
+    return statement(text).filter(this::isKnown).flatMap(new Checker(this)::sound);
+  }
+
+  /** The one statement of a text, if it can be read and worked out. */
+  Optional<Statement> statement(String text) {
+    Parsed parsed = Parser.parse(new Source(text), this::defines, CatalogueWords.STANDARD);
+    return parsed.errors().isEmpty() && parsed.statements().size() == 1
+        ? Optional.of(parsed.statements().get(0))
+            .filter(statement -> Availability.gaps(statement, this::defines).isEmpty())
+        : Optional.empty();
+  }
+
+  private boolean isKnown(Statement statement) {
+    return FreeNames.in(statement).stream()
+        .allMatch(name -> meaning(name).isPresent() || isAtHand(name));
+  }
+
+  private boolean isAtHand(String name) {
+    return Vocabulary.isFunction(name) && !defines(name);
+  }
+
+  /**
+   * Checks the line that defines a name, behind those that it depends on. A list of what is open
+   * keeps long chains of definitions from growing the stack of the program.
+   */
+  private void settle(String name) {
+    var statements = new HashMap<String, Optional<Statement>>();
+    var open = new ArrayDeque<String>(List.of(name));
+    while (!open.isEmpty()) {
+      String next = open.getLast();
+      LogicalLine line = own.get(next);
+      if (line == null || settled.contains(next)) {
+        open.removeLast();
+        continue;
+      }
+      boolean entered = statements.containsKey(next);
+      Optional<Statement> statement =
+          statements.computeIfAbsent(next, key -> statement(text(line)));
+      if (!entered) {
+        statement.map(FreeNames::in).orElse(Set.of()).stream()
+            .filter(needed -> !statements.containsKey(needed))
+            .forEach(open::add);
+        continue;
+      }
+      open.removeLast();
+      statement
+          .filter(this::isKnown)
+          .flatMap(new Checker(this)::sound)
+          .flatMap(DraftSheet::meaning)
+          .ifPresent(meaning -> checked.put(next, meaning));
+      settled.add(next);
+    }
+  }
+
+  private static Optional<Meaning> meaning(Checked checked) {
+    if (checked instanceof Checked.Value value) {
+      var formula = value.formula();
+      return Optional.of(new Meaning.Quantity(formula.type(), formula.unit(), formula.chosen()));
+    }
+    return checked instanceof Checked.Function function
+        ? Optional.of(function.meaning())
+        : Optional.empty();
+  }
+}

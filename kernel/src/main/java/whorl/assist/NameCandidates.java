@@ -1,0 +1,170 @@
+package whorl.assist;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.Supplier;
+import java.util.stream.Collectors;
+import whorl.assist.Completion.Candidate;
+import whorl.check.ConstantAtHand;
+import whorl.check.Meaning;
+import whorl.report.QuantityText;
+import whorl.sheet.Quantity;
+import whorl.sheet.Sheet;
+import whorl.syntax.GreekNames;
+import whorl.syntax.LogicalLine;
+import whorl.syntax.Token;
+import whorl.syntax.Token.Kind;
+import whorl.units.Unit;
+import whorl.units.UnitText;
+
+/** The names that may be meant in a place: of the sheet, of the cell, at hand. */
+final class NameCandidates {
+  private static final int LONGEST_LINE = 72;
+
+  private final Sheet sheet;
+  private final DraftSheet draft;
+  private final AtCursor at;
+  private final List<String> typed;
+
+  NameCandidates(Sheet sheet, DraftSheet draft, AtCursor at) {
+    this.sheet = sheet;
+    this.draft = draft;
+    this.at = at;
+    this.typed = List.of(at.typed(), GreekNames.fold(at.typed()));
+  }
+
+  /** A name with what is said of it, which is worked out only for those that are offered. */
+  private record Name(String name, boolean atHand, Supplier<Candidate> candidate) {}
+
+  private record Found(Name name, Closeness closeness) {}
+
+  /** The names that begin as typed, the closest first; functions at hand behind the others. */
+  List<Candidate> all() {
+    var names = new ArrayList<Name>(parameters());
+    names.addAll(defined());
+    names.addAll(atHand());
+    var taken = new HashSet<String>();
+    return names.stream()
+        .filter(name -> taken.add(name.name()))
+        .map(name -> new Found(name, closeness(name.name())))
+        .filter(found -> found.closeness() != Closeness.NONE)
+        .sorted(
+            Comparator.comparing((Found found) -> found.name().atHand())
+                .thenComparing(Found::closeness)
+                .thenComparing(found -> found.name().name(), String.CASE_INSENSITIVE_ORDER)
+                .thenComparing(found -> found.name().name()))
+        .map(found -> found.name().candidate().get())
+        .toList();
+  }
+
+  private Closeness closeness(String name) {
+    return Closeness.of(typed, List.of(name, GreekNames.spelled(name)));
+  }
+
+  /** The parameters of the function that the line defines, once its head is complete. */
+  private List<Name> parameters() {
+    LogicalLine line = at.line();
+    if (!line.definesFunction()) {
+      return List.of();
+    }
+    int close = line.closing(1);
+    if (at.index() < close) {
+      return List.of();
+    }
+    var names = new ArrayList<Name>();
+    for (int i = 2; i < close; i++) {
+      Token token = at.tokens().get(i);
+      Token before = at.tokens().get(i - 1);
+      if (token.isFreeName() && (i == 2 || before.is(Kind.COMMA))) {
+        String name = token.name().name();
+        String head = name + unitBehind(i);
+        names.add(new Name(name, false, () -> new Candidate(name, "param", "parameter " + head)));
+      }
+    }
+    return names;
+  }
+
+  private String unitBehind(int name) {
+    Token open = at.tokens().get(name + 1);
+    int close = open.is(Kind.OPEN_BRACKET) ? at.line().closing(name + 1) : -1;
+    return close < 0
+        ? ""
+        : " " + at.between(open.span().start(), at.tokens().get(close).span().end());
+  }
+
+  private List<Name> defined() {
+    var names = new LinkedHashMap<String, Name>();
+    for (String name : sheet.scope().names()) {
+      names.put(name, new Name(name, false, () -> ofSheet(name)));
+    }
+    for (Map.Entry<String, LogicalLine> line : draft.own().entrySet()) {
+      names.computeIfAbsent(
+          line.getKey(), name -> new Name(name, false, () -> ofCell(name, line.getValue())));
+    }
+    return List.copyOf(names.values());
+  }
+
+  private Candidate ofSheet(String name) {
+    Optional<Quantity> quantity = sheet.quantity(name);
+    if (quantity.isPresent()) {
+      return new Candidate(name, "instance", detail(quantity.get()));
+    }
+    Optional<Meaning> meaning = sheet.scope().meaning(name);
+    if (meaning.orElse(null) instanceof Meaning.Function function) {
+      return new Candidate(name, "function", head(function));
+    }
+    return new Candidate(name, "instance", "has no value yet");
+  }
+
+  private static String detail(Quantity quantity) {
+    String value = QuantityText.value(quantity);
+    return quantity.kind().isEmpty() ? value : quantity.kind() + ", " + value;
+  }
+
+  private Candidate ofCell(String name, LogicalLine line) {
+    String text = draft.text(line).replaceAll("\\s+", " ");
+    String shown =
+        text.codePointCount(0, text.length()) > LONGEST_LINE
+            ? text.substring(0, text.offsetByCodePoints(0, LONGEST_LINE)) + "…"
+            : text;
+    return new Candidate(name, line.definesFunction() ? "function" : "instance", shown);
+  }
+
+  /** A function as its head would be written. */
+  private static String head(Meaning.Function function) {
+    return function.name()
+        + function.parameters().stream()
+            .map(parameter -> parameter.name() + bracket(parameter.unit()))
+            .collect(Collectors.joining(", ", "(", ")"))
+        + (function.chosen() ? bracket(function.unit()) : "");
+  }
+
+  private static String bracket(Unit unit) {
+    return unit.text().equals(UnitText.ONE) ? "" : " [" + unit.symbol() + "]";
+  }
+
+  private List<Name> atHand() {
+    var names = new ArrayList<Name>();
+    for (ConstantAtHand constant : ConstantAtHand.all()) {
+      names.add(new Name(constant.symbol(), true, () -> candidate(constant)));
+    }
+    for (FunctionFacts function : FunctionFacts.all()) {
+      names.add(
+          new Name(
+              function.name(),
+              true,
+              () -> new Candidate(function.name(), "function", function.head())));
+    }
+    return names;
+  }
+
+  private static Candidate candidate(ConstantAtHand constant) {
+    String unit = constant.unit().text().equals(UnitText.ONE) ? "" : " " + constant.unit().symbol();
+    return new Candidate(constant.symbol(), "constant", constant.value() + unit);
+  }
+}
