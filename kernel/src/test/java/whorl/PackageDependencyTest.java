@@ -37,7 +37,8 @@ class PackageDependencyTest {
           entry("assist", "report", "sheet", "eval", "check", "syntax", "diagnostic"),
           // A run of a note ends with values compared with those stored.
           entry("notebook", "java", "report", "sheet", "eval", "check", "syntax", "diagnostic"),
-          entry("page", "assist", "java", "report", "sheet", "eval", "syntax", "diagnostic"),
+          entry(
+              "page", "assist", "java", "report", "sheet", "eval", "check", "syntax", "diagnostic"),
           // A file is replaced in one step there.
           entry("install", "notebook"),
           entry("jupyter", "page", "assist", "diagnostic"),

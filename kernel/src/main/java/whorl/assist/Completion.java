@@ -24,6 +24,11 @@ public record Completion(int start, int end, List<Candidate> candidates) {
    */
   public record Candidate(String text, String type, String detail) {}
 
+  /** The same for a text before which others stand. */
+  public Completion movedBy(int offset) {
+    return new Completion(start + offset, end + offset, candidates);
+  }
+
   /** Nothing fits. */
   public static Completion none(int cursor) {
     return new Completion(cursor, cursor, List.of());

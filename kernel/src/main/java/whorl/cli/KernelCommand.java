@@ -33,7 +33,10 @@ final class KernelCommand implements Callable<Integer> {
     PlainLanguage language = java ? PlainLanguage.JAVA : PlainLanguage.SHEET;
     var kernel =
         new Kernel(
-            ConnectionFile.read(file), language, SheetPage::new, spec.commandLine().getErr());
+            ConnectionFile.read(file),
+            language,
+            () -> new whorl.page.LivePage(language),
+            spec.commandLine().getErr());
     ParentProcess.whenGone(System.getenv(), kernel::stop);
     kernel.run();
     return ExitStatus.HOLDS.code();

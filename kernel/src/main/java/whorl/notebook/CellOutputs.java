@@ -40,6 +40,6 @@ final class CellOutputs {
 
   /** The steps of a cell for people. */
   static CellReport report(CellRun run) {
-    return CellReport.of(run.source(), run.steps(), run.notices(), List.of());
+    return CellReport.of(run.source(), run.steps(), run.notices());
   }
 }

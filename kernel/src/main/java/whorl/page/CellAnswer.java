@@ -4,6 +4,12 @@ import java.util.List;
 
 /** How running a cell ended. */
 public sealed interface CellAnswer {
+  /** What an interrupted cell is said to have failed with. */
+  String INTERRUPTED = "Interrupted";
+
+  /** What an expression that gives nothing is said to have failed with. */
+  String NO_VALUE = "NoValue";
+
   /** Without error. */
   record Done() implements CellAnswer {}
 

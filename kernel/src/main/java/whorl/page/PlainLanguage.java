@@ -1,6 +1,6 @@
 package whorl.page;
 
-/** What cells without a first line of their own are written in. */
+/** What cells are written in; a page has one for those without a first line that says so. */
 public enum PlainLanguage {
   /** The sheet language; {@code %%java} begins a cell in Java. */
   SHEET,

@@ -23,7 +23,13 @@ public record CellReport(String html, String text, JsonObject record) {
         outcome.source(),
         outcome.steps(),
         outcome.notices().stream().map(Diagnostic::problem).toList(),
-        Recalculated.sentence(outcome).stream().toList());
+        Recalculated.of(List.of(outcome)),
+        List.of());
+  }
+
+  /** Sets steps that changed nothing elsewhere. */
+  public static CellReport of(Source source, List<Step> steps, List<String> notices) {
+    return of(source, steps, notices, Recalculated.NOTHING, List.of());
   }
 
   /**
@@ -32,10 +38,15 @@ public record CellReport(String html, String text, JsonObject record) {
    * @param source the text of the cell
    * @param steps its steps in order
    * @param notices sentences for the author that belong to no step, such as that a name hides a law
-   * @param elsewhere sentences about what the cell changed elsewhere
+   * @param elsewhere what the cell changed elsewhere
+   * @param more sentences about what happened besides
    */
   public static CellReport of(
-      Source source, List<Step> steps, List<String> notices, List<String> elsewhere) {
+      Source source,
+      List<Step> steps,
+      List<String> notices,
+      Recalculated elsewhere,
+      List<String> more) {
     List<Row> rows = steps.stream().map(StepRows::of).toList();
     var html = new ArrayList<Html>();
     var text = new ArrayList<String>();
@@ -43,14 +54,26 @@ public record CellReport(String html, String text, JsonObject record) {
       html.add(HtmlTable.of(rows, source));
       text.add(TextTable.of(rows, source));
     }
-    var sentences = new ArrayList<String>();
-    notices.forEach(notice -> sentences.add("Note: " + notice));
-    sentences.addAll(elsewhere);
-    for (String sentence : sentences) {
-      html.add(Html.styled("div", Look.NOTE, Html.text(sentence)));
-      text.addAll(TextWrap.wrap(sentence, TextTable.PAGE_WIDTH));
+    for (String notice : notices) {
+      add("Note: " + notice, html, text);
+    }
+    html.add(elsewhere.html());
+    text.addAll(elsewhere.text());
+    for (String sentence : more) {
+      add(sentence, html, text);
     }
     return new CellReport(
         Html.all(html).toString(), String.join("\n", text), NoteRecord.of(steps, List.of()));
+  }
+
+  private static void add(String sentence, List<Html> html, List<String> text) {
+    html.add(Html.styled("div", Look.NOTE, Html.text(sentence)));
+    text.addAll(TextWrap.wrap(sentence, TextTable.PAGE_WIDTH));
+  }
+
+  /** The same with a line on top that says whose steps they are. */
+  public CellReport headed(String heading) {
+    Html line = Html.styled("div", Look.HEADING, Html.text(heading));
+    return new CellReport(line + html, TextWrap.plain(heading) + "\n" + text, record);
   }
 }

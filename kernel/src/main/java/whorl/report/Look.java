@@ -26,8 +26,7 @@ final class Look {
 
   private static final String CELL =
       "text-align:left;vertical-align:baseline;line-height:1.4;font-weight:normal;";
-  private static final String HEAD =
-      CELL + "padding:3px 10px 3px 8px;font-size:82%;letter-spacing:0.06em";
+  static final String HEAD = CELL + "padding:3px 10px 3px 8px;font-size:82%;letter-spacing:0.06em";
   static final String QUANTITY = CELL + "padding:5px 10px 5px 8px;white-space:nowrap;";
   static final String RULE = CELL + "padding:5px 10px 5px 8px";
   static final String WITH = CELL + "padding:5px 10px 5px 8px;white-space:nowrap";
@@ -42,8 +41,13 @@ final class Look {
   static final String WHY = CELL + "padding:5px 4px 5px 10px;min-width:9em;border-left:" + HAIRLINE;
   static final String CARD = CELL + "padding:2px 8px 8px 14px;white-space:normal";
 
+  static final String SNUG_TABLE = "border-collapse:collapse;margin:2px 0 4px 0;font-size:100%";
+  static final String PLAIN_ROW = "background:transparent";
+  static final String SNUG = CELL + "padding:1px 18px 1px 0";
+
   static final String LINE = "display:block";
   static final String NOTE = "margin:4px 0 0 0;font-size:92%";
+  static final String HEADING = "margin:6px 0 2px 0;font-size:92%;letter-spacing:0.04em";
   static final String CAPTION = "margin:2px 0 0 0;font-size:85%;opacity:0.75";
   static final String QUIET = "opacity:0.75";
   static final String BOLD = "font-weight:bold";

@@ -102,6 +102,23 @@ public final class Sheet {
    *     what the cell defined
    */
   public CellOutcome publish(CellId cell, String label, List<PublishedFunction> functions) {
+    return publish(cell, label, functions, false);
+  }
+
+  /**
+   * The same for functions from what was typed in a console: a name that has its definition
+   * elsewhere is taken over.
+   *
+   * @param fresh an id of its own
+   * @param label how messages call it, as {@code [7]}
+   */
+  public CellOutcome publishFromConsole(
+      CellId fresh, String label, List<PublishedFunction> functions) {
+    return publish(fresh, label, functions, true);
+  }
+
+  private CellOutcome publish(
+      CellId cell, String label, List<PublishedFunction> functions, boolean typed) {
     if (functions.isEmpty()) {
       return withdraw(cell);
     }
@@ -121,7 +138,7 @@ public final class Sheet {
             var place = new Place(cell, nodes.size(), line);
             nodes.add(new Node(place, source, statement, functions.get(line - 1).routine()));
           }
-          return take(new Read(parsed, nodes), cell, label, source, false);
+          return take(new Read(parsed, nodes), cell, label, source, typed);
         });
   }
 
@@ -183,6 +200,11 @@ public final class Sheet {
   /** All that is known of a name; empty where it has no definition. */
   public Optional<NameCard> card(String name) {
     return facts.card(GreekNames.fold(name));
+  }
+
+  /** How messages call a cell that took effect. */
+  public Optional<String> label(CellId cell) {
+    return Optional.ofNullable(contents.cell(cell)).map(CellContent::label);
   }
 
   /** The text of a cell that took effect. */

@@ -401,7 +401,7 @@ final class SampleNote {
   public static void main(String[] arguments) throws java.io.IOException {
     SampleNote note = flywheel();
     CellReport report =
-        CellReport.of(note.source, note.steps, List.of("I hides the law of that name"), List.of());
+        CellReport.of(note.source, note.steps, List.of("I hides the law of that name"));
     java.nio.file.Files.writeString(java.nio.file.Path.of(arguments[0]), report.html());
     System.out.println(report.text());
   }
