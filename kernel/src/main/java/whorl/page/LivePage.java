@@ -16,6 +16,7 @@ import whorl.report.DefinitionList;
 import whorl.report.ErrorText;
 import whorl.sheet.CellId;
 import whorl.sheet.CellOutcome;
+import whorl.sheet.Progress;
 import whorl.sheet.PublishedFunction;
 import whorl.sheet.Sheet;
 import whorl.sheet.Step;
@@ -66,11 +67,15 @@ public final class LivePage implements Page {
   }
 
   private CellAnswer sheet(Turn turn, String text) {
-    return live.settle(
-        turn,
+    var progress = new ProgressBar(turn.front(), turn.cell().id() + "/progress");
+    sheet.onProgress(progress);
+    CellOutcome outcome =
         turn.isOnPage()
             ? sheet.run(turn.cell(), turn.label(), text)
-            : sheet.runFromConsole(turn.cell(), turn.label(), text));
+            : sheet.runFromConsole(turn.cell(), turn.label(), text);
+    sheet.onProgress(Progress.UNWATCHED);
+    progress.end();
+    return live.settle(turn, outcome);
   }
 
   private CellAnswer commands(Turn turn, String text) {

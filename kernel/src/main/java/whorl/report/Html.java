@@ -88,6 +88,11 @@ final class Html {
             + ">");
   }
 
+  /** A bar that shows how far something has come. */
+  static Html progress(int done, int total) {
+    return new Html("<progress value=\"" + done + "\" max=\"" + total + "\"></progress>");
+  }
+
   /** Several pieces, one behind another. */
   static Html all(Html... pieces) {
     var joined = new StringBuilder();

@@ -36,7 +36,7 @@ public final class Sheet {
   private final Contents contents = new Contents();
   private final Facts facts = new Facts(contents);
   private final LongSupplier clock;
-  private Progress progress = (done, total) -> {};
+  private Progress progress = Progress.UNWATCHED;
   private long evaluations;
 
   /** An empty sheet. */
