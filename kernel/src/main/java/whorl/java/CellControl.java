@@ -115,6 +115,6 @@ final class CellControl implements ExecutionControl {
 
   @Override
   public void close() {
-    thread.get().close();
+    // The thread serves the next session.
   }
 }

@@ -7,22 +7,36 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
+import whorl.check.Routine;
 import whorl.sheet.PublishedFunction;
 import whorl.sheet.Quantity;
 
 /** A run of a cell: where it shows, and what passed between it and the sheet. */
 final class CellRun {
+  /** What is said to code that outlives its cell. */
+  static final String OVER =
+      "The sheet can be read and given functions only while a cell runs. Read a value in the cell,"
+          + " and keep it in a variable; give a function what it needs as an argument.";
+
   private final JavaOutput output;
   private final SheetReading sheet;
+  private final Function<SheetFunction, Routine> routines;
   private final Map<String, Optional<Quantity>> reads = new LinkedHashMap<>();
   private final List<PublishedFunction> functions = new ArrayList<>();
   private final Set<String> shown = ConcurrentHashMap.newKeySet();
   private boolean over;
 
-  CellRun(JavaOutput output, SheetReading sheet) {
+  /**
+   * A run.
+   *
+   * @param routines makes a routine of the sheet of a function in Java
+   */
+  CellRun(JavaOutput output, SheetReading sheet, Function<SheetFunction, Routine> routines) {
     this.output = output;
     this.sheet = sheet;
+    this.routines = routines;
   }
 
   /** The run that the code of the current thread belongs to. */
@@ -40,17 +54,20 @@ final class CellRun {
     return reads.computeIfAbsent(name, sheet::quantity);
   }
 
+  /** Names of the sheet that are spelled like one that has no value. */
+  List<String> near(String name) {
+    return sheet.near(name);
+  }
+
   /** Takes a function for the sheet. */
-  synchronized void publish(PublishedFunction function) {
+  synchronized void publish(String head, SheetFunction function) {
     requireRunning();
-    functions.add(function);
+    functions.add(new PublishedFunction(head, routines.apply(function)));
   }
 
   private void requireRunning() {
     if (over) {
-      throw new IllegalStateException(
-          "The sheet can be read and given functions only while a cell runs; this code runs later."
-              + " Read the value in the cell, and keep it in a variable.");
+      throw new IllegalStateException(OVER);
     }
   }
 

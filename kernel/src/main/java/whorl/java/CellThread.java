@@ -42,9 +42,8 @@ final class CellThread {
   private boolean shielded;
   private long deadline;
 
-  CellThread(ClassLoader loader) {
+  CellThread() {
     thread.setDaemon(true);
-    thread.setContextClassLoader(loader);
     thread.start();
   }
 
@@ -58,6 +57,11 @@ final class CellThread {
   /** The run that the code belongs to; none once it was left behind. */
   Optional<CellRun> run() {
     return left ? Optional.empty() : Optional.ofNullable(run);
+  }
+
+  /** Lets libraries that the code calls find its classes. */
+  void use(ClassLoader loader) {
+    thread.setContextClassLoader(loader);
   }
 
   /** Begins a run, which may consist of several calls. */
@@ -102,7 +106,7 @@ final class CellThread {
     notifyAll();
   }
 
-  /** Ends the thread, as far as its code allows. */
+  /** Ends the thread, as far as its code lets it. */
   synchronized void close() {
     left = true;
     Interruption.raise(this);

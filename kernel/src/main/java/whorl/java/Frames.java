@@ -49,6 +49,17 @@ final class Frames {
     return WRAPPER.matcher(text).replaceAll("");
   }
 
+  /** What an exception says and the line of a cell from which it came, in one line. */
+  String summary(Throwable thrown) {
+    String place =
+        Arrays.stream(thrown.getStackTrace())
+            .flatMap(frame -> origins.of(frame).stream())
+            .findFirst()
+            .map(known -> " (" + known.text().label() + ", line " + known.line() + ")")
+            .orElse("");
+    return words(thrown).lines().findFirst().orElse("") + place;
+  }
+
   /** The innermost line of a text from which an exception came. */
   Optional<Integer> line(Throwable thrown, JavaText text) {
     return Arrays.stream(thrown.getStackTrace())
@@ -98,7 +109,7 @@ final class Frames {
   private static List<String> library(List<StackTraceElement> frames) {
     List<String> lines =
         frames.stream()
-            .filter(frame -> !frame.getClassName().startsWith("whorl.java."))
+            .filter(frame -> !frame.getClassName().startsWith("whorl."))
             .map(frame -> "at " + frame)
             .toList();
     if (lines.size() <= MOST_OF_LIBRARIES) {

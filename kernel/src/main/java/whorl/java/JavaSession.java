@@ -6,6 +6,7 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutionException;
+import java.util.function.Supplier;
 import jdk.jshell.DeclarationSnippet;
 import jdk.jshell.JShell;
 import jdk.jshell.MethodSnippet;
@@ -41,7 +42,8 @@ final class JavaSession implements AutoCloseable {
           "java.util.prefs.*",
           "java.util.regex.*",
           "java.util.stream.*",
-          "static " + BaseNotebookStatics.class.getName() + ".*");
+          "static " + BaseNotebookStatics.class.getName() + ".*",
+          "static " + JavaSheet.class.getName() + ".*");
 
   static {
     // The display library logs, and SLF4J would tell the user that nobody reads it. A binding on
@@ -50,22 +52,31 @@ final class JavaSession implements AutoCloseable {
   }
 
   private final CellLoader loader = new CellLoader();
-  private final CellControl control = new CellControl(loader, this::thread);
+  private final Supplier<CellThread> thread;
+  private final CellControl control;
   private final JShell shell;
   private final SourceCodeAnalysis analysis;
   private final Origins origins;
+  private final Frames frames;
   private final JavaErrors errors;
   private final NotebookKernel kernel;
-  private volatile CellThread thread = new CellThread(loader);
 
   /** A value to be shown, which may be null. */
   private record Value(@Nullable Object object) {}
 
-  JavaSession() {
+  /**
+   * A session without declarations.
+   *
+   * @param thread where code of cells runs; now and then another
+   */
+  JavaSession(Supplier<CellThread> thread) {
+    this.thread = thread;
+    control = new CellControl(loader, thread);
     shell = JShell.builder().executionEngine(new Engine(control), Map.of()).build();
     analysis = shell.sourceCodeAnalysis();
     origins = new Origins(analysis);
-    errors = new JavaErrors(new Frames(origins));
+    frames = new Frames(origins);
+    errors = new JavaErrors(frames);
     kernel = new NotebookKernel(this);
     IMPORTS.forEach(name -> shell.eval("import " + name + ";"));
   }
@@ -82,21 +93,17 @@ final class JavaSession implements AutoCloseable {
     }
   }
 
-  CellThread thread() {
-    return thread;
+  Frames frames() {
+    return frames;
   }
 
   ClassLoader loader() {
     return loader;
   }
 
-  /** Goes on with another thread, for the code on this one does not end. */
-  void leaveThread() {
-    thread = new CellThread(loader);
-  }
-
   /** Runs a text and shows its value. */
   void run(JavaText text, CellRun run) throws Failure, Stop {
+    thread.get().use(loader);
     kernel.install();
     Optional<Value> value = evaluate(text);
     if (value.isPresent() && !run.isShown(value.get().object())) {
@@ -118,11 +125,12 @@ final class JavaSession implements AutoCloseable {
    * @return its value; null if it has none
    */
   @Nullable Object evaluateWithin(String code) {
-    if (CellThread.current().filter(thread::equals).isEmpty()) {
+    if (CellThread.current().filter(thread.get()::equals).isEmpty()) {
       throw new IllegalStateException("Code can be run only by the cell that runs.");
     }
     try {
       return thread
+          .get()
           .shielded(() -> evaluate(new JavaText("the code", code)))
           .map(Value::object)
           .orElse(null);
@@ -166,7 +174,7 @@ final class JavaSession implements AutoCloseable {
     if (stop.isPresent()) {
       throw stop.get();
     }
-    if (thread.isStopping()) {
+    if (thread.get().isStopping()) {
       throw new Stop(Stop.Ending.ENDED);
     }
     if (event.status() == Status.REJECTED) {
@@ -236,12 +244,12 @@ final class JavaSession implements AutoCloseable {
   }
 
   private void tell(String notice) {
-    thread.run().ifPresent(run -> run.output().print(JavaOutput.Stream.ERR, notice + "\n"));
+    thread.get().run().ifPresent(run -> run.output().print(JavaOutput.Stream.ERR, notice + "\n"));
   }
 
   private <T> T call(Callable<T> task, JavaText text, Span place) throws Failure, Stop {
     try {
-      return thread.call(task);
+      return thread.get().call(task);
     } catch (Stop stop) {
       throw stop;
     } catch (Failure failure) {

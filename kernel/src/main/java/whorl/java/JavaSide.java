@@ -1,12 +1,16 @@
 package whorl.java;
 
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
+import java.util.concurrent.locks.ReentrantLock;
 import org.jspecify.annotations.Nullable;
+import whorl.check.Routine;
+import whorl.check.RoutineFailure;
 
 /**
  * The Java cells of a page. JShell starts with the first that runs. One thread at a time uses it,
@@ -29,10 +33,15 @@ public final class JavaSide implements AutoCloseable {
             thread.setDaemon(true);
             return thread;
           });
-  private volatile @Nullable JavaSession session;
+
+  /** A cell or a function at a time. */
+  private final ReentrantLock turn = new ReentrantLock();
+
+  private volatile CellThread thread = new CellThread();
   private volatile boolean asked;
 
   // Known to the thread of the Java side only.
+  private @Nullable JavaSession session;
   private boolean atHome;
 
   /**
@@ -45,20 +54,24 @@ public final class JavaSide implements AutoCloseable {
   }
 
   /**
-   * Runs a cell, and waits for it. An interrupt of the thread that waits ends the cell.
+   * Runs a cell, and waits for it. An interrupt of the thread that waits is one of the cell.
    *
    * @param label how messages call the cell, as {@code cell [2]}
    * @param code its text, with or without a first line {@code %%java}
    */
   public JavaOutcome run(String label, String code, JavaOutput output) {
     asked = false;
-    var run = new CellRun(output, sheet);
-    return await(() -> run(new JavaText(label, code), run));
+    JavaOutcome outcome = await(() -> run(new JavaText(label, code), output));
+    if (outcome instanceof JavaOutcome.Interrupted) {
+      Thread.interrupted();
+    }
+    return outcome;
   }
 
-  private JavaOutcome run(JavaText text, CellRun run) {
+  private JavaOutcome run(JavaText text, JavaOutput output) {
     JavaSession current = session();
-    CellThread thread = current.thread();
+    var run = new CellRun(output, sheet, function -> routine(function, current.frames()));
+    turn.lock();
     thread.begin(run);
     if (asked) {
       thread.interrupt();
@@ -69,29 +82,26 @@ public final class JavaSide implements AutoCloseable {
     } catch (Failure failure) {
       return new JavaOutcome.Failed(failure.name(), text.source(), failure.errors(), run.reads());
     } catch (Stop stop) {
-      return interrupted(stop, current);
+      return interrupted(stop.ending());
     } finally {
       run.end();
       thread.end();
+      turn.unlock();
     }
   }
 
-  private JavaOutcome interrupted(Stop stop, JavaSession current) {
-    return switch (stop.ending()) {
-      case ENDED -> new JavaOutcome.Interrupted(false, "");
-      case UNREACHED -> {
-        current.leaveThread();
-        yield new JavaOutcome.Interrupted(false, LEFT_BEHIND);
-      }
-      case IGNORED -> {
-        current.close();
-        session = null;
-        yield new JavaOutcome.Interrupted(true, RESTARTED);
-      }
-    };
+  private JavaOutcome interrupted(Stop.Ending ending) {
+    if (ending == Stop.Ending.ENDED) {
+      return new JavaOutcome.Interrupted(false, "");
+    }
+    thread = new CellThread();
+    if (ending == Stop.Ending.UNREACHED) {
+      return new JavaOutcome.Interrupted(false, LEFT_BEHIND);
+    }
+    closeSession();
+    return new JavaOutcome.Interrupted(true, RESTARTED);
   }
 
-  /** The session; called on the thread of the Java side only. */
   private JavaSession session() {
     JavaSession current = session;
     if (current == null) {
@@ -99,19 +109,51 @@ public final class JavaSide implements AutoCloseable {
         SystemStreams.open();
         atHome = true;
       }
-      current = new JavaSession();
+      current = new JavaSession(() -> thread);
       session = current;
     }
     return current;
   }
 
+  private void closeSession() {
+    JavaSession current = session;
+    if (current != null) {
+      current.close();
+      session = null;
+    }
+  }
+
+  private Routine routine(SheetFunction function, Frames frames) {
+    return arguments -> {
+      try {
+        turn.lockInterruptibly();
+      } catch (InterruptedException e) {
+        Thread.currentThread().interrupt();
+        throw RoutineFailure.ofInterrupt();
+      }
+      thread.begin();
+      try {
+        return thread.call(() -> function.apply(arguments));
+      } catch (Stop stop) {
+        if (stop.ending() != Stop.Ending.ENDED) {
+          thread = new CellThread();
+        }
+        throw RoutineFailure.ofInterrupt();
+      } catch (ExecutionException e) {
+        throw new RoutineFailure(frames.summary(Objects.requireNonNullElse(e.getCause(), e)));
+      } catch (Exception e) {
+        throw new RoutineFailure(frames.summary(e));
+      } finally {
+        thread.end();
+        turn.unlock();
+      }
+    };
+  }
+
   /** Ends the cell or the function that runs, if one does; from any thread. */
   public void interrupt() {
     asked = true;
-    JavaSession current = session;
-    if (current != null) {
-      current.thread().interrupt();
-    }
+    thread.interrupt();
   }
 
   private <T> T await(Callable<T> task) {
@@ -141,11 +183,7 @@ public final class JavaSide implements AutoCloseable {
     interrupt();
     await(
         () -> {
-          JavaSession current = session;
-          if (current != null) {
-            current.close();
-            session = null;
-          }
+          closeSession();
           if (atHome) {
             SystemStreams.close();
             atHome = false;
@@ -153,5 +191,6 @@ public final class JavaSide implements AutoCloseable {
           return Optional.empty();
         });
     control.shutdown();
+    thread.close();
   }
 }

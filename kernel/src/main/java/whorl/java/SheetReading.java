@@ -1,5 +1,6 @@
 package whorl.java;
 
+import java.util.List;
 import java.util.Optional;
 import whorl.sheet.Quantity;
 
@@ -8,4 +9,9 @@ import whorl.sheet.Quantity;
 public interface SheetReading {
   /** What a name stands for, or empty if it has no value. */
   Optional<Quantity> quantity(String name);
+
+  /** Names that are spelled like one that has no value; none if that is not known. */
+  default List<String> near(String name) {
+    return List.of();
+  }
 }
