@@ -24,6 +24,14 @@ public final class Assistant {
     return Completer.complete(sheet, text, within(text, cursor));
   }
 
+  /**
+   * Whether a console may run a text as it is: not while a parenthesis is open, a line ends in an
+   * operator, or a block has no rows or may get more. An empty line puts an end to all of that.
+   */
+  public static Completeness completeness(String text) {
+    return Readiness.of(text);
+  }
+
   /** A place in a text that does not lie in the middle of a character. */
   private static int within(String text, int cursor) {
     int place = Math.max(0, Math.min(cursor, text.length()));
