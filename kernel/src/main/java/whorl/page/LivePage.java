@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.UUID;
+import whorl.assist.Assistant;
 import whorl.assist.Completeness;
 import whorl.assist.Completion;
 import whorl.diagnostic.Source;
@@ -31,6 +32,7 @@ public final class LivePage implements Page {
   private final JavaReads reads = new JavaReads();
   private final LiveSheet live = new LiveSheet(sheet, reads);
   private final JavaSide java = new JavaSide(sheet::quantity);
+  private final Assistant assistant = new Assistant(sheet);
   private final Interruption interruption = new Interruption();
 
   /** Inputs of a console bear no ids; those of the next kernel must not be taken for them. */
@@ -203,12 +205,19 @@ public final class LivePage implements Page {
 
   @Override
   public Completion complete(String code, int cursor) {
-    return Completion.none(cursor);
+    CellText text = CellText.of(code, language);
+    if (text.language() == PlainLanguage.JAVA || !text.holds(cursor)) {
+      return Completion.none(cursor);
+    }
+    return assistant.complete(text.body(), cursor - text.offset()).movedBy(text.offset());
   }
 
   @Override
   public Completeness completeness(String code) {
-    return new Completeness.Unknown();
+    CellText text = CellText.of(code, language);
+    return text.language() == PlainLanguage.JAVA
+        ? new Completeness.Unknown()
+        : Assistant.completeness(text.body());
   }
 
   @Override

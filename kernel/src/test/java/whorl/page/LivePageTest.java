@@ -125,11 +125,44 @@ class LivePageTest {
   }
 
   @Test
+  void functionPublishedFromJavaIsPartOfTheSheet() {
+    runsWithoutError("a", "v = drag(3 m/s)");
+    holds(shown.text("a"), "waits for drag");
+    runsWithoutError("b", "%%java\nsheet.function(\"drag(v [m/s]) [N]\", v -> 2 * v * v);");
+    holds(shown.text("a"), "18 N");
+    runsWithoutError("b", "%%java\nsheet.function(\"drag(v [m/s]) [N]\", v -> 3 * v * v);");
+    holds(shown.text("a"), "27 N");
+    holds(shown.text("b"), "now v = 27 N, was 18 N");
+    holds(error("c", "x = drag(3 kg)"), "drag");
+    shown.delete("b");
+    runsWithoutError("d", "k = 1");
+    holds(shown.text("a"), "waits for drag");
+  }
+
+  @Test
+  void cellInJavaThatReadSomethingElseSinceIsNamed() {
+    runsWithoutError("a", "n [rpm] = 6000");
+    runsWithoutError("b", "%%java\nSystem.out.println(sheet.value(\"n\", \"rpm\"));");
+    holds(shown.text("b"), "6000.0");
+    runsWithoutError("a", "n [rpm] = 7000");
+    holds(shown.text("a"), "Changed since Java used it, so run again: cell [2] read n.");
+    runsWithoutError("c", "k = 3");
+    assertFalse(shown.text("c").contains("Java"), shown.text("c"));
+    runsWithoutError("b", "%%java\nSystem.out.println(sheet.value(\"n\", \"rpm\"));");
+    holds(shown.text("b"), "7000.0");
+  }
+
+  @Test
   void consoleRedefinesPlainly() {
     shown.type("n [rpm] = 6000");
     shown.type("E = 1/2*41.72 kg·m²*n^2");
     String text = shown.type("n [rpm] = 7000").get(0).text();
     holds(text, "7000 rpm", "now E ≈");
+    shown.type("%%java\nsheet.function(\"twice(x) [1]\", x -> 2 * x);");
+    shown.type("y = twice(3)");
+    String again =
+        shown.type("%%java\nsheet.function(\"twice(x) [1]\", x -> 2.5 * x);").get(0).text();
+    holds(again, "now y = 7.5, was 6");
   }
 
   @Test

@@ -18,7 +18,7 @@ import org.junit.jupiter.params.provider.ValueSource;
  * from the first to the last. Only pages whose every cell last ran without error are compared.
  */
 class RandomPagesTest {
-  private static final int EDITS = 120;
+  private static final int EDITS = 80;
 
   /** What a user may write into a cell; together they use and define each other's names. */
   private static final List<String> TEXTS =
@@ -48,7 +48,7 @@ class RandomPagesTest {
           "this is no statement");
 
   @ParameterizedTest
-  @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12})
+  @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8})
   void restartAndRunAllGivesThePageThatLiveEditingGave(long seed) {
     var random = new Random(seed);
     int compared = 0;
@@ -132,7 +132,9 @@ class RandomPagesTest {
       // The last good value, now stale, is known to the live page only.
       return "does not stand";
     }
-    // A table ends with its second rule, and the number of a cell counts runs.
-    return text.substring(0, text.lastIndexOf('─') + 1).replaceAll("\\[\\d+]", "[]");
+    // A table ends with its second rule, and the number of a cell, which counts runs, may widen it.
+    return text.substring(0, text.lastIndexOf('─') + 1)
+        .replaceAll("\\[\\d+]", "[]")
+        .replaceAll("([ ─])+", "$1");
   }
 }
