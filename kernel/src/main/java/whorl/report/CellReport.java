@@ -47,7 +47,7 @@ public record CellReport(String html, String text, JsonObject record) {
       List<String> notices,
       Recalculated elsewhere,
       List<String> more) {
-    List<Row> rows = steps.stream().map(StepRows::of).toList();
+    List<Row> rows = StepRows.of(steps);
     var html = new ArrayList<Html>();
     var text = new ArrayList<String>();
     if (!rows.isEmpty()) {

@@ -21,10 +21,15 @@ import whorl.units.UnitText;
 final class StepRows implements Step.Cases<Row> {
   private static final int PERCENT_DIGITS = 3;
 
+  /** The doubts that the last row with any said. */
+  private List<String> lastDoubts = List.of();
+
   private StepRows() {}
 
-  static Row of(Step step) {
-    return step.match(new StepRows());
+  /** The rows of one table. */
+  static List<Row> of(List<Step> steps) {
+    var rows = new StepRows();
+    return steps.stream().map(step -> step.match(rows)).toList();
   }
 
   @Override
@@ -69,7 +74,7 @@ final class StepRows implements Step.Cases<Row> {
         shown);
   }
 
-  private static Row valued(
+  private Row valued(
       Line quantity, List<Line> rule, List<Given> with, Quantity gives, boolean input, Step step) {
     Amount amount = Amounts.of(gives);
     var further = new ArrayList<Line>();
@@ -121,7 +126,7 @@ final class StepRows implements Step.Cases<Row> {
         statement.bracket());
   }
 
-  private static Row ofFunction(
+  private Row ofFunction(
       Step step,
       Line head,
       String kind,
@@ -186,8 +191,7 @@ final class StepRows implements Step.Cases<Row> {
     return judged("assume", condition, assumed.verdict(), assumed.with(), assumed);
   }
 
-  private static Row judged(
-      String word, Expr condition, Verdict verdict, List<Given> with, Step step) {
+  private Row judged(String word, Expr condition, Verdict verdict, List<Given> with, Step step) {
     var gives = new ArrayList<Line>();
     gives.add(state(verdict.holds()));
     boolean several = verdict.comparisons().size() > 1;
@@ -369,7 +373,7 @@ final class StepRows implements Step.Cases<Row> {
   /**
    * A row for a statement that has no result: what it says stands, with words in place of a value.
    */
-  private static Row ofStatement(Step step, Tone tone, List<Line> gives) {
+  private Row ofStatement(Step step, Tone tone, List<Line> gives) {
     StatementHead head = StatementHead.of(step.statement());
     return new Row(
         tone,
@@ -399,18 +403,28 @@ final class StepRows implements Step.Cases<Row> {
     return new Line(pieces);
   }
 
-  private static List<Line> why(Step step) {
+  private List<Line> why(Step step) {
     var lines = new ArrayList<Line>();
     if (!step.doubts().isEmpty()) {
-      lines.add(
-          Line.of(
-              new Piece.State("rests on an assumption that fails:", Tone.DOUBTFUL),
-              Piece.words(" " + String.join("; ", step.doubts()))));
+      lines.add(doubts(step.doubts()));
     }
     if (!step.statement().remark().isEmpty()) {
       lines.add(Line.of(Piece.words(step.statement().remark())));
     }
     return lines;
+  }
+
+  /** The doubts in full, but for those that the row above has just said. */
+  private Line doubts(List<String> doubts) {
+    boolean again = doubts.equals(lastDoubts);
+    lastDoubts = doubts;
+    if (again) {
+      String what = doubts.size() == 1 ? "that assumption" : "those assumptions";
+      return Line.of(new Piece.State("rests on " + what + " too", Tone.DOUBTFUL));
+    }
+    return Line.of(
+        new Piece.State("rests on an assumption that fails:", Tone.DOUBTFUL),
+        Piece.words(" " + String.join("; ", doubts)));
   }
 
   static Line symbol(String name, boolean vector) {

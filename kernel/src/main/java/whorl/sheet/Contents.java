@@ -23,6 +23,7 @@ final class Contents {
   private final Graph graph = new Graph();
   private final Results results = Results.of(graph);
   private Doubts doubts = Doubts.NONE;
+  private SimilarNames near = new SimilarNames(graph.names());
 
   Graph graph() {
     return graph;
@@ -87,17 +88,15 @@ final class Contents {
     }
   }
 
-  /** Looks anew which statements rest on an assumption that fails. */
-  void judgeAssumptions() {
-    doubts = Doubts.in(graph, results);
+  /** Notes the doubts that are left by a change that was done. */
+  void settle(Doubts left) {
+    doubts = left;
+    near = new SimilarNames(graph.names());
   }
 
   /** The steps of a cell. */
   List<Step> steps(CellContent content) {
-    var maker = new StepMaker(results, content.label());
-    var near = new SimilarNames(graph.names());
-    return content.nodes().stream()
-        .map(node -> maker.step(node, results.of(node).orElseThrow(), doubts.on(node), near))
-        .toList();
+    var maker = new StepMaker(results, content.label(), doubts, near);
+    return content.nodes().stream().map(maker::step).toList();
   }
 }

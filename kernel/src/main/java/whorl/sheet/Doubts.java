@@ -1,14 +1,14 @@
 package whorl.sheet;
 
-import java.util.Collections;
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import java.util.SortedSet;
-import java.util.TreeSet;
 import java.util.stream.Stream;
+import whorl.diagnostic.Interruption;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 
@@ -17,33 +17,60 @@ final class Doubts {
   /** No doubts. */
   static final Doubts NONE = new Doubts(Map.of());
 
-  private final Map<Node, SortedSet<String>> doubts;
+  /** A statement may rest on more failing assumptions than anybody would read. */
+  private static final int MOST_NAMED = 10;
 
-  private Doubts(Map<Node, SortedSet<String>> doubts) {
+  private record Failing(Node assumption, String text) {}
+
+  private final Map<Node, List<List<Failing>>> doubts;
+
+  private Doubts(Map<Node, List<List<Failing>>> doubts) {
     this.doubts = doubts;
   }
 
-  /** The doubts on a sheet as it stands. */
+  /** The doubts on a sheet with these results. */
   static Doubts in(Graph graph, Results results) {
-    var doubts = new LinkedHashMap<Node, SortedSet<String>>();
+    // Assumptions on the same names cast doubt on the same statements.
+    var failing = new LinkedHashMap<Set<String>, List<Failing>>();
     for (Node node : graph.assumptions()) {
       if (node.statement() instanceof Statement.Assumption assumption
           && results.of(node).orElse(null) instanceof Result.Judged judged
           && !judged.verdict().holds()) {
-        String text = Printer.expression(assumption.condition());
-        for (Node doubtful : graph.downstream(node.uses())) {
-          if (doubtful != node) {
-            doubts.computeIfAbsent(doubtful, key -> new TreeSet<>()).add(text);
-          }
-        }
+        failing
+            .computeIfAbsent(node.uses(), names -> new ArrayList<>())
+            .add(new Failing(node, Printer.expression(assumption.condition())));
       }
     }
+    failing.values().forEach(alike -> alike.sort(Comparator.comparing(Failing::text)));
+    var doubts = new LinkedHashMap<Node, List<List<Failing>>>();
+    failing.forEach(
+        (names, assumptions) -> {
+          Interruption.poll();
+          for (Node doubtful : graph.downstream(names)) {
+            doubts.computeIfAbsent(doubtful, key -> new ArrayList<>()).add(assumptions);
+          }
+        });
     return new Doubts(doubts);
   }
 
-  /** The failing assumptions that a statement rests on, as written. */
+  /**
+   * The failing assumptions that a statement rests on, as written, the first ten of the alphabet.
+   */
   List<String> on(Node node) {
-    return List.copyOf(doubts.getOrDefault(node, Collections.emptySortedSet()));
+    return doubts.getOrDefault(node, List.of()).stream()
+        .flatMap(alike -> firstOf(alike, node))
+        .distinct()
+        .sorted()
+        .limit(MOST_NAMED)
+        .toList();
+  }
+
+  private static Stream<String> firstOf(List<Failing> alike, Node node) {
+    return alike.stream()
+        .filter(failing -> failing.assumption() != node)
+        .map(Failing::text)
+        .distinct()
+        .limit(MOST_NAMED);
   }
 
   /** The statements on which the doubts are not what they were. */

@@ -15,6 +15,7 @@ import java.util.Optional;
 import java.util.Queue;
 import java.util.Set;
 import java.util.function.IntFunction;
+import java.util.function.Supplier;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -79,6 +80,12 @@ final class Edit {
    *     come
    */
   CellOutcome done(List<Diagnostic> faults, List<Diagnostic> notices, IntFunction<Pace> pace) {
+    return attempt(faults, notices, pace).get();
+  }
+
+  /** Tries it, and gives what to tell once the graph is as it is to be. */
+  private Supplier<CellOutcome> attempt(
+      List<Diagnostic> faults, List<Diagnostic> notices, IntFunction<Pace> pace) {
     Map<Node, Node> kept = kept();
     Set<Node> stays = identical(kept.values());
     List<Node> removed = leaving.stream().filter(node -> !stays.contains(node)).toList();
@@ -104,10 +111,11 @@ final class Edit {
       if (!faults.isEmpty() || !errors.isEmpty()) {
         return refused(faults, errors);
       }
+      Doubts doubts = Doubts.in(graph, staging);
       done = true;
-      return settled(affected, staging, notices);
+      return () -> settled(affected, staging, doubts, notices);
     } catch (Interruption interruption) {
-      return interrupted();
+      return this::interrupted;
     } finally {
       if (!done) {
         graph.remove(content.nodes());
@@ -202,13 +210,13 @@ final class Edit {
     return last instanceof Result.Broken broken ? broken.last() : null;
   }
 
-  private CellOutcome refused(List<Diagnostic> faults, List<Diagnostic> errors) {
+  private Supplier<CellOutcome> refused(List<Diagnostic> faults, List<Diagnostic> errors) {
     List<Diagnostic> first =
         Stream.concat(faults.stream(), errors.stream())
             .sorted(Comparator.comparingInt(error -> error.span().start()))
             .limit(MOST_ERRORS)
             .toList();
-    return CellOutcome.refused(content.source(), first, before(), attempted);
+    return () -> CellOutcome.refused(content.source(), first, before(), attempted);
   }
 
   private CellOutcome interrupted() {
@@ -228,7 +236,8 @@ final class Edit {
     return before == null ? List.of() : contents.steps(before);
   }
 
-  private CellOutcome settled(Set<Node> affected, Results staging, List<Diagnostic> notices) {
+  private CellOutcome settled(
+      Set<Node> affected, Results staging, Doubts doubts, List<Diagnostic> notices) {
     Results before = contents.results();
     var elsewhere = affected.stream().filter(node -> !isHere(node)).toList();
     var changes = new ArrayList<CellOutcome.Change>();
@@ -244,13 +253,12 @@ final class Edit {
     if (cell != null) {
       contents.put(cell, content);
     }
-    Doubts doubtsBefore = contents.doubts();
-    contents.judgeAssumptions();
     var refreshed = new LinkedHashSet<>(robbed);
-    Stream.concat(elsewhere.stream(), contents.doubts().differingFrom(doubtsBefore))
+    Stream.concat(elsewhere.stream(), doubts.differingFrom(contents.doubts()))
         .map(node -> node.place().cell())
         .filter(id -> !id.equals(cell))
         .forEach(refreshed::add);
+    contents.settle(doubts);
     var all = new ArrayList<>(notices);
     all.addAll(noticed());
     return new CellOutcome(

@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeMap;
 import whorl.syntax.Statement;
 
 /**
@@ -18,7 +19,7 @@ import whorl.syntax.Statement;
  * size of the sheet.
  */
 final class Graph {
-  private final Map<String, Node> definitions = new HashMap<>();
+  private final Map<String, Node> definitions = new TreeMap<>();
   private final Map<String, Set<Node>> users = new HashMap<>();
   private final Set<Node> assumptions = new LinkedHashSet<>();
 
@@ -51,6 +52,7 @@ final class Graph {
     return Optional.ofNullable(definitions.get(name));
   }
 
+  /** The names that have a definition, in alphabetical order. */
   Collection<String> names() {
     return definitions.keySet();
   }

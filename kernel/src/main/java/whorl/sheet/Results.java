@@ -78,7 +78,7 @@ final class Results implements Scope {
 
   @Override
   public List<String> names() {
-    return graph.names().stream().sorted().toList();
+    return List.copyOf(graph.names());
   }
 
   private static Meaning meaning(Result result) {

@@ -122,8 +122,8 @@ public final class Sheet {
     if (functions.isEmpty()) {
       return withdraw(cell);
     }
-    var source =
-        new Source(
+    Source source =
+        source(
             functions.stream()
                 .map(function -> function.head().strip().replaceAll("\\R", " "))
                 .collect(Collectors.joining("\n")));

@@ -1,9 +1,12 @@
 package whorl.sheet;
 
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.stream.Stream;
 import whorl.check.Vocabulary;
 
@@ -11,7 +14,13 @@ import whorl.check.Vocabulary;
 final class SimilarNames {
   private static final int MOST = 4;
 
+  private record Candidate(String name, String folded) {}
+
+  private record Near(String name, int distance) {}
+
   private final Collection<String> names;
+  private final List<Candidate> candidates = new ArrayList<>();
+  private final Map<String, List<String>> found = new HashMap<>();
 
   /** Looks among the names of a sheet and those at hand in every sheet. */
   SimilarNames(Collection<String> names) {
@@ -20,24 +29,37 @@ final class SimilarNames {
 
   /** Up to four names near to one, the nearest first; none if all are far. */
   List<String> to(String name) {
+    return found.computeIfAbsent(name, this::search);
+  }
+
+  private List<String> search(String name) {
+    if (candidates.isEmpty()) {
+      Stream.concat(names.stream(), Vocabulary.atHand().stream())
+          .map(other -> new Candidate(other, other.toLowerCase(Locale.ROOT)))
+          .forEach(candidates::add);
+    }
     // In a name of one or two letters any other name is near: only the case may differ.
     int reach = name.length() < 3 ? 0 : Math.max(1, name.length() / 3);
-    return Stream.concat(names.stream(), Vocabulary.atHand().stream())
-        .filter(candidate -> distance(name, candidate, reach) <= reach)
-        .sorted(
-            Comparator.<String>comparingInt(candidate -> distance(name, candidate, reach))
-                .thenComparing(Comparator.naturalOrder()))
+    String folded = name.toLowerCase(Locale.ROOT);
+    var near = new ArrayList<Near>();
+    for (Candidate candidate : candidates) {
+      int distance = distance(folded, candidate.folded(), reach);
+      if (distance <= reach) {
+        near.add(new Near(candidate.name(), distance));
+      }
+    }
+    return near.stream()
+        .sorted(Comparator.comparingInt(Near::distance).thenComparing(Near::name))
         .limit(MOST)
+        .map(Near::name)
         .toList();
   }
 
   /**
-   * Edits that turn one name into the other (a letter added, left out, changed, or two neighbours
-   * exchanged); a change of case alone counts as none, and more than {@code reach} as one more.
+   * Edits that turn one word into the other (a letter added, left out, changed, or two neighbours
+   * exchanged), and more than {@code reach} as one more.
    */
-  private static int distance(String from, String to, int reach) {
-    String a = from.toLowerCase(Locale.ROOT);
-    String b = to.toLowerCase(Locale.ROOT);
+  private static int distance(String a, String b, int reach) {
     if (Math.abs(a.length() - b.length()) > reach) {
       return reach + 1;
     }

@@ -18,8 +18,8 @@ public sealed interface Step {
   Statement statement();
 
   /**
-   * The assumptions, as written, that fail now and on whose names this step depends; empty where
-   * the argument stands.
+   * The assumptions, as written, that fail now and on whose names this step depends, ten at most;
+   * empty where the argument stands.
    */
   List<String> doubts();
 

@@ -1,6 +1,8 @@
 package whorl.sheet;
 
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import whorl.check.Checked;
 import whorl.check.InputForm;
 import whorl.syntax.Expr;
@@ -8,30 +10,38 @@ import whorl.syntax.Statement;
 
 /** Makes the step of a statement from what it came to. */
 final class StepMaker {
+  /** Further names that have no definition are not looked up: a text with so many is no sheet. */
+  private static final int MOST_SOUGHT = 10;
+
   private final Results results;
   private final String label;
+  private final Doubts allDoubts;
+  private final SimilarNames near;
+  private final Set<String> sought = new HashSet<>();
 
   /**
    * Makes the steps of a cell.
    *
    * @param label how messages call the cell
-   */
-  StepMaker(Results results, String label) {
-    this.results = results;
-    this.label = label;
-  }
-
-  /**
-   * The step of a statement.
-   *
+   * @param doubts on any statement
    * @param near names spelled like one that has no definition
    */
-  Step step(Node node, Result result, List<String> doubts, SimilarNames near) {
+  StepMaker(Results results, String label, Doubts doubts, SimilarNames near) {
+    this.results = results;
+    this.label = label;
+    this.allDoubts = doubts;
+    this.near = near;
+  }
+
+  /** The step of a statement. */
+  Step step(Node node) {
+    Result result = results.of(node).orElseThrow();
+    List<String> doubts = allDoubts.on(node);
     Place place = node.place();
     Statement statement = node.statement();
     if (result instanceof Result.Waiting waiting) {
       return new Step.Waiting(
-          place, statement, waiting.names(), waiting.names().stream().map(near::to).toList());
+          place, statement, waiting.names(), waiting.names().stream().map(this::near).toList());
     } else if (result instanceof Result.Broken broken) {
       return new Step.Broken(place, statement, broken.diagnostic(), broken.last());
     } else if (result instanceof Result.Callable callable) {
@@ -77,5 +87,12 @@ final class StepMaker {
 
   private List<Given> given(Statement statement, Checked checked) {
     return Givens.of(statement, checked, results);
+  }
+
+  private List<String> near(String name) {
+    if (sought.size() < MOST_SOUGHT) {
+      sought.add(name);
+    }
+    return sought.contains(name) ? near.to(name) : List.of();
   }
 }

@@ -3,6 +3,7 @@ package whorl.syntax;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.function.Predicate;
 import whorl.diagnostic.Diagnostic;
@@ -21,6 +22,9 @@ public final class Parser {
   /** A text longer than this, in code points, is refused as a whole. */
   public static final int LONGEST_TEXT = 1_000_000;
 
+  /** A text of more statements than this is refused as a whole. */
+  public static final int MOST_STATEMENTS = 10_000;
+
   private Parser() {}
 
   /**
@@ -33,9 +37,14 @@ public final class Parser {
   public static Parsed parse(Source source, Predicate<String> names, UnitWords units) {
     var messages = new SyntaxMessages(source);
     if (source.length() > LONGEST_TEXT) {
-      return tooLong(messages);
+      return refused(messages.textTooLong(LONGEST_TEXT));
     }
     LineSplitter.Split split = LineSplitter.split(Lexer.tokens(source, messages));
+    Optional<LogicalLine> tooMany =
+        split.lines().stream().filter(line -> !line.isIndented()).skip(MOST_STATEMENTS).findFirst();
+    if (tooMany.isPresent()) {
+      return refused(messages.tooManyStatements(tooMany.get().span(), MOST_STATEMENTS));
+    }
     Set<String> own = namesDefinedIn(split.lines());
     var errors = new ArrayList<Diagnostic>();
     var unitWords = new ArrayList<UnitWord>();
@@ -47,8 +56,8 @@ public final class Parser {
     return new Parsed(statements, split.remarks(), reported, unitWords);
   }
 
-  private static Parsed tooLong(SyntaxMessages messages) {
-    return new Parsed(List.of(), List.of(), List.of(messages.textTooLong(LONGEST_TEXT)), List.of());
+  private static Parsed refused(Diagnostic diagnostic) {
+    return new Parsed(List.of(), List.of(), List.of(diagnostic), List.of());
   }
 
   /**
@@ -60,7 +69,7 @@ public final class Parser {
   public static Parsed heads(Source source, Predicate<String> names, UnitWords units) {
     var messages = new SyntaxMessages(source);
     if (source.length() > LONGEST_TEXT) {
-      return tooLong(messages);
+      return refused(messages.textTooLong(LONGEST_TEXT));
     }
     var statements = new ArrayList<Statement>();
     var errors = new ArrayList<Diagnostic>();

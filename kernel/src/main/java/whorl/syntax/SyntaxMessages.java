@@ -194,6 +194,15 @@ final class SyntaxMessages {
         "Put long tables in a file: `data log from \"log.csv\": t [s], n [rpm]`");
   }
 
+  Diagnostic tooManyStatements(Span span, int most) {
+    return message(
+        "size",
+        span,
+        String.format(Locale.ROOT, "The text has more than %,d statements.", most),
+        "",
+        "Put them into several cells");
+  }
+
   // ---- Numbers ----
 
   Diagnostic numberPoint(Span span) {

@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
 import java.util.SplittableRandom;
+import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.w3c.dom.Element;
 import whorl.diagnostic.Diagnostic;
@@ -238,5 +239,53 @@ class CellReportTest {
     sheet.run(new CellId("a"), "cell [1]", "F = drag(3 km/h, 1 m², 1)");
     assertFalse(
         CellReport.of(sheet.run(new CellId("b"), "cell [2]", "x = 2")).record().has("published"));
+  }
+
+  @Test
+  void aFailingAssumptionIsNamedOnceForTheRowsThatFollow() {
+    var sheet = new Sheet();
+    String text =
+        """
+        n [rpm] = 6000
+        assume n <= 5000 rpm
+        a = 2 * n
+        b = 3 * n
+        k = 1
+        c = a + b
+        assume a <= 1 rpm
+        d = 4 * a
+        e = 4 * n""";
+    List<Row> rows = StepRows.of(sheet.run(new CellId("a"), "cell [1]", text).steps());
+    assertEquals(
+        List.of(
+            "",
+            "",
+            "rests on an assumption that fails: n ≤ 5000 rpm",
+            "rests on that assumption too",
+            "",
+            "rests on an assumption that fails: a ≤ 1 rpm; n ≤ 5000 rpm",
+            "rests on an assumption that fails: n ≤ 5000 rpm",
+            "rests on an assumption that fails: a ≤ 1 rpm; n ≤ 5000 rpm",
+            "rests on an assumption that fails: n ≤ 5000 rpm"),
+        rows.stream().map(CellReportTest::words).toList());
+  }
+
+  private static String words(Row row) {
+    return row.why().stream()
+        .flatMap(line -> line.pieces().stream())
+        .map(
+            piece ->
+                piece instanceof Piece.State state ? state.text() : ((Piece.Words) piece).text())
+        .collect(Collectors.joining());
+  }
+
+  @Test
+  void whatAChangeElsewhereStoppedIsSaid() {
+    var sheet = new Sheet();
+    sheet.run(new CellId("a"), "cell [1]", "n = 1");
+    sheet.run(new CellId("b"), "cell [2]", "m = 2 * n\ncheck m < 7");
+    assertEquals(
+        "Note: n is withdrawn from cell [1]; it was 1.\n" + "without result now: check m < 7, m",
+        CellReport.of(sheet.withdraw("n")).text());
   }
 }

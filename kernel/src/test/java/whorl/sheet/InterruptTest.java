@@ -2,16 +2,30 @@ package whorl.sheet;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.atomic.AtomicBoolean;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
+import whorl.check.Checker;
+import whorl.check.Meaning;
 import whorl.check.Routine;
 import whorl.check.RoutineFailure;
+import whorl.check.Scope;
+import whorl.check.Type;
 import whorl.diagnostic.Diagnostic;
+import whorl.diagnostic.Interruption;
+import whorl.diagnostic.Source;
 import whorl.eval.Value;
+import whorl.syntax.CatalogueWords;
+import whorl.syntax.Parser;
+import whorl.syntax.Statement;
+import whorl.units.Unit;
+import whorl.units.kind.Readings;
 
 /** An interrupted run changes nothing and says so; the next one works. */
 class InterruptTest {
@@ -159,10 +173,50 @@ class InterruptTest {
   }
 
   @Test
+  void theReadingOfALongLineEndsWhereItIsInterrupted() {
+    var source = new Source("x = 2 kg*g + 1 + 1 + 1");
+    assertThrows(
+        Interruption.class,
+        () ->
+            Parser.parse(
+                source,
+                name -> {
+                  Thread.currentThread().interrupt();
+                  return false;
+                },
+                CatalogueWords.STANDARD));
+    assertTrue(Thread.interrupted());
+  }
+
+  @Test
+  void theCheckOfALongLineEndsWhereItIsInterrupted() {
+    Statement line =
+        Parser.parse(new Source("x = a + 1 + 1"), name -> false, CatalogueWords.STANDARD)
+            .statements()
+            .get(0);
+    Scope scope =
+        new Scope() {
+          @Override
+          public Optional<Meaning> meaning(String name) {
+            Thread.currentThread().interrupt();
+            return Optional.of(
+                new Meaning.Quantity(new Type.Real(Readings.NUMBER), Unit.ONE, false));
+          }
+
+          @Override
+          public List<String> names() {
+            return List.of();
+          }
+        };
+    assertThrows(Interruption.class, () -> new Checker(scope).check(line));
+    assertTrue(Thread.interrupted());
+  }
+
+  @Test
   void progressIsToldOfALongRecalculationOnly() {
     long[] now = new long[1];
     var slow = new Sheet(() -> now[0]);
-    var told = new java.util.ArrayList<String>();
+    var told = new ArrayList<String>();
     slow.onProgress((done, total) -> told.add(done + " of " + total));
     slow.publish(
         JAVA,
