@@ -4,6 +4,7 @@ import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.stream.Collectors;
 import picocli.CommandLine;
@@ -13,7 +14,6 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 import picocli.CommandLine.UnmatchedArgumentException;
-import whorl.jupyter.KernelException;
 import whorl.notebook.NoteFileException;
 
 /** The {@code whorl} command. */
@@ -54,12 +54,15 @@ public final class Main implements Callable<Integer> {
 
   /** Runs the command, and returns its exit status. */
   static int run(PrintWriter out, PrintWriter err, String... args) {
-    return new CommandLine(new Main())
-        .setOut(out)
-        .setErr(err)
-        .setParameterExceptionHandler(Main::wrongCommand)
-        .setExecutionExceptionHandler(Main::failure)
-        .execute(args);
+    Optional<KernelStart> kernel = KernelStart.of(args);
+    return kernel.isPresent()
+        ? kernel.get().run(err)
+        : new CommandLine(new Main())
+            .setOut(out)
+            .setErr(err)
+            .setParameterExceptionHandler(Main::wrongCommand)
+            .setExecutionExceptionHandler(Main::failure)
+            .execute(args);
   }
 
   /** Without a command there is nothing to do. */
@@ -97,7 +100,7 @@ public final class Main implements Callable<Integer> {
 
   private static int failure(Exception e, CommandLine command, CommandLine.ParseResult parsed)
       throws Exception {
-    if (e instanceof NoteFileException || e instanceof KernelException) {
+    if (e instanceof NoteFileException) {
       command.getErr().println("whorl: " + e.getMessage());
       return ExitStatus.USAGE.code();
     }

@@ -4,7 +4,6 @@ import com.google.gson.JsonArray;
 import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
-import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -71,7 +70,7 @@ final class Execution implements Handler {
     }
     var order = Order.of(request.content());
     var metadata = new JsonObject();
-    metadata.addProperty("started", Instant.now().toString());
+    metadata.addProperty("started", Session.now());
     if (order.remembered()) {
       count++;
       history.add(count, order.code());

@@ -3,7 +3,6 @@ package whorl.jupyter;
 import com.google.gson.JsonObject;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
-import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -29,6 +28,7 @@ public final class Kernel {
 
   private final Log log;
   private final Session session = new Session("kernel");
+  private final WireFormat format;
   private final Inbox shellInbox = new Inbox();
   private final Inbox controlInbox = new Inbox();
   private final Questions questions;
@@ -55,8 +55,8 @@ public final class Kernel {
       ConnectionFile connection, PlainLanguage language, Supplier<Page> pages, PrintWriter err)
       throws KernelException {
     log = new Log(err);
-    var format = new WireFormat(new Signatures(connection.key()));
-    sockets = new Sockets(connection, this::received, this::fail, log);
+    format = new WireFormat(new Signatures(connection.key()));
+    sockets = new Sockets(connection, new Arrivals(), this::fail, log);
     outbox = new Outbox(session, format, sockets, log);
     questions = new Questions(session, format, outbox, log);
     var info = new KernelInfo(language);
@@ -140,35 +140,6 @@ public final class Kernel {
     stop();
   }
 
-  private void received(Channel channel, List<byte[]> frames) {
-    switch (channel) {
-      case SHELL -> shellInbox.add(frames);
-      case CONTROL -> controlInbox.add(frames);
-      case STDIN -> questions.received(frames);
-      case IOPUB -> welcome(frames.get(0));
-      case HEARTBEAT -> throw new IllegalArgumentException("heartbeats are no messages");
-    }
-  }
-
-  /** Tells a front end that what is published from now on reaches it. */
-  private void welcome(byte[] subscription) {
-    if (subscription.length == 0 || subscription[0] != 1) {
-      return;
-    }
-    byte[] topic = Arrays.copyOfRange(subscription, 1, subscription.length);
-    var content = new JsonObject();
-    content.addProperty("subscription", new String(topic, StandardCharsets.UTF_8));
-    outbox.send(
-        Channel.IOPUB,
-        new Message(
-            List.of(topic),
-            session.header("iopub_welcome"),
-            new JsonObject(),
-            new JsonObject(),
-            content,
-            List.of()));
-  }
-
   private void interrupt(Request request) {
     interruptCell();
     request.succeed(new JsonObject());
@@ -212,5 +183,32 @@ public final class Kernel {
       Thread.currentThread().interrupt();
     }
     return !thread.isAlive();
+  }
+
+  /** Passes on what arrives at the sockets. */
+  private final class Arrivals implements Sockets.Receiver {
+    @Override
+    public void received(Channel channel, List<byte[]> frames) {
+      switch (channel) {
+        case SHELL -> shellInbox.add(frames);
+        case CONTROL -> controlInbox.add(frames);
+        case STDIN -> questions.received(frames);
+        case IOPUB, HEARTBEAT -> throw new IllegalArgumentException(channel.portName());
+      }
+    }
+
+    @Override
+    public List<byte[]> welcome(byte[] topic) {
+      var content = new JsonObject();
+      content.addProperty("subscription", new String(topic, StandardCharsets.UTF_8));
+      return format.write(
+          new Message(
+              List.of(topic),
+              session.header("iopub_welcome"),
+              new JsonObject(),
+              new JsonObject(),
+              content,
+              List.of()));
+    }
   }
 }

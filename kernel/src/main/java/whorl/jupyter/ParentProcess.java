@@ -15,16 +15,22 @@ public final class ParentProcess {
    * @param environment the variables of the kernel's process
    */
   public static void whenGone(Map<String, String> environment, Runnable task) {
-    find(environment).ifPresent(parent -> parent.onExit().thenRun(task));
+    // Aside, for the system takes its time to tell, and front ends wait for the kernel.
+    var search =
+        new Thread(
+            () -> find(environment).ifPresent(parent -> parent.onExit().thenRun(task)), "parent");
+    search.setDaemon(true);
+    search.start();
   }
 
+  /** Looked for among those that this process comes from: elsewhere the number means another. */
   private static Optional<ProcessHandle> find(Map<String, String> environment) {
-    try {
-      long id = Long.parseLong(environment.getOrDefault(VARIABLE, ""));
-      // Where front ends give something else than the parent's number, this finds no parent.
-      return ProcessHandle.current().parent().filter(parent -> parent.pid() == id);
-    } catch (NumberFormatException e) {
-      return Optional.empty();
+    String id = environment.getOrDefault(VARIABLE, "");
+    Optional<ProcessHandle> found =
+        id.isEmpty() ? Optional.empty() : ProcessHandle.current().parent();
+    while (found.isPresent() && !id.equals(String.valueOf(found.get().pid()))) {
+      found = found.get().parent();
     }
+    return found;
   }
 }

@@ -3,6 +3,7 @@ package whorl.jupyter;
 import com.google.gson.JsonObject;
 import java.io.IOException;
 import java.io.InterruptedIOException;
+import java.util.Arrays;
 import java.util.List;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.CompletableFuture;
@@ -82,8 +83,7 @@ final class Questions {
 
   /** Clients need not say which question they answer. */
   private static boolean isAnswer(Message reply, Message question) {
-    boolean sameClient =
-        java.util.Arrays.deepEquals(reply.route().toArray(), question.route().toArray());
+    boolean sameClient = Arrays.deepEquals(reply.route().toArray(), question.route().toArray());
     return reply.type().equals("input_reply")
         && sameClient
         && (reply.parentId().isEmpty() || reply.parentId().equals(question.id()));

@@ -59,7 +59,9 @@ final class RequestLoop implements Runnable {
     try {
       handler.handle(request);
     } catch (BadContentException e) {
-      request.fail("BadRequest", message.type() + ": " + e.getMessage());
+      String problem = message.type() + ": " + e.getMessage();
+      log.line(problem);
+      request.fail("BadRequest", problem);
     } catch (Throwable e) {
       log.line("a failure while serving " + message.type(), e);
       request.fail(e.getClass().getSimpleName(), "Whorl failed to answer: " + e);

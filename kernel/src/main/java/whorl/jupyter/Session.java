@@ -2,6 +2,7 @@ package whorl.jupyter;
 
 import com.google.gson.JsonObject;
 import java.time.Instant;
+import java.time.temporal.ChronoUnit;
 import java.util.UUID;
 import java.util.concurrent.atomic.AtomicLong;
 
@@ -17,12 +18,17 @@ final class Session {
     this.user = user;
   }
 
+  /** The time as clients can read it, some of which know microseconds at most. */
+  static String now() {
+    return Instant.now().truncatedTo(ChronoUnit.MICROS).toString();
+  }
+
   JsonObject header(String type) {
     var header = new JsonObject();
     header.addProperty("msg_id", id + "_" + messages.incrementAndGet());
     header.addProperty("session", id);
     header.addProperty("username", user);
-    header.addProperty("date", Instant.now().toString());
+    header.addProperty("date", now());
     header.addProperty("msg_type", type);
     header.addProperty("version", PROTOCOL);
     return header;

@@ -1,6 +1,7 @@
 package whorl.jupyter;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -21,10 +22,20 @@ import org.zeromq.ZMQException;
 final class Sockets implements Runnable, Outbox.Carrier {
   /** Is told what arrives. */
   interface Receiver {
+    /** On shell, control or stdin. */
     void received(Channel channel, List<byte[]> frames);
+
+    /** What a front end is told that wants all that is published on a topic from now on. */
+    List<byte[]> welcome(byte[] topic);
   }
 
   private static final Channel[] CHANNELS = Channel.values();
+  private static final List<Channel> REQUESTS =
+      List.of(Channel.CONTROL, Channel.SHELL, Channel.STDIN);
+
+  /** With this a subscription begins, and its end with another. */
+  private static final byte SUBSCRIBE = 1;
+
   private static final String OUTGOING = "inproc://outgoing";
 
   /** A frame that claims to be longer is not waited for. */
@@ -49,6 +60,7 @@ final class Sockets implements Runnable, Outbox.Carrier {
   private final Socket outgoing;
   private final Socket toOutgoing;
   private final Receiver receiver;
+  private final Log log;
 
   /** What could not be published yet. */
   private @Nullable List<byte[]> waiting;
@@ -61,6 +73,7 @@ final class Sockets implements Runnable, Outbox.Carrier {
       ConnectionFile connection, Receiver receiver, Thread.UncaughtExceptionHandler fatal, Log log)
       throws KernelException {
     this.receiver = receiver;
+    this.log = log;
     context.setUncaughtExceptionHandler(fatal);
     context.setNotificationExceptionHandler((thread, e) -> log.line("trouble with a socket", e));
     for (Channel channel : Channel.values()) {
@@ -124,25 +137,48 @@ final class Sockets implements Runnable, Outbox.Carrier {
       if (poller.poll(waiting == null ? -1 : 0) < 0) {
         throw new IllegalStateException("the sockets cannot be watched");
       }
-      sockets.forEach(this::takeIn);
+      for (Channel channel : REQUESTS) {
+        takeIn(channel);
+      }
+      returnHeartbeat();
+      if (waiting != null) {
+        publish(waiting);
+      }
+      // A front end is welcomed before it hears anything else.
+      if (waiting == null) {
+        welcome(received(socket(Channel.IOPUB)));
+      }
       if (waiting == null) {
         sendOut(received(outgoing));
-      } else {
-        publish(waiting);
       }
     }
     context.close();
   }
 
-  private void takeIn(Channel channel, Socket socket) {
-    List<byte[]> frames = received(socket);
+  private void takeIn(Channel channel) {
+    List<byte[]> frames = received(socket(channel));
     if (frames.isEmpty()) {
       return;
     }
-    if (channel == Channel.HEARTBEAT) {
-      isSent(socket, frames);
-    } else {
+    try {
       receiver.received(channel, frames);
+    } catch (Throwable e) {
+      log.line("a message on " + channel.portName() + " could not be taken in", e);
+    }
+  }
+
+  private void returnHeartbeat() {
+    Socket heart = socket(Channel.HEARTBEAT);
+    List<byte[]> beat = received(heart);
+    if (!beat.isEmpty()) {
+      isSent(heart, beat);
+    }
+  }
+
+  private void welcome(List<byte[]> wish) {
+    if (!wish.isEmpty() && wish.get(0).length > 0 && wish.get(0)[0] == SUBSCRIBE) {
+      byte[] subscription = wish.get(0);
+      publish(receiver.welcome(Arrays.copyOfRange(subscription, 1, subscription.length)));
     }
   }
 
