@@ -130,7 +130,7 @@ final class Outbox implements Runnable {
 
   private void hold(Parcel.Printed text) {
     printed.addAndGet(-text.text().length());
-    if (text.parent() != heldParent || text.stream() != heldStream) {
+    if (!text.parent().equals(heldParent) || text.stream() != heldStream) {
       sendHeld(held.length());
       heldParent = text.parent();
       heldStream = text.stream();

@@ -16,11 +16,17 @@ public final class ParentProcess {
    */
   public static void whenGone(Map<String, String> environment, Runnable task) {
     // Aside, for the system takes its time to tell, and front ends wait for the kernel.
-    var search =
-        new Thread(
-            () -> find(environment).ifPresent(parent -> parent.onExit().thenRun(task)), "parent");
-    search.setDaemon(true);
-    search.start();
+    var watch = new Thread(() -> watch(environment, task), "parent");
+    watch.setDaemon(true);
+    watch.start();
+  }
+
+  private static void watch(Map<String, String> environment, Runnable task) {
+    Optional<ProcessHandle> parent = find(environment);
+    if (parent.isPresent()) {
+      parent.get().onExit().join();
+      task.run();
+    }
   }
 
   /** Looked for among those that this process comes from: elsewhere the number means another. */

@@ -1,5 +1,6 @@
 package whorl.jupyter;
 
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.EnumMap;
@@ -29,7 +30,6 @@ final class Sockets implements Runnable, Outbox.Carrier {
     List<byte[]> welcome(byte[] topic);
   }
 
-  private static final Channel[] CHANNELS = Channel.values();
   private static final List<Channel> REQUESTS =
       List.of(Channel.CONTROL, Channel.SHELL, Channel.STDIN);
 
@@ -37,6 +37,7 @@ final class Sockets implements Runnable, Outbox.Carrier {
   private static final byte SUBSCRIBE = 1;
 
   private static final String OUTGOING = "inproc://outgoing";
+  private static final String END = "END";
 
   /** A frame that claims to be longer is not waited for. */
   private static final long LONGEST_FRAME = 256L << 20;
@@ -119,13 +120,13 @@ final class Sockets implements Runnable, Outbox.Carrier {
   /** Hands a message to the thread of the sockets, from one thread only; none ends it. */
   @Override
   public void carry(Channel channel, List<byte[]> frames) {
-    toOutgoing.sendMore(new byte[] {(byte) channel.ordinal()});
+    toOutgoing.sendMore(channel.name());
     isSent(toOutgoing, frames);
   }
 
   /** Ends the thread of the sockets, from the thread that hands messages to it. */
   void end() {
-    toOutgoing.send(new byte[0]);
+    toOutgoing.send(END);
   }
 
   @Override
@@ -186,14 +187,14 @@ final class Sockets implements Runnable, Outbox.Carrier {
     if (outgoing.isEmpty()) {
       return;
     }
-    byte[] address = outgoing.get(0);
+    String address = new String(outgoing.get(0), StandardCharsets.UTF_8);
     List<byte[]> frames = outgoing.subList(1, outgoing.size());
-    if (address.length == 0) {
+    if (address.equals(END)) {
       ended = true;
-    } else if (CHANNELS[address[0]] == Channel.IOPUB) {
+    } else if (address.equals(Channel.IOPUB.name())) {
       publish(frames);
     } else {
-      isSent(socket(CHANNELS[address[0]]), frames);
+      isSent(socket(Channel.valueOf(address)), frames);
     }
   }
 

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
 import java.io.OutputStream;
+import java.net.InetAddress;
 import java.net.Socket;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
@@ -270,7 +271,7 @@ class BadPeerTest {
     try (var kernel = new Served();
         var client = kernel.client()) {
       for (Map.Entry<Channel, Integer> port : kernel.connection().ports().entrySet()) {
-        try (var socket = new Socket("127.0.0.1", port.getValue())) {
+        try (var socket = new Socket(InetAddress.getLoopbackAddress(), port.getValue())) {
           OutputStream out = socket.getOutputStream();
           for (byte[] part : parts) {
             out.write(part);

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.zeromq.SocketType;
 import org.zeromq.ZContext;
 import org.zeromq.ZMQ;
@@ -43,7 +44,7 @@ final class Client implements AutoCloseable {
   }
 
   Socket socket(Channel channel) {
-    return sockets.get(channel);
+    return Objects.requireNonNull(sockets.get(channel));
   }
 
   WireFormat format() {

@@ -108,7 +108,7 @@ final class ScriptPage implements Page {
   }
 
   private static int overflow(int depth) {
-    return overflow(depth + 1) + 1;
+    return depth < 0 ? 0 : overflow(depth + 1) + 1;
   }
 
   private static Bundle bundle(String text) {
