@@ -8,6 +8,7 @@ import whorl.jupyter.ConnectionFile;
 import whorl.jupyter.Kernel;
 import whorl.jupyter.KernelException;
 import whorl.jupyter.ParentProcess;
+import whorl.page.LivePage;
 import whorl.page.PlainLanguage;
 
 /**
@@ -42,7 +43,9 @@ record KernelStart(PlainLanguage language, Path connectionFile) {
   /** Serves until the kernel is shut down, and returns the exit status. */
   int run(PrintWriter err) {
     try {
-      var kernel = new Kernel(ConnectionFile.read(connectionFile), language, SheetPage::new, err);
+      var kernel =
+          new Kernel(
+              ConnectionFile.read(connectionFile), language, () -> new LivePage(language), err);
       ParentProcess.whenGone(System.getenv(), kernel::stop);
       kernel.run();
       return ExitStatus.HOLDS.code();
