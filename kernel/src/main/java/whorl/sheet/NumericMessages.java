@@ -57,7 +57,9 @@ final class NumericMessages {
     }
     return Diagnostic.of(
         code(NumericFailure.Reason.ROUTINE_WITHOUT_VALUE),
-        function.name() + " gives no number for " + String.join(", ", arguments) + ".",
+        function.name()
+            + " gives no number"
+            + (arguments.isEmpty() ? "." : " for " + String.join(", ", arguments) + "."),
         span,
         "Its Java code " + said(call, gave),
         fix(NumericFailure.Reason.ROUTINE_WITHOUT_VALUE, ""));

@@ -109,7 +109,10 @@ public sealed interface Statement {
     }
   }
 
-  /** {@code f(x [unit], …) [unit]}: the head of a function that is worked out outside the sheet. */
+  /**
+   * {@code f(x [unit], …) [unit]}: the head of a function that is worked out outside the sheet. It
+   * may have no parameters.
+   */
   record Published(
       Span span, Expr.Name name, List<Parameter> parameters, Bracket bracket, String remark)
       implements Statement {

@@ -135,7 +135,7 @@ final class StatementParser extends LineParser {
     return new Statement.Function(line.span(), name, parameters, bracket, body, line.remark());
   }
 
-  // published = name "(" parameter { "," parameter } ")" bracket
+  // published = name "(" [ parameter { "," parameter } ] ")" bracket
   private Statement published() {
     Token start = cursor.peek();
     Expr.Name name = definedName("the head of a function, such as `f(x [m], k) [N]`");
@@ -146,7 +146,9 @@ final class StatementParser extends LineParser {
     if (!start.touches(open)) {
       throw new Refusal(messages.callBlank(start.span().gapTo(open.span()), start.span()));
     }
-    List<Statement.Parameter> parameters = parameters();
+    boolean none = cursor.peek(1).is(Kind.CLOSE);
+    List<Statement.Parameter> parameters = none ? List.of() : parameters();
+    cursor.skip(none ? 2 : 0);
     Statement.Bracket bracket = optionalBracket();
     if (cursor.at(Kind.EQUALS)) {
       throw cursor.refusal(messages.headWithFormula(cursor.peek().span(), since(start)));

@@ -1031,9 +1031,13 @@ final class SyntaxMessages {
     return message(
         "head-form",
         name,
-        "A function published from Java needs parameters behind its name.",
-        "A value that takes none is an input: define it in a cell of the sheet.",
-        "Write " + code(text(name) + "(x [m], k) [N]"));
+        "A function published from Java has parentheses behind its name.",
+        "",
+        "Write "
+            + code(text(name) + "(x [m], k) [N]")
+            + ", or "
+            + code(text(name) + "() [N]")
+            + " if it takes nothing");
   }
 
   Diagnostic headWithFormula(Span equals, Span head) {

@@ -239,6 +239,14 @@ class CellReportTest {
     sheet.run(new CellId("a"), "cell [1]", "F = drag(3 km/h, 1 m², 1)");
     assertFalse(
         CellReport.of(sheet.run(new CellId("b"), "cell [2]", "x = 2")).record().has("published"));
+    var taking = new PublishedFunction("peak() [1]", x -> 1);
+    String line =
+        CellReport.of(sheet.publish(id, "cell [3]", List.of(taking)))
+            .text()
+            .lines()
+            .toList()
+            .get(2);
+    assertEquals("peak() Java, cell [3] number", line.replaceAll(" +", " "));
   }
 
   @Test

@@ -90,9 +90,10 @@ class PublishedFunctionTest {
           """
           drag(v [m/s])                ; 13-13; The unit of the result is missing.
           drag(v [m/s]) [N] = v        ; 18-19; No formula follows the head of a function published from Java.
-          drag [N]                     ; 0-4  ; A function published from Java needs parameters behind its name.
+          drag [N]                     ; 0-4  ; A function published from Java has parentheses behind its name.
           drag (v [m/s]) [N]           ; 4-5  ; A blank stands between `drag` and the parenthesis.
-          drag() [N]                   ; 5-6  ; Between the parentheses of a definition stand names, with their units in brackets.
+          drag(,) [N]                  ; 5-6  ; Between the parentheses of a definition stand names, with their units in brackets.
+          drag()                       ; 6-6  ; The unit of the result is missing.
           drag(v [m/s], v [m]) [N]     ; 14-15; The parameter `v` stands twice.
           drag(v [m/s] [N]             ; 13-14; Between the parentheses of a definition stand names, with their units in brackets.
           drag(v [m/s]) [Nn]           ; 15-17; `Nn` is no unit.
@@ -238,5 +239,21 @@ class PublishedFunctionTest {
     assertEquals("cell [3]", published.label());
     assertEquals("force", published.resultKind());
     assertEquals("wind tunnel", published.statement().remark());
+  }
+
+  @Test
+  void aFunctionMayTakeNothing() {
+    good(publish("peak() [kN]", x -> 3));
+    good(run("1", "F [N] = 2 * peak()"));
+    assertEquals(6000, si("F"));
+    good(publish("peak() [kN]", x -> 4));
+    assertEquals(8000, si("F"));
+    assertEquals("peak() [kN]", sheet.card("peak").orElseThrow().definition().text());
+    assertEquals(
+        "peak gives no number.",
+        publish("peak() [kN]", x -> Double.NaN).errors().isEmpty()
+            ? ((Step.Broken) step("1", 0)).diagnostic().problem()
+            : "");
+    assertEquals(1, run("2", "g() = 3").errors().size());
   }
 }
