@@ -70,10 +70,15 @@ final class JavaErrors {
                 String.join("\n", frames.lines(thrown, new Origins.Place(text, line))))));
   }
 
+  /** An exception that cannot even be said. */
+  static Failure unsayable(Throwable thrown, JavaText text, Span at) {
+    String type = Frames.type(thrown);
+    return new Failure(type, text, List.of(error(type, at, "")));
+  }
+
   /** A declaration was used that mentions something not declared. */
-  Failure unresolved(String declaration, List<String> missing, JavaText text, Span at) {
-    String problem =
-        declaration + " mentions " + String.join(" and ", missing) + ", which is not declared.";
+  static Failure unresolved(String declaration, String missing, JavaText text, Span at) {
+    String problem = declaration + " mentions " + missing + ", which is not declared.";
     return new Failure(UNRESOLVED, text, List.of(error(problem, at, "")));
   }
 

@@ -1,28 +1,22 @@
 package whorl.java;
 
+import java.nio.file.Path;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.Callable;
-import java.util.concurrent.ExecutionException;
 import java.util.function.Supplier;
-import jdk.jshell.DeclarationSnippet;
 import jdk.jshell.JShell;
-import jdk.jshell.MethodSnippet;
-import jdk.jshell.Snippet;
-import jdk.jshell.Snippet.Status;
-import jdk.jshell.SnippetEvent;
 import jdk.jshell.SourceCodeAnalysis;
-import jdk.jshell.UnresolvedReferenceException;
-import jdk.jshell.VarSnippet;
 import jdk.jshell.spi.ExecutionControl;
 import jdk.jshell.spi.ExecutionControlProvider;
 import jdk.jshell.spi.ExecutionEnv;
 import org.dflib.jjava.jupyter.kernel.BaseNotebookStatics;
 import org.dflib.jjava.jupyter.kernel.display.DisplayData;
+import org.dflib.jjava.jupyter.kernel.magic.MagicsRegistry;
 import org.jspecify.annotations.Nullable;
-import whorl.diagnostic.Span;
 
 /**
  * JShell with all that the Java cells of a page have declared, and what shows their values. It is
@@ -52,17 +46,15 @@ final class JavaSession implements AutoCloseable {
   }
 
   private final CellLoader loader = new CellLoader();
+  private final NotebookKernel kernel = new NotebookKernel(this);
+  private final Set<Path> added = new HashSet<>();
   private final Supplier<CellThread> thread;
-  private final CellControl control;
   private final JShell shell;
   private final SourceCodeAnalysis analysis;
-  private final Origins origins;
   private final Frames frames;
-  private final JavaErrors errors;
-  private final NotebookKernel kernel;
-
-  /** A value to be shown, which may be null. */
-  private record Value(@Nullable Object object) {}
+  private final CellCalls calls;
+  private final Snippets snippets;
+  private boolean begun;
 
   /**
    * A session without declarations.
@@ -71,13 +63,14 @@ final class JavaSession implements AutoCloseable {
    */
   JavaSession(Supplier<CellThread> thread) {
     this.thread = thread;
-    control = new CellControl(loader, thread);
+    var control = new CellControl(loader, thread);
     shell = JShell.builder().executionEngine(new Engine(control), Map.of()).build();
     analysis = shell.sourceCodeAnalysis();
-    origins = new Origins(analysis);
+    var origins = new Origins(analysis);
     frames = new Frames(origins);
-    errors = new JavaErrors(frames);
-    kernel = new NotebookKernel(this);
+    calls = new CellCalls(thread, new JavaErrors(frames));
+    snippets = new Snippets(shell, control, origins, calls, thread);
+    new Magics(this).register(kernel.getMagicsRegistry());
     IMPORTS.forEach(name -> shell.eval("import " + name + ";"));
   }
 
@@ -93,23 +86,42 @@ final class JavaSession implements AutoCloseable {
     }
   }
 
-  Frames frames() {
-    return frames;
-  }
-
   ClassLoader loader() {
     return loader;
+  }
+
+  /** What tells where in cells an exception came from. */
+  Frames frames() {
+    return frames;
   }
 
   /** Runs a text and shows its value. */
   void run(JavaText text, CellRun run) throws Failure, Stop {
     thread.get().use(loader);
     kernel.install();
+    installFirstExtensions(text, run);
     Optional<Value> value = evaluate(text);
     if (value.isPresent() && !run.isShown(value.get().object())) {
-      Shown shown = call(() -> Shown.of(rendered(value.get().object())), text, text.lastLine());
+      Shown shown = call(() -> Shown.of(rendered(value.get().object())), text);
       run.output().result(shown.data(), shown.metadata());
     }
+  }
+
+  /** Extensions beside the kernel itself; one that fails keeps no cell from running. */
+  private void installFirstExtensions(JavaText text, CellRun run) throws Stop {
+    if (!begun) {
+      begun = true;
+      try {
+        call(kernel::installExtensions, text);
+      } catch (Failure failure) {
+        String notice = "An extension cannot be installed: " + failure.getMessage() + "\n";
+        run.output().print(JavaOutput.Stream.ERR, notice);
+      }
+    }
+  }
+
+  private <T> T call(Callable<T> task, JavaText text) throws Failure, Stop {
+    return calls.call(task, text, text.lastLine());
   }
 
   private DisplayData rendered(@Nullable Object value) {
@@ -119,146 +131,63 @@ final class JavaSession implements AutoCloseable {
     return value instanceof DisplayData display ? display : kernel.getRenderer().render(value);
   }
 
-  /**
-   * Runs code that code of a cell hands in.
-   *
-   * @return its value; null if it has none
-   */
-  @Nullable Object evaluateWithin(String code) {
-    if (CellThread.current().filter(thread.get()::equals).isEmpty()) {
-      throw new IllegalStateException("Code can be run only by the cell that runs.");
-    }
-    try {
-      return thread
-          .get()
-          .shielded(() -> evaluate(new JavaText("the code", code)))
-          .map(Value::object)
-          .orElse(null);
-    } catch (Stop stop) {
-      throw new CellStopped();
-    } catch (Exception e) {
-      throw new IllegalArgumentException(e.getMessage(), e);
-    }
-  }
-
   /** Runs a text; what comes out is the value of its last piece, if that has one to be shown. */
   private Optional<Value> evaluate(JavaText text) throws Failure, Stop {
     Optional<Value> last = Optional.empty();
-    for (JavaText.Piece piece :
-        text.pieces(analysis, kernel.getMagicsRegistry().getLineMagicNames())) {
-      last = piece instanceof JavaText.Snippet snippet ? evaluate(snippet, text) : Optional.empty();
+    for (JavaText.Piece piece : text.pieces(analysis, magics().getLineMagicNames())) {
+      last = evaluate(piece, text);
     }
     return last;
   }
 
-  private Optional<Value> evaluate(JavaText.Snippet snippet, JavaText text) throws Failure, Stop {
-    List<SnippetEvent> events = shell.eval(snippet.code());
-    Optional<Value> last = Optional.empty();
-    for (SnippetEvent event : events) {
-      if (event.causeSnippet() == null) {
-        origins.add(event.snippet(), text, snippet.start());
-        last = settled(event, snippet, text);
-      } else {
-        tellReset(event);
+  private Optional<Value> evaluate(JavaText.Piece piece, JavaText text) throws Failure, Stop {
+    if (piece instanceof JavaText.Snippet snippet) {
+      return snippets.run(snippet, text);
+    }
+    if (piece instanceof JavaText.LineMagic magic) {
+      calls.<@Nullable Object>call(
+          () -> magics().evalLineMagic(kernel, magic.name(), magic.arguments()),
+          text,
+          text.span(magic));
+    } else if (piece instanceof JavaText.CellMagic magic) {
+      calls.<@Nullable Object>call(
+          () -> magics().evalCellMagic(kernel, magic.name(), magic.arguments(), magic.body()),
+          text,
+          text.span(magic));
+    }
+    return Optional.empty();
+  }
+
+  private MagicsRegistry magics() {
+    return kernel.getMagicsRegistry();
+  }
+
+  /** Runs a text that code on the thread of the cells hands in. */
+  Optional<Value> runWithin(JavaText text) throws Exception {
+    if (CellThread.current().filter(thread.get()::equals).isEmpty()) {
+      throw new IllegalStateException("Code can be handed in only by the cell that runs.");
+    }
+    // JShell reads files, which an interrupt of its thread would close for good.
+    return thread.get().shielded(() -> evaluate(text));
+  }
+
+  /**
+   * Adds jars and folders of classes to what cells can use, with the extensions in them; on the
+   * thread of the cells.
+   */
+  void add(List<Path> paths) throws Exception {
+    thread.get().shielded(() -> addToClassPath(paths));
+    kernel.installExtensions();
+  }
+
+  private Set<Path> addToClassPath(List<Path> paths) {
+    for (Path path : paths) {
+      Path absolute = path.toAbsolutePath().normalize();
+      if (added.add(absolute)) {
+        shell.addToClasspath(absolute.toString());
       }
     }
-    return last;
-  }
-
-  private Optional<Value> settled(SnippetEvent event, JavaText.Snippet snippet, JavaText text)
-      throws Failure, Stop {
-    Snippet declared = event.snippet();
-    String className = analysis.wrapper(declared).fullClassName();
-    Optional<CellControl.Ran> ran = control.take(className);
-    Optional<Stop> stop = ran.flatMap(CellControl.Ran::stop);
-    if (stop.isPresent()) {
-      throw stop.get();
-    }
-    if (thread.get().isStopping()) {
-      throw new Stop(Stop.Ending.ENDED);
-    }
-    if (event.status() == Status.REJECTED) {
-      throw JavaErrors.refused(shell.diagnostics(declared).toList(), text, snippet);
-    }
-    Span place = text.span(snippet);
-    if (event.exception() instanceof UnresolvedReferenceException unresolved) {
-      throw errors.unresolved(
-          name(unresolved.getSnippet()), missing(unresolved.getSnippet()), text, place);
-    }
-    Optional<Throwable> thrown = ran.flatMap(CellControl.Ran::thrown);
-    if (thrown.isPresent()) {
-      throw call(() -> errors.thrown(thrown.get(), text, place), text, place);
-    }
-    if (event.status() != Status.VALID && declared instanceof DeclarationSnippet declaration) {
-      tell(
-          name(declaration)
-              + " mentions "
-              + String.join(" and ", missing(declaration))
-              + ", which is not declared yet.");
-    }
-    return switch (declared.subKind()) {
-      case TEMP_VAR_EXPRESSION_SUBKIND -> {
-        drop((VarSnippet) declared, className);
-        yield value(ran, snippet);
-      }
-      case VAR_VALUE_SUBKIND, OTHER_EXPRESSION_SUBKIND -> value(ran, snippet);
-      default -> Optional.empty();
-    };
-  }
-
-  /** That a call gave nothing is no news where its author closed it as a statement. */
-  private static Optional<Value> value(Optional<CellControl.Ran> ran, JavaText.Snippet snippet) {
-    return ran.map(CellControl.Ran::value)
-        .map(Value::new)
-        .or(() -> snippet.closed() ? Optional.empty() : Optional.of(new Value(null)));
-  }
-
-  /** JShell keeps the value of every expression in a variable that nobody knows of. */
-  private void drop(VarSnippet variable, String className) {
-    shell.drop(variable);
-    origins.remove(variable);
-    control.clear(className, variable.name());
-  }
-
-  private static String name(DeclarationSnippet declaration) {
-    return declaration instanceof MethodSnippet method
-        ? method.name() + "(" + method.parameterTypes() + ")"
-        : declaration.name();
-  }
-
-  private List<String> missing(DeclarationSnippet declaration) {
-    return shell.unresolvedDependencies(declaration).toList();
-  }
-
-  /** JShell makes a variable anew, without its value, when its type is declared anew. */
-  private void tellReset(SnippetEvent event) {
-    if (event.snippet() instanceof VarSnippet variable
-        && event.status() == Status.VALID
-        && event.previousStatus() == Status.VALID) {
-      tell(
-          variable.name()
-              + " has lost its value, for "
-              + name((DeclarationSnippet) event.causeSnippet())
-              + " was declared anew.");
-    }
-  }
-
-  private void tell(String notice) {
-    thread.get().run().ifPresent(run -> run.output().print(JavaOutput.Stream.ERR, notice + "\n"));
-  }
-
-  private <T> T call(Callable<T> task, JavaText text, Span place) throws Failure, Stop {
-    try {
-      return thread.get().call(task);
-    } catch (Stop stop) {
-      throw stop;
-    } catch (Failure failure) {
-      throw failure.within(text, place);
-    } catch (ExecutionException e) {
-      throw errors.thrown(Objects.requireNonNullElse(e.getCause(), e), text, place);
-    } catch (Exception e) {
-      throw errors.thrown(e, text, place);
-    }
+    return added;
   }
 
   @Override

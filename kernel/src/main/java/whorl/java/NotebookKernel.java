@@ -2,6 +2,7 @@ package whorl.java;
 
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.Set;
 import org.dflib.jjava.jupyter.kernel.BaseKernel;
 import org.dflib.jjava.jupyter.kernel.JupyterIO;
 import org.dflib.jjava.jupyter.kernel.LanguageInfo;
@@ -64,9 +65,14 @@ final class NotebookKernel extends BaseKernel {
     }
   }
 
-  /** Installs the extensions that are on the class path of cells and not yet installed. */
-  void installExtensions() {
+  /**
+   * Installs the extensions that are on the class path of cells and not yet installed.
+   *
+   * @return which are installed now
+   */
+  Set<String> installExtensions() {
     installDefaultExtensions();
+    return extensions.keySet();
   }
 
   @Override
@@ -76,7 +82,15 @@ final class NotebookKernel extends BaseKernel {
 
   @Override
   public @Nullable Object evalRaw(String code) {
-    return session.evaluateWithin(code);
+    try {
+      return session.runWithin(new JavaText("the code", code)).map(Value::object).orElse(null);
+    } catch (Stop stop) {
+      throw new CellStopped();
+    } catch (RuntimeException e) {
+      throw e;
+    } catch (Exception e) {
+      throw new IllegalArgumentException(e.getMessage(), e);
+    }
   }
 
   @Override
