@@ -45,6 +45,11 @@ record AtCursor(
     return span.start() <= place && place < span.end();
   }
 
+  /** All lines but the one that is being written, which defines nothing yet. */
+  List<LogicalLine> otherLines() {
+    return lines.stream().filter(other -> !other.equals(line)).toList();
+  }
+
   List<Token> tokens() {
     return line.tokens();
   }

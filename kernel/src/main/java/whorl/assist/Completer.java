@@ -3,8 +3,6 @@ package whorl.assist;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import whorl.assist.Completion.Candidate;
@@ -21,35 +19,23 @@ import whorl.units.UnknownUnitException;
 
 /** Says what could be typed at one cursor. */
 final class Completer {
-  private static final Pattern COMMAND = Pattern.compile("\\s*(%%?[a-z]*)");
-
   private final Sheet sheet;
   private final AtCursor at;
   private final DraftSheet draft;
 
-  private Completer(Sheet sheet, AtCursor at) {
+  Completer(Sheet sheet, AtCursor at) {
     this.sheet = sheet;
     this.at = at;
-    this.draft = new DraftSheet(sheet.scope(), at.source(), at.lines(), at.line());
+    this.draft = new DraftSheet(sheet.scope(), at.source(), at.otherLines());
   }
 
-  /** What could be typed at a place of a text. */
-  static Completion complete(Sheet sheet, String text, int cursor) {
-    String inFront = text.substring(0, cursor);
-    Matcher command = COMMAND.matcher(inFront);
-    if (command.matches()) {
-      return new Completion(command.start(1), cursor, CellCommands.beginning(command.group(1)));
-    }
-    return AtCursor.in(text, cursor)
-        .map(
-            at ->
-                Signs.areTyped(inFront)
-                    ? Signs.complete(inFront)
-                    : new Completer(sheet, at).completion(cursor))
-        .orElse(Completion.none(cursor));
+  /** The names that the sheet has, of which a command may follow. */
+  Completion definitions(int cursor) {
+    return new Completion(at.start(), cursor, new NameCandidates(sheet, draft, at).ofSheet());
   }
 
-  private Completion completion(int cursor) {
+  /** What could be typed in a line of the sheet. */
+  Completion completion(int cursor) {
     Place place = Place.of(at.tokens(), at.index());
     if (place instanceof Place.KindWord kindWord) {
       return kinds(kindWord, cursor);
@@ -94,8 +80,6 @@ final class Completer {
       candidates.addAll(keywords(Keyword.At.VALUE));
       candidates.addAll(check ? keywords(Keyword.At.CHECK) : List.of());
     }
-    boolean startOfCell = first && at.line().equals(at.lines().get(0)) && at.typed().isEmpty();
-    candidates.addAll(startOfCell ? CellCommands.beginning("") : List.of());
     return candidates;
   }
 

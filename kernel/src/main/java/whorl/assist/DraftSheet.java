@@ -21,6 +21,7 @@ import whorl.syntax.CatalogueWords;
 import whorl.syntax.LogicalLine;
 import whorl.syntax.Parsed;
 import whorl.syntax.Parser;
+import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 import whorl.units.Unit;
 import whorl.units.kind.Readings;
@@ -43,15 +44,15 @@ final class DraftSheet implements Scope {
   /**
    * A draft.
    *
-   * @param lines the lines of the cell
-   * @param besides the line that is being written, which defines nothing yet
+   * @param source the text of the cell
+   * @param lines the lines of the cell that count
    */
-  DraftSheet(Scope sheet, Source source, List<LogicalLine> lines, LogicalLine besides) {
+  DraftSheet(Scope sheet, Source source, List<LogicalLine> lines) {
     this.sheet = sheet;
     this.sheetNames = new HashSet<>(sheet.names());
     this.source = source;
     for (LogicalLine line : lines) {
-      if (!line.isIndented() && !line.equals(besides)) {
+      if (!line.isIndented()) {
         line.defines().ifPresent(name -> own.putIfAbsent(name.name(), line));
       }
     }
@@ -67,6 +68,17 @@ final class DraftSheet implements Scope {
     return source.slice(line.span());
   }
 
+  /** The line of the cell that defines a name. */
+  Optional<LogicalLine> line(String name) {
+    return Optional.ofNullable(own.get(name));
+  }
+
+  /** A line of the cell in canonical form; as written where it cannot be read. */
+  String canonical(LogicalLine line) {
+    String text = text(line);
+    return statement(text).map(Printer::unremarked).orElse(text);
+  }
+
   /** Whether the sheet or the cell defines a name. */
   boolean defines(String name) {
     return own.containsKey(name) || sheetNames.contains(name);
@@ -80,6 +92,11 @@ final class DraftSheet implements Scope {
     }
     standIns.put("stand_in_" + number, new Meaning.Quantity(new Type.Real(readings), unit, true));
     return "stand_in_" + number;
+  }
+
+  /** What a name stands for by the cell alone. */
+  Optional<Meaning> ownMeaning(String name) {
+    return own.containsKey(name) ? meaning(name) : Optional.empty();
   }
 
   @Override

@@ -2,6 +2,8 @@ package whorl.assist;
 
 import java.util.List;
 import java.util.Optional;
+import whorl.report.InfoCard;
+import whorl.report.InfoCard.Fact;
 
 /**
  * What there is to say of a function at hand.
@@ -195,6 +197,19 @@ record FunctionFacts(
   /** The function of a name, if there is one at hand. */
   static Optional<FunctionFacts> named(String name) {
     return ALL.stream().filter(function -> function.name().equals(name)).findFirst();
+  }
+
+  /** All of it on a card. */
+  InfoCard card() {
+    return new InfoCard(
+        head,
+        gist,
+        List.of(
+            Fact.of("formula", formula),
+            Fact.of("takes", takes),
+            Fact.of("gives", gives),
+            new Fact("valid for", valid.isEmpty() ? List.of() : List.of(valid)),
+            Fact.of("example", example)));
   }
 
   /** Its name. */

@@ -2,6 +2,8 @@ package whorl.assist;
 
 import java.util.List;
 import java.util.Optional;
+import whorl.report.InfoCard;
+import whorl.report.InfoCard.Fact;
 
 /**
  * A word of the language that this version works out.
@@ -37,8 +39,8 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
               "check",
               At.LINE,
               "says whether a condition holds",
-              "Says whether a condition holds and how much of the limit is used. With = and within"
-                  + " it compares a value with one that was worked out elsewhere. A check that"
+              "Says whether a condition holds and how much of the limit is used. With an equals sign"
+                  + " and within it compares a value with one that was worked out elsewhere. A check that"
                   + " fails stops nothing, but a run from the command line ends in failure.",
               "check 12 kN * 0.4 m <= 5 kN·m"),
           new Keyword(
@@ -58,7 +60,7 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
               "within",
               At.STATED,
               "the deviation allowed",
-              "Behind check and =: how far the value may be from the one stated, as a share of it or"
+              "Behind a check with an equals sign: how far the value may be from the one stated, as a share of it or"
                   + " as a quantity of its kind.",
               "check 2 kN * 3 m = 6.02 kN·m within 1 %"),
           new Keyword(
@@ -110,6 +112,11 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
   /** All words. */
   static List<Keyword> all() {
     return ALL;
+  }
+
+  /** All of it on a card. */
+  InfoCard card() {
+    return new InfoCard(word, paragraph, List.of(Fact.of("example", example)));
   }
 
   /** The keyword of a spelling, if it is one. */

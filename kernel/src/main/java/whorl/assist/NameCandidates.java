@@ -3,9 +3,7 @@ package whorl.assist;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.Supplier;
 import java.util.stream.Collectors;
@@ -17,8 +15,6 @@ import whorl.sheet.Quantity;
 import whorl.sheet.Sheet;
 import whorl.syntax.GreekNames;
 import whorl.syntax.LogicalLine;
-import whorl.syntax.Token;
-import whorl.syntax.Token.Kind;
 import whorl.units.Unit;
 import whorl.units.UnitText;
 
@@ -46,8 +42,18 @@ final class NameCandidates {
   /** The names that begin as typed, the closest first; functions at hand behind the others. */
   List<Candidate> all() {
     var names = new ArrayList<Name>(parameters());
-    names.addAll(defined());
+    names.addAll(ofSheetNames());
+    names.addAll(ofCellNames());
     names.addAll(atHand());
+    return ranked(names);
+  }
+
+  /** The names of the sheet alone that begin as typed. */
+  List<Candidate> ofSheet() {
+    return ranked(ofSheetNames());
+  }
+
+  private List<Candidate> ranked(List<Name> names) {
     var taken = new HashSet<String>();
     return names.stream()
         .filter(name -> taken.add(name.name()))
@@ -68,45 +74,26 @@ final class NameCandidates {
 
   /** The parameters of the function that the line defines, once its head is complete. */
   private List<Name> parameters() {
-    LogicalLine line = at.line();
-    if (!line.definesFunction()) {
-      return List.of();
-    }
-    int close = line.closing(1);
-    if (at.index() < close) {
-      return List.of();
-    }
-    var names = new ArrayList<Name>();
-    for (int i = 2; i < close; i++) {
-      Token token = at.tokens().get(i);
-      Token before = at.tokens().get(i - 1);
-      if (token.isFreeName() && (i == 2 || before.is(Kind.COMMA))) {
-        String name = token.name().name();
-        String head = name + unitBehind(i);
-        names.add(new Name(name, false, () -> new Candidate(name, "param", "parameter " + head)));
-      }
-    }
-    return names;
+    return HeadParameter.of(at.line(), at::inside).stream()
+        .filter(parameter -> at.index() > at.line().closing(1))
+        .map(parameter -> new Name(parameter.name(), false, () -> candidate(parameter)))
+        .toList();
   }
 
-  private String unitBehind(int name) {
-    Token open = at.tokens().get(name + 1);
-    int close = open.is(Kind.OPEN_BRACKET) ? at.line().closing(name + 1) : -1;
-    return close < 0
-        ? ""
-        : " " + at.between(open.span().start(), at.tokens().get(close).span().end());
+  private static Candidate candidate(HeadParameter parameter) {
+    return new Candidate(parameter.name(), "param", "parameter " + parameter.text());
   }
 
-  private List<Name> defined() {
-    var names = new LinkedHashMap<String, Name>();
-    for (String name : sheet.scope().names()) {
-      names.put(name, new Name(name, false, () -> ofSheet(name)));
-    }
-    for (Map.Entry<String, LogicalLine> line : draft.own().entrySet()) {
-      names.computeIfAbsent(
-          line.getKey(), name -> new Name(name, false, () -> ofCell(name, line.getValue())));
-    }
-    return List.copyOf(names.values());
+  private List<Name> ofSheetNames() {
+    return sheet.scope().names().stream()
+        .map(name -> new Name(name, false, () -> ofSheet(name)))
+        .toList();
+  }
+
+  private List<Name> ofCellNames() {
+    return draft.own().entrySet().stream()
+        .map(line -> new Name(line.getKey(), false, () -> ofCell(line.getKey(), line.getValue())))
+        .toList();
   }
 
   private Candidate ofSheet(String name) {

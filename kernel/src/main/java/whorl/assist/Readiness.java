@@ -12,8 +12,8 @@ import whorl.syntax.Parser;
 final class Readiness {
   private static final String INDENT = "    ";
 
-  /** Mistakes that more text can mend. */
-  private static final Set<String> OPEN = Set.of("unfinished", "paren-open", "block-empty");
+  /** Mistakes that more lines can mend. */
+  private static final Set<String> OPEN = Set.of("paren-open", "block-empty");
 
   private final String text;
   private final Source source;
@@ -50,10 +50,13 @@ final class Readiness {
 
   private boolean canBeMended(Diagnostic error) {
     return !lines.isEmpty()
-        && OPEN.contains(error.code())
-        && error.span().start() >= last().span().start()
         && !endsInEmptyLine()
-        && (!error.code().equals("unfinished") || goesOn());
+        && error.span().start() >= last().span().start()
+        && (OPEN.contains(error.code()) || (isAtTheEnd(error) && goesOn()));
+  }
+
+  private boolean isAtTheEnd(Diagnostic error) {
+    return error.span().end() >= last().span().end();
   }
 
   /** Whether a next line would belong to the last one. */

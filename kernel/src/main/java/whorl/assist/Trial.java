@@ -31,7 +31,7 @@ record Trial(String before, String after, boolean binding) {
     List<Token> tokens = at.tokens();
     String before = at.between(at.lineStart(), tokens.get(open).span().end());
     int end = at.index() + 1;
-    while (isOfUnit(tokens.get(end))) {
+    while (UnitSpan.isOfUnit(tokens.get(end))) {
       end++;
     }
     Token behind = tokens.get(end);
@@ -48,14 +48,6 @@ record Trial(String before, String after, boolean binding) {
       trials.add(new Trial(before, "]" + new Closing(at, open, draft).text(), false));
     }
     return trials;
-  }
-
-  private static boolean isOfUnit(Token token) {
-    return switch (token.kind()) {
-      case NAME, UNIT_SIGN, RAISED, CARET, NUMBER, OVER, TIMES, RAISED_DOT, DOT, OPEN, CLOSE ->
-          true;
-      default -> false;
-    };
   }
 
   /** Statements that a line with a unit behind a number may become, the likeliest first. */

@@ -3,7 +3,6 @@ package whorl.assist;
 import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Optional;
 import java.util.Set;
 import whorl.assist.Completion.Candidate;
 import whorl.assist.RankedUnits.Use;
@@ -14,9 +13,7 @@ import whorl.units.Unit;
 import whorl.units.UnitCatalogue;
 import whorl.units.UnitGuide;
 import whorl.units.UnitReader;
-import whorl.units.UnitSyntaxException;
 import whorl.units.UnitText;
-import whorl.units.UnknownUnitException;
 
 /** The units that may be meant in a place. */
 final class UnitCandidates {
@@ -100,7 +97,7 @@ final class UnitCandidates {
         draft.meaning(token.name().name()).ifPresent(meaning -> addUnits(meaning, units));
       } else if (token.is(Kind.OPEN_BRACKET) && at.line().closing(i) > 0) {
         Token close = tokens.get(at.line().closing(i));
-        read(at.inside(token, close).replaceFirst(",.*", "")).ifPresent(units::add);
+        UnitSpan.read(at.inside(token, close).replaceFirst(",.*", "")).ifPresent(units::add);
       }
     }
     fitting.kinds().stream()
@@ -173,16 +170,7 @@ final class UnitCandidates {
     }
     String whole = beginning + member;
     boolean open = whole.contains("(") && !whole.contains(")");
-    read(open ? whole + ")" : whole).ifPresent(unit -> found.add(member, unit, closeness, use));
-  }
-
-  private static Optional<UnitText> read(String text) {
-    try {
-      UnitText unit = UnitReader.read(text);
-      UNITS.resolve(unit);
-      return Optional.of(unit);
-    } catch (UnitSyntaxException | UnknownUnitException noUnit) {
-      return Optional.empty();
-    }
+    UnitSpan.read(open ? whole + ")" : whole)
+        .ifPresent(unit -> found.add(member, unit, closeness, use));
   }
 }

@@ -15,17 +15,28 @@ import whorl.units.kind.Readings;
  * @param value its value in coherent SI units
  * @param readings what it reads as in a formula
  * @param unit the coherent unit of its value
+ * @param words what it is
+ * @param source where its value comes from; empty where nobody asks
  */
-public record ConstantAtHand(String symbol, double value, Readings readings, Unit unit) {
-  private static final ConstantAtHand PI = new ConstantAtHand("π", Math.PI, Readings.PI, Unit.ONE);
+public record ConstantAtHand(
+    String symbol, double value, Readings readings, Unit unit, String words, String source) {
+  private static final ConstantAtHand PI =
+      new ConstantAtHand(
+          "π",
+          Math.PI,
+          Readings.PI,
+          Unit.ONE,
+          "ratio of the circumference of a circle to its diameter",
+          "");
 
-  /** Standard acceleration of free fall, exact by convention (3rd CGPM, 1901). */
   private static final ConstantAtHand STANDARD_FREE_FALL =
       new ConstantAtHand(
           "g_n",
           9.80665,
           Readings.of(Kind.named("acceleration")),
-          UnitCatalogue.standard().resolve(UnitReader.read("m/s^2")));
+          UnitCatalogue.standard().resolve(UnitReader.read("m/s^2")),
+          "standard acceleration of free fall",
+          "exact by convention, 3rd CGPM, 1901");
 
   private static final List<ConstantAtHand> ALL = List.of(PI, STANDARD_FREE_FALL);
 

@@ -60,6 +60,16 @@ final class Look {
       "border-left:4px double rgba(200,50,50,0.95);padding:2px 0 4px 10px;margin:0 0 8px 0";
   static final String PROBLEM = "font-weight:bold;white-space:normal";
 
+  static final String INFO = "margin:0 0 6px 0;line-height:1.4";
+  static final String INFO_TITLE =
+      "font-family:monospace;font-size:100%;font-weight:bold;white-space:pre-wrap";
+  static final String INFO_LEAD = "margin:2px 0 0 0";
+  static final String INFO_TABLE =
+      "border-collapse:collapse;margin:6px 0 0 0;font-size:100%;line-height:1.4;border:none";
+  static final String INFO_ROW = "background:transparent";
+  static final String INFO_WORD = CELL + "padding:1px 12px 1px 0;white-space:nowrap";
+  static final String INFO_FACT = CELL + "padding:1px 0;white-space:pre-wrap";
+
   static final String ITALIC = "font-style:italic";
   static final String BOLD_ITALIC = "font-style:italic;font-weight:bold";
   static final String UPRIGHT = "font-style:normal";

@@ -17,7 +17,12 @@ import whorl.sheet.CellId;
 import whorl.sheet.Sheet;
 
 class CompletionTest {
-  private static final Assistant ASSISTANT = new Assistant(Samples.sheet());
+  private static final Assistant ASSISTANT =
+      new Assistant(
+          Samples.sheet(),
+          Stream.of("%%java", "%%sheet", "%results", "%withdraw")
+              .map(command -> new Candidate(command, "magic", ""))
+              .toList());
 
   static Stream<String> lines() {
     return Samples.lines("completion.txt");

@@ -138,7 +138,11 @@ class RandomTextTest {
       Completion completion = ASSISTANT.complete(text, cursor);
       assertTrue(0 <= completion.start() && completion.start() <= completion.end(), text);
       assertTrue(completion.end() <= cursor, text);
+      ASSISTANT
+          .inspect(text, cursor, i % 2)
+          .ifPresent(card -> assertTrue(card.html().startsWith("<div") && !card.text().isBlank()));
     }
+    Assistant.completeness(text);
   }
 
   @Test
