@@ -10,8 +10,8 @@ import java.util.Optional;
  * @param offset where the rest begins in the cell
  */
 record CellText(PlainLanguage language, String body, int offset) {
-  private static final String JAVA = "%%java";
-  private static final String SHEET = "%%sheet";
+  static final String JAVA = "%%java";
+  static final String SHEET = "%%sheet";
 
   /**
    * Reads a cell.

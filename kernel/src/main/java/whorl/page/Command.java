@@ -14,21 +14,25 @@ import java.util.stream.Collectors;
 record Command(Word word, List<String> names) {
   /** The commands. */
   enum Word {
-    /** Lists what the sheet defines, and where. */
-    DEFINITIONS("%definitions"),
-    /** Shows the steps of every cell as they stand. */
-    RESULTS("%results"),
-    /** Withdraws definitions, by name. */
-    WITHDRAW("%withdraw");
+    DEFINITIONS("%definitions", "lists what the sheet defines, and where"),
+    RESULTS("%results", "shows the steps of every cell as they stand"),
+    WITHDRAW("%withdraw", "withdraws definitions by name; what uses them waits");
 
     private final String text;
+    private final String effect;
 
-    Word(String text) {
+    Word(String text, String effect) {
       this.text = text;
+      this.effect = effect;
     }
 
     String text() {
       return text;
+    }
+
+    /** What it does, for people. */
+    String effect() {
+      return effect;
     }
   }
 

@@ -32,7 +32,7 @@ public final class LivePage implements Page {
   private final JavaReads reads = new JavaReads();
   private final LiveSheet live = new LiveSheet(sheet, reads);
   private final JavaSide java = new JavaSide(sheet::quantity);
-  private final Assistant assistant = new Assistant(sheet);
+  private final Assistant assistant = new Assistant(sheet, words());
   private final Interruption interruption = new Interruption();
 
   /** Inputs of a console bear no ids; those of the next kernel must not be taken for them. */
@@ -43,6 +43,17 @@ public final class LivePage implements Page {
   /** An empty page. */
   public LivePage(PlainLanguage language) {
     this.language = language;
+  }
+
+  /** The words that may begin a cell, for completion. */
+  private static List<Completion.Candidate> words() {
+    var words = new ArrayList<Completion.Candidate>();
+    words.add(new Completion.Candidate(CellText.JAVA, "magic", "the cell is in Java"));
+    words.add(new Completion.Candidate(CellText.SHEET, "magic", "the cell is of the sheet"));
+    for (Command.Word word : Command.Word.values()) {
+      words.add(new Completion.Candidate(word.text(), "magic", word.effect()));
+    }
+    return words;
   }
 
   @Override
@@ -193,7 +204,13 @@ public final class LivePage implements Page {
 
   @Override
   public Optional<Bundle> inspect(String code, int cursor, int detail) {
-    return Optional.empty();
+    CellText text = CellText.of(code, language);
+    if (text.language() == PlainLanguage.JAVA || !text.holds(cursor)) {
+      return Optional.empty();
+    }
+    return assistant
+        .inspect(text.body(), cursor - text.offset(), detail)
+        .map(card -> bundle(card.html(), card.text()));
   }
 
   private static Bundle bundle(String html, String text) {
