@@ -18,11 +18,17 @@ import org.jspecify.annotations.Nullable;
  * behind with its thread; the object is of no use then, and another takes its place.
  */
 final class CellThread {
-  /** How long code may take to end after an interrupt. */
+  /** How long code may take to notice an interrupt. */
   private static final Duration GRACE = Duration.ofMillis(150);
 
+  /** How long code may take to end that has noticed it. */
+  private static final Duration LONGEST_GRACE = Duration.ofSeconds(1);
+
+  /** How often code that is to end is looked after. */
+  private static final Duration LOOK = Duration.ofMillis(20);
+
   /** How long code that was told to end is left in peace to put its things in order. */
-  private static final Duration PEACE = Duration.ofMillis(30);
+  private static final Duration PEACE = Duration.ofMillis(70);
 
   private static final InheritableThreadLocal<@Nullable CellThread> OWNER =
       new InheritableThreadLocal<>();
@@ -40,7 +46,7 @@ final class CellThread {
   private boolean asked;
   private boolean busy;
   private boolean shielded;
-  private long deadline;
+  private long askedAt;
 
   CellThread() {
     thread.setDaemon(true);
@@ -98,7 +104,7 @@ final class CellThread {
       return;
     }
     asked = true;
-    deadline = System.nanoTime() + GRACE.toNanos();
+    askedAt = System.nanoTime();
     Interruption.raise(this);
     if (busy && !shielded) {
       thread.interrupt();
@@ -171,13 +177,9 @@ final class CellThread {
     boolean interrupted = false;
     try {
       while (busy) {
-        long remaining = deadline - System.nanoTime();
-        if (asked && remaining <= 0) {
-          throw new Stop(leave());
-        }
         try {
           if (asked) {
-            TimeUnit.NANOSECONDS.timedWait(this, remaining);
+            awaitEnd();
           } else {
             wait();
           }
@@ -196,14 +198,22 @@ final class CellThread {
     }
   }
 
-  private Stop.Ending leave() {
-    left = true;
-    if (ignored) {
-      // It would only cost the next cells time to tell it again and again.
-      Interruption.lower(this);
-      return Stop.Ending.IGNORED;
+  private synchronized void awaitEnd() throws Stop, InterruptedException {
+    boolean noticed = !told.isEmpty() || !thread.isInterrupted();
+    Duration grace = noticed && !ignored ? LONGEST_GRACE : GRACE;
+    long remaining = askedAt + grace.toNanos() - System.nanoTime();
+    if (remaining > 0) {
+      // Whether it has noticed may change meanwhile.
+      TimeUnit.NANOSECONDS.timedWait(this, Math.min(remaining, LOOK.toNanos()));
+      return;
     }
-    return Stop.Ending.UNREACHED;
+    left = true;
+    if (told.isEmpty()) {
+      throw new Stop(Stop.Ending.UNREACHED);
+    }
+    // To tell it again and again would only cost the next cells time.
+    Interruption.lower(this);
+    throw new Stop(Stop.Ending.IGNORED);
   }
 
   private void work() {

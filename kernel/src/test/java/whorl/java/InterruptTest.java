@@ -1,6 +1,7 @@
 package whorl.java;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertInstanceOf;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -73,13 +74,18 @@ class InterruptTest {
           }
           """);
 
+  private static void assertEnded(JavaOutcome outcome) {
+    // On a busy machine the end of a cell may be late, so that its thread is left behind.
+    assertFalse(assertInstanceOf(JavaOutcome.Interrupted.class, outcome).restarted());
+  }
+
   @Test
   void endlessCellsEndAndLeaveTheirStateAHundredTimesInARow() throws Exception {
     try (var java = new JavaCells()) {
       java.run("int kept = 0;\nint cleared = 0;");
       for (int i = 1; i <= 100; i++) {
         String code = ENDLESS.get(i % ENDLESS.size());
-        assertEquals(new JavaOutcome.Interrupted(false, ""), java.interrupted(code), code);
+        assertEnded(java.interrupted(code));
         assertEquals(String.valueOf(i), java.run("++kept").result(), code);
       }
       int cleanings = 100 / ENDLESS.size();
@@ -109,8 +115,7 @@ class InterruptTest {
       assertTrue(interrupted.notice().contains("declarations of all cells in Java are gone"));
       assertTrue(java.failure("lost").startsWith("cannot find symbol: variable lost"));
       assertEquals("2", java.run("1 + 1").result());
-      assertEquals(
-          new JavaOutcome.Interrupted(false, ""), java.interrupted(ENDLESS.get(0)), "next run");
+      assertEnded(java.interrupted(ENDLESS.get(0)));
     }
   }
 
@@ -137,7 +142,7 @@ class InterruptTest {
       waiting.start();
       output.awaitPrint();
       waiting.interrupt();
-      assertEquals(new JavaOutcome.Interrupted(false, ""), outcome.get());
+      assertEnded(outcome.get());
     }
   }
 
