@@ -27,7 +27,7 @@ public record Execution(OptionalInt count, List<Output> outputs) {
   /** The members of a code cell that hold it. */
   Map<String, JsonElement> members() {
     var all = new JsonArray();
-    outputs.forEach(output -> all.add(output.json()));
+    outputs.forEach(output -> all.add(output.json(count.orElse(0))));
     JsonElement number =
         count.isPresent() ? new JsonPrimitive(count.getAsInt()) : JsonNull.INSTANCE;
     var members = new LinkedHashMap<String, JsonElement>();

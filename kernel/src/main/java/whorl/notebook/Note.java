@@ -18,6 +18,7 @@ import java.util.stream.Collectors;
  */
 public final class Note {
   private static final String LANGUAGE = "whorl";
+  private static final String JAVA = "java";
   private static final String CELLS = "cells";
   private static final int FORMAT = 4;
 
@@ -91,12 +92,12 @@ public final class Note {
     if (root.member(CELLS).filter(Json::isArray).isEmpty()) {
       throw new NoteFileException(name + " is JSON, but not a notebook: it has no list of cells");
     }
-    Optional<String> language = language(root);
-    if (language.isPresent() && !language.get().toLowerCase(Locale.ROOT).equals(LANGUAGE)) {
+    String language = language(root);
+    if (!language.toLowerCase(Locale.ROOT).equals(LANGUAGE) && !isJava(language)) {
       throw new NoteFileException(
           name
               + " is a note in "
-              + language.get()
+              + language
               + ", not in Whorl; to make it one, choose the kernel Whorl in JupyterLab and save it");
     }
   }
@@ -128,7 +129,7 @@ public final class Note {
   /**
    * The language a notebook says it is in: that of its kernel, which a change of kernel sets first.
    */
-  private static Optional<String> language(Json root) {
+  private static String language(Json root) {
     Optional<Json> metadata = root.member("metadata");
     return metadata
         .flatMap(about -> about.member("kernelspec"))
@@ -139,10 +140,16 @@ public final class Note {
                     .flatMap(about -> about.member("language_info"))
                     .flatMap(language -> language.member("name")))
         .filter(Json::isString)
-        .map(Json::string);
+        .map(Json::string)
+        .orElse(LANGUAGE);
+  }
+
+  private static boolean isJava(String language) {
+    return language.toLowerCase(Locale.ROOT).equals(JAVA);
   }
 
   private static List<Cell> cellsOf(String name, Json root) throws NoteFileException {
+    CellKind plain = isJava(language(root)) ? CellKind.JAVA : CellKind.SHEET;
     var cells = new ArrayList<Cell>();
     for (Json json : root.member(CELLS).orElseThrow().elements()) {
       int position = cells.size() + 1;
@@ -152,7 +159,7 @@ public final class Note {
       String source = source(name, position, json);
       String type =
           json.member("cell_type").filter(Json::isString).map(Json::string).orElse("unknown");
-      cells.add(new Cell(position, CellKind.of(type, source), source, json));
+      cells.add(new Cell(position, CellKind.of(type, source, plain), source, json));
     }
     return cells;
   }

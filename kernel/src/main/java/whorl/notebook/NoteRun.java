@@ -3,17 +3,9 @@ package whorl.notebook;
 import com.google.gson.JsonObject;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
-import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
-import whorl.diagnostic.Diagnostic;
-import whorl.diagnostic.Source;
-import whorl.diagnostic.Span;
 import whorl.report.NoteRecord;
-import whorl.sheet.CellId;
-import whorl.sheet.CellOutcome;
-import whorl.sheet.Sheet;
 import whorl.sheet.Step;
 
 /**
@@ -32,63 +24,10 @@ public final class NoteRun {
 
   /** Runs a note. */
   public static NoteRun of(Note note, JavaCells java) {
-    var sheet = new Sheet();
-    var outcomes = new LinkedHashMap<Cell, CellOutcome>();
-    for (Cell cell : note.cells()) {
-      if (cell.kind() == CellKind.SHEET) {
-        outcomes.put(cell, sheet.run(id(cell), "cell " + cell.position(), cell.source()));
-      }
+    try (var run = new Running(java)) {
+      note.cells().stream().filter(cell -> cell.kind().isCode()).forEach(run::run);
+      return new NoteRun(run.cells());
     }
-    var names = new LinkedHashSet<String>();
-    outcomes.values().forEach(outcome -> names.addAll(outcome.attempted()));
-    var runs = new ArrayList<CellRun>();
-    for (Cell cell : note.cells()) {
-      CellOutcome outcome = outcomes.get(cell);
-      if (outcome != null) {
-        runs.add(run(cell, outcome, sheet.steps(id(cell)), names));
-      } else if (cell.kind().isCode()) {
-        runs.add(foreign(cell, java));
-      }
-    }
-    return new NoteRun(runs);
-  }
-
-  /** Ids of cells in the file may be missing or given twice; their positions are not. */
-  private static CellId id(Cell cell) {
-    return new CellId("cell " + cell.position());
-  }
-
-  private static CellRun run(Cell cell, CellOutcome outcome, List<Step> steps, Set<String> names) {
-    if (!outcome.tookEffect()) {
-      return CellRun.refused(cell, outcome.source(), outcome.errors());
-    }
-    var errors = new ArrayList<Diagnostic>();
-    for (Step step : steps) {
-      if (step instanceof Step.Broken broken) {
-        errors.add(broken.diagnostic());
-      } else if (step instanceof Step.Waiting waiting) {
-        // What waits for a definition that is in error follows from that error.
-        waiting.undefined(names).ifPresent(errors::add);
-      }
-    }
-    List<String> notices = outcome.notices().stream().map(Diagnostic::problem).toList();
-    return new CellRun(cell, outcome.source(), true, errors, steps, notices);
-  }
-
-  private static CellRun foreign(Cell cell, JavaCells java) {
-    var source = new Source(cell.source());
-    int line = source.line(source.text().length() - source.text().stripLeading().length());
-    Span head = source.lineSpan(line);
-    Diagnostic error =
-        cell.kind() == CellKind.JAVA
-            ? Diagnostic.of("java-cell", java.problem(), head, "", "")
-            : Diagnostic.of(
-                "foreign-cell",
-                "This cell is written for another kernel.",
-                head,
-                "",
-                "A cell holds statements of the sheet language; remove the first line, or the cell.");
-    return CellRun.refused(cell, source, List.of(error));
   }
 
   /** The code cells in order, with what they came to. */

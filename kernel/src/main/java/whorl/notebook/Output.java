@@ -3,13 +3,21 @@ package whorl.notebook;
 import com.google.gson.JsonArray;
 import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
+import com.google.gson.JsonPrimitive;
 import java.util.List;
 import java.util.Map;
 
 /** An output of a cell. */
 public sealed interface Output {
-  /** The output as the notebook format has it. */
-  JsonObject json();
+  /**
+   * The output as the notebook format has it.
+   *
+   * @param count the number in front of its cell
+   */
+  JsonObject json(int count);
+
+  /** What a terminal shows of it; empty where it has no text. */
+  String text();
 
   /**
    * Something to look at, in one or more forms.
@@ -24,13 +32,50 @@ public sealed interface Output {
     }
 
     @Override
-    public JsonObject json() {
+    public JsonObject json(int count) {
       var json = new JsonObject();
       json.add("data", CanonicalJson.bundle(data));
       json.add("metadata", CanonicalJson.sorted(metadata));
       json.addProperty("output_type", "display_data");
       return json;
     }
+
+    @Override
+    public String text() {
+      return plain(data);
+    }
+  }
+
+  /**
+   * The value of a cell, in one or more forms.
+   *
+   * @param data by MIME type; texts as strings
+   * @param metadata by MIME type
+   */
+  record Value(Map<String, JsonElement> data, JsonObject metadata) implements Output {
+    /** Copies the map. */
+    public Value {
+      data = Map.copyOf(data);
+    }
+
+    @Override
+    public JsonObject json(int count) {
+      var json = new JsonObject();
+      json.add("data", CanonicalJson.bundle(data));
+      json.addProperty("execution_count", count);
+      json.add("metadata", CanonicalJson.sorted(metadata));
+      json.addProperty("output_type", "execute_result");
+      return json;
+    }
+
+    @Override
+    public String text() {
+      return plain(data);
+    }
+  }
+
+  private static String plain(Map<String, JsonElement> data) {
+    return data.get("text/plain") instanceof JsonPrimitive text ? text.getAsString() : "";
   }
 
   /**
@@ -40,7 +85,7 @@ public sealed interface Output {
    */
   record Stream(String name, String text) implements Output {
     @Override
-    public JsonObject json() {
+    public JsonObject json(int count) {
       var json = new JsonObject();
       json.addProperty("name", name);
       json.addProperty("output_type", "stream");
@@ -63,7 +108,7 @@ public sealed interface Output {
     }
 
     @Override
-    public JsonObject json() {
+    public JsonObject json(int count) {
       var json = new JsonObject();
       json.addProperty("ename", name);
       json.addProperty("evalue", value);
@@ -72,6 +117,12 @@ public sealed interface Output {
       traceback.forEach(lines::add);
       json.add("traceback", lines);
       return json;
+    }
+
+    /** An error is told apart from what is printed. */
+    @Override
+    public String text() {
+      return "";
     }
   }
 }

@@ -22,7 +22,7 @@ public final class PrintedNote {
       if (cell.kind() == CellKind.MARKDOWN) {
         parts.addAll(headings(cell.source()));
       } else if (cell.kind().isCode()) {
-        String text = CellOutputs.report(reports.next()).text();
+        String text = CellOutputs.text(reports.next());
         if (!text.isEmpty()) {
           parts.add(text);
         }

@@ -15,8 +15,7 @@ public record ProgressReport(String html, String text) {
    */
   public static ProgressReport of(int done, int total) {
     String text = "Recalculating: " + done + " of " + total + " statements.";
-    Html html =
-        Html.styled("div", Look.NOTE, Html.progress(done, total), Html.text(" " + text));
+    Html html = Html.styled("div", Look.NOTE, Html.progress(done, total), Html.text(" " + text));
     return new ProgressReport(html.toString(), text);
   }
 }

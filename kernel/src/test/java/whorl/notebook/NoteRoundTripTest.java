@@ -96,7 +96,7 @@ class NoteRoundTripTest {
   private static JsonElement outputs(Output... outputs) {
     var array = new JsonArray();
     for (Output output : outputs) {
-      array.add(output.json());
+      array.add(output.json(1));
     }
     return array;
   }

@@ -53,11 +53,40 @@ class NoteRunTest {
 
   @Test
   void cellsOfOtherLanguagesAreErrors() throws NoteFileException {
+    assertEquals(List.of("1: This cell is written for another kernel."), problems("\n%%html\n<p>"));
+  }
+
+  @Test
+  void cellsInJavaAreErrorsWhereTheyAreRefused() throws NoteFileException {
+    NoteRun run = NoteRun.of(Notes.of("%%java\nint x;", "k = 1"), JavaCells.REFUSED);
     assertEquals(
-        List.of(
-            "1: This version does not run cells in Java.",
-            "2: This cell is written for another kernel."),
-        problems("%%java\nint x;", "\n%%html\n<p>"));
+        List.of("Cells in Java are refused here."),
+        run.cells().get(0).errors().stream().map(Diagnostic::problem).toList());
+    assertEquals(List.of(), run.cells().get(1).errors());
+  }
+
+  @Test
+  void cellsInJavaReadTheSheetAndGiveItFunctions() throws NoteFileException {
+    NoteRun run =
+        Notes.run(
+            Notes.of(
+                "v = drag(3 m/s)",
+                "%%java\nsheet.function(\"drag(v [m/s]) [N]\", v -> 2 * v * v);\nint k = 6;",
+                "n [rpm] = 600",
+                "%%java\nSystem.out.println(sheet.value(\"n\", \"rpm\"));\nk * 7"));
+    JsonObject drag = run.record().getAsJsonObject("definitions").getAsJsonObject("v");
+    assertEquals(18, drag.get("si").getAsDouble());
+    List<Output> printed = run.cells().get(3).printed();
+    assertEquals(List.of("600.0\n", "42"), printed.stream().map(Output::text).toList());
+    assertEquals("execute_result", printed.get(1).json(4).get("output_type").getAsString());
+  }
+
+  @Test
+  void errorsInJavaStandAtTheLineOfTheCell() throws NoteFileException {
+    CellRun run = Notes.run(Notes.of("%%java\nint a = 1;\nint b = a / 0;")).cells().get(0);
+    Diagnostic error = run.errors().get(0);
+    assertEquals(3, run.source().line(error.span().start()));
+    assertEquals("ArithmeticException", run.errorName());
   }
 
   @Test

@@ -30,6 +30,6 @@ final class Notes {
   }
 
   static NoteRun run(Note note) {
-    return NoteRun.of(note, JavaCells.NOT_RUN);
+    return NoteRun.of(note, JavaCells.RUN);
   }
 }
