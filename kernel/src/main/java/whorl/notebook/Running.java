@@ -74,7 +74,8 @@ final class Running implements AutoCloseable {
         cell,
         "java-cell",
         "Cells in Java are refused here.",
-        "A program can do anything; let it run only if you trust the author of the note.");
+        "A program can do anything. If you trust the author of the note, let it run: without --no-java,"
+            + " or with recheck --java.");
   }
 
   private static Ran foreign(Cell cell) {
