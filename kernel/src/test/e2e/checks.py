@@ -99,7 +99,7 @@ def run(description, checks):
                 check(pathlib.Path(folder).resolve())
             except Exception as problem:  # any failure of a check is reported as one
                 failed += 1
-                print(f"FAIL  {name}: {type(problem).__name__}: {problem}", flush=True)
+                print(f"FAIL  {name}: {type(problem).__name__}: {problem}"[:4000], flush=True)
                 break
         passed += 1
         print(f"ok    {name}", flush=True)

@@ -1,18 +1,15 @@
 #!/usr/bin/env python3
 """End-to-end checks of the whorl command, as a user starts it. Needs Python 3.9 and nothing else.
 
-Where nbformat can be installed into a private environment, executed notebooks are also checked by
-it. Stops at the first check that fails.
+Stops at the first check that fails.
 """
 
 import copy
 import hashlib
 import json
 import pathlib
-import shutil
 import subprocess
 import sys
-import venv
 
 from checks import DEMOS, ROOT, STEPS, WHORL, code, notebook, prose, read, run, whorl, write
 
@@ -301,46 +298,6 @@ def demos_run_recheck_and_keep_their_bytes(folder):
         whorl("recheck", demo).expect(result.status, out="All agrees")
 
 
-def jupyter_reads_executed_notes_and_writes_the_same_bytes(folder):
-    python = python_with_nbformat()
-    if python is None:
-        print("      (left out: nbformat cannot be installed here)")
-        return
-    for demo in DEMOS:
-        whorl("run", demo, "--out", folder / demo.name)
-        subprocess.run(
-            [
-                python,
-                "-c",
-                "import sys, nbformat\n"
-                "note = nbformat.read(sys.argv[1], as_version=nbformat.NO_CONVERT)\n"
-                "nbformat.validate(note)\n"
-                "nbformat.write(note, sys.argv[1] + '.again', version=nbformat.NO_CONVERT)\n",
-                folder / demo.name,
-            ],
-            check=True,
-        )
-        again = (folder / (demo.name + ".again")).read_bytes()
-        assert again == (folder / demo.name).read_bytes(), f"Jupyter changes {demo.name}"
-
-
-def python_with_nbformat():
-    """A Python that has nbformat, in a private environment; None where it cannot be had."""
-    place = ROOT / "kernel" / "target" / "e2e-python"
-    python = place / "bin" / "python"
-    if not (place / "ready").exists():
-        shutil.rmtree(place, ignore_errors=True)
-        try:
-            venv.create(place, with_pip=True)
-            quiet = {"stdout": subprocess.DEVNULL, "stderr": subprocess.DEVNULL}
-            install = [python, "-m", "pip", "install", "--quiet", "nbformat"]
-            subprocess.run(install, check=True, timeout=300, **quiet)
-        except (OSError, subprocess.SubprocessError):
-            return None
-        (place / "ready").touch()
-    return python
-
-
 CHECKS = [
     the_launcher_tells_its_version,
     the_launcher_works_through_links_from_any_folder,
@@ -361,7 +318,6 @@ CHECKS = [
     results_that_cannot_be_written_are_status_3_and_leave_nothing,
     a_recheck_finds_what_changed,
     demos_run_recheck_and_keep_their_bytes,
-    jupyter_reads_executed_notes_and_writes_the_same_bytes,
 ]
 
 
