@@ -1,5 +1,6 @@
 package whorl.eval;
 
+import java.util.List;
 import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
 import whorl.check.Operation.AngleBetween;
@@ -172,7 +173,7 @@ final class RealCodeWriter implements RealCases<Code.Real> {
 
   @Override
   public Code.Real routineCall(RoutineCall call) {
-    Code.Real[] arguments = call.arguments().stream().map(writer::real).toArray(Code.Real[]::new);
+    List<Code.Real> arguments = call.arguments().stream().map(writer::real).toList();
     return new RoutineCode(writer.site(call.span()), call.routine(), arguments);
   }
 }

@@ -1,6 +1,7 @@
 package whorl.eval;
 
 import java.util.Arrays;
+import java.util.List;
 import whorl.check.Routine;
 import whorl.check.RoutineFailure;
 import whorl.eval.NumericFailure.Reason;
@@ -9,12 +10,13 @@ import whorl.eval.NumericFailure.Reason;
  * A call of a routine. What it does cannot be counted beforehand, so that each call looks whether
  * the evaluation is to end.
  */
-record RoutineCode(Site site, Routine routine, Code.Real[] arguments) implements Code.Real {
+record RoutineCode(Site site, Routine routine, List<Code.Real> arguments) implements Code.Real {
   @Override
   public double in(Activation activation) {
-    double[] values = new double[arguments.length];
-    for (int i = 0; i < values.length; i++) {
-      values[i] = arguments[i].in(activation);
+    double[] values = new double[arguments.size()];
+    int slot = 0;
+    for (Code.Real argument : arguments) {
+      slot = argument.store(activation, values, slot);
     }
     if (Thread.currentThread().isInterrupted()) {
       throw interrupted();
