@@ -38,20 +38,20 @@ public record Recalculated(
   public static Recalculated of(List<CellOutcome> outcomes) {
     var turned = new LinkedHashMap<String, Boolean>();
     var stopped = new TreeSet<String>();
-    var before = new LinkedHashMap<String, Quantity>();
-    var now = new LinkedHashMap<String, Quantity>();
+    var changed = new LinkedHashMap<String, CellOutcome.Change>();
     for (CellOutcome outcome : outcomes) {
       outcome.turned().forEach(turn -> turned.put(turn.text(), turn.holds()));
       stopped.addAll(outcome.stopped());
       for (CellOutcome.Change change : outcome.changes()) {
-        before.putIfAbsent(change.name(), change.before());
-        now.put(change.name(), change.now());
+        changed.merge(
+            change.name(),
+            change,
+            (first, last) -> new CellOutcome.Change(first.name(), first.before(), last.now()));
         stopped.remove(change.name());
       }
     }
     List<CellOutcome.Change> changes =
-        now.keySet().stream()
-            .map(name -> new CellOutcome.Change(name, before.get(name), now.get(name)))
+        changed.values().stream()
             .filter(change -> !shown(change.now()).equals(shown(change.before())))
             .toList();
     return new Recalculated(turned, stopped, changes);
