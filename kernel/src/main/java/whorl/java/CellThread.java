@@ -50,7 +50,6 @@ final class CellThread {
 
   CellThread() {
     thread.setDaemon(true);
-    thread.start();
   }
 
   /** The one whose code the current thread runs, which may be another that the code started. */
@@ -168,6 +167,9 @@ final class CellThread {
   private synchronized void start(FutureTask<?> task) throws Stop {
     if (asked) {
       throw new Stop(Stop.Ending.ENDED);
+    }
+    if (thread.getState() == Thread.State.NEW) {
+      thread.start();
     }
     busy = true;
     tasks.add(task);

@@ -54,6 +54,7 @@ final class JavaSession implements AutoCloseable {
   private final Frames frames;
   private final CellCalls calls;
   private final Snippets snippets;
+  private final JavaServices services;
   private boolean begun;
 
   /**
@@ -70,6 +71,7 @@ final class JavaSession implements AutoCloseable {
     frames = new Frames(origins);
     calls = new CellCalls(thread, new JavaErrors(frames));
     snippets = new Snippets(shell, control, origins, calls, thread);
+    services = new JavaServices(shell, kernel.getMagicsRegistry());
     new Magics(this).register(kernel.getMagicsRegistry());
     IMPORTS.forEach(name -> shell.eval("import " + name + ";"));
   }
@@ -88,6 +90,11 @@ final class JavaSession implements AutoCloseable {
 
   ClassLoader loader() {
     return loader;
+  }
+
+  /** What answers questions about texts. */
+  JavaServices services() {
+    return services;
   }
 
   /** What tells where in cells an exception came from. */

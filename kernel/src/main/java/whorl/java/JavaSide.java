@@ -1,5 +1,6 @@
 package whorl.java;
 
+import com.google.gson.JsonObject;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -9,6 +10,8 @@ import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
 import java.util.concurrent.locks.ReentrantLock;
 import org.jspecify.annotations.Nullable;
+import whorl.assist.Completeness;
+import whorl.assist.Completion;
 import whorl.check.Routine;
 import whorl.check.RoutineFailure;
 
@@ -148,6 +151,29 @@ public final class JavaSide implements AutoCloseable {
         turn.unlock();
       }
     };
+  }
+
+  /**
+   * What could be typed at a place of a cell.
+   *
+   * @param cursor an index into the text
+   */
+  public Completion complete(String code, int cursor) {
+    return await(() -> session().services().complete(code, within(code, cursor)));
+  }
+
+  /** What is known of the word at a place of a cell: texts by media type. */
+  public Optional<JsonObject> inspect(String code, int cursor) {
+    return await(() -> session().services().inspect(code, within(code, cursor)));
+  }
+
+  private static int within(String code, int cursor) {
+    return Math.max(0, Math.min(cursor, code.length()));
+  }
+
+  /** Whether a console may run a text as it is. */
+  public Completeness completeness(String code) {
+    return await(() -> session().services().completeness(code));
   }
 
   /** Ends the cell or the function that runs, if one does; from any thread. */
