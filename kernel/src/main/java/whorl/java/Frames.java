@@ -107,11 +107,13 @@ final class Frames {
   }
 
   private static List<String> library(List<StackTraceElement> frames) {
+    // How the kernel came to refuse something is no help.
+    int own = 0;
+    for (int i = 0; i < frames.size(); i++) {
+      own = frames.get(i).getClassName().startsWith("whorl.") ? i + 1 : own;
+    }
     List<String> lines =
-        frames.stream()
-            .filter(frame -> !frame.getClassName().startsWith("whorl."))
-            .map(frame -> "at " + frame)
-            .toList();
+        frames.subList(own, frames.size()).stream().map(frame -> "at " + frame).toList();
     if (lines.size() <= MOST_OF_LIBRARIES) {
       return lines;
     }

@@ -11,6 +11,7 @@ import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
 import whorl.java.JavaOutcome;
 import whorl.java.JavaSide;
+import whorl.java.SheetReading;
 import whorl.report.ErrorText;
 import whorl.sheet.CellId;
 import whorl.sheet.CellOutcome;
@@ -21,7 +22,7 @@ import whorl.sheet.Step;
 final class Running implements AutoCloseable {
   private final JavaCells allowed;
   private final Sheet sheet = new Sheet();
-  private final JavaSide java = new JavaSide(sheet::quantity);
+  private final JavaSide java = new JavaSide(SheetReading.of(sheet));
   private final Printed printed = new Printed();
   private final Map<Cell, Ran> ran = new LinkedHashMap<>();
 

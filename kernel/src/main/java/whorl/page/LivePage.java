@@ -12,6 +12,7 @@ import whorl.assist.Completion;
 import whorl.diagnostic.Source;
 import whorl.java.JavaOutcome;
 import whorl.java.JavaSide;
+import whorl.java.SheetReading;
 import whorl.report.CellReport;
 import whorl.report.DefinitionList;
 import whorl.report.ErrorText;
@@ -31,7 +32,7 @@ public final class LivePage implements Page {
   private final Sheet sheet = new Sheet();
   private final JavaReads reads = new JavaReads();
   private final LiveSheet live = new LiveSheet(sheet, reads);
-  private final JavaSide java = new JavaSide(sheet::quantity);
+  private final JavaSide java = new JavaSide(SheetReading.of(sheet));
   private final Assistant assistant = new Assistant(sheet, words());
   private final Interruption interruption = new Interruption();
 
@@ -205,12 +206,15 @@ public final class LivePage implements Page {
   @Override
   public Optional<Bundle> inspect(String code, int cursor, int detail) {
     CellText text = CellText.of(code, language);
-    if (text.language() == PlainLanguage.JAVA || !text.holds(cursor)) {
+    if (!text.holds(cursor)) {
       return Optional.empty();
     }
-    return assistant
-        .inspect(text.body(), cursor - text.offset(), detail)
-        .map(card -> bundle(card.html(), card.text()));
+    int place = cursor - text.offset();
+    return text.language() == PlainLanguage.JAVA
+        ? java.inspect(text.body(), place).map(Bundle::of)
+        : assistant
+            .inspect(text.body(), place, detail)
+            .map(card -> bundle(card.html(), card.text()));
   }
 
   private static Bundle bundle(String html, String text) {
@@ -223,17 +227,22 @@ public final class LivePage implements Page {
   @Override
   public Completion complete(String code, int cursor) {
     CellText text = CellText.of(code, language);
-    if (text.language() == PlainLanguage.JAVA || !text.holds(cursor)) {
+    if (!text.holds(cursor)) {
       return Completion.none(cursor);
     }
-    return assistant.complete(text.body(), cursor - text.offset()).movedBy(text.offset());
+    int place = cursor - text.offset();
+    Completion completion =
+        text.language() == PlainLanguage.JAVA
+            ? java.complete(text.body(), place)
+            : assistant.complete(text.body(), place);
+    return completion.movedBy(text.offset());
   }
 
   @Override
   public Completeness completeness(String code) {
     CellText text = CellText.of(code, language);
     return text.language() == PlainLanguage.JAVA
-        ? new Completeness.Unknown()
+        ? java.completeness(text.body())
         : Assistant.completeness(text.body());
   }
 

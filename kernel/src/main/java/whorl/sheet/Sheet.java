@@ -155,7 +155,7 @@ public final class Sheet {
     var source = new Source(folded);
     Optional<Node> node = contents.graph().definition(folded);
     if (node.isEmpty()) {
-      List<String> near = new SimilarNames(contents.graph().names()).to(folded);
+      List<String> near = near(folded);
       Diagnostic error = SheetMessages.notDefined(folded, new Span(0, source.length()), near);
       return CellOutcome.refused(source, List.of(error), List.of(), Set.of());
     }
@@ -190,6 +190,11 @@ public final class Sheet {
   /** What a name stands for, or empty if it has no value. */
   public Optional<Quantity> quantity(String name) {
     return contents.results().quantity(GreekNames.fold(name));
+  }
+
+  /** Names that are spelled like one that has no definition, the nearest first. */
+  public List<String> near(String name) {
+    return new SimilarNames(contents.graph().names()).to(GreekNames.fold(name));
   }
 
   /** All definitions, by cell in the order in which the cells first took effect. */

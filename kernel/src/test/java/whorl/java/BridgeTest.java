@@ -27,19 +27,7 @@ import whorl.sheet.Sheet;
 @Timeout(value = 2, unit = TimeUnit.MINUTES)
 class BridgeTest {
   private static final Sheet SHEET = new Sheet();
-  private static final JavaCells JAVA =
-      new JavaCells(
-          new SheetReading() {
-            @Override
-            public Optional<whorl.sheet.Quantity> quantity(String name) {
-              return SHEET.quantity(name);
-            }
-
-            @Override
-            public List<String> near(String name) {
-              return name.equals("Lx") ? List.of("L") : List.of();
-            }
-          });
+  private static final JavaCells JAVA = new JavaCells(SheetReading.of(SHEET));
 
   @BeforeAll
   static void define() {
@@ -49,6 +37,7 @@ class BridgeTest {
             "cell [1]",
             """
             n [rpm] = 6000
+            speed = n
             I [kg·m²] = 41.715
             L [kN·m·s] = I * n
             T [N·m] = 350
@@ -86,7 +75,9 @@ class BridgeTest {
 
   static Stream<Arguments> mistakes() {
     return Stream.of(
-        Arguments.of("sheet.value(\"Lx\", \"kg\")", "The sheet has no value for Lx; near it are L"),
+        Arguments.of(
+            "sheet.value(\"spede\", \"rpm\")",
+            "The sheet has no value for spede; near it are speed"),
         Arguments.of("sheet.quantity(\"zzz\")", "The sheet has no value for zzz"),
         Arguments.of(
             "sheet.value(\"T\", \"J\")",
