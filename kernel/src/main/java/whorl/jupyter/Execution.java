@@ -37,12 +37,20 @@ final class Execution implements Handler {
     }
   }
 
+  /**
+   * Notebooks send the cells of a run of all cells one by one, whether or not one has failed
+   * already, with gaps of up to so many milliseconds.
+   */
+  private static final long GAP_IN_RUN = 200;
+
   private final Supplier<Page> page;
   private final Inbox inbox;
   private final History history;
   private final Outbox outbox;
   private final Questions questions;
   private final Log log;
+
+  private volatile boolean interrupted;
 
   /** The number of the last cell that was remembered. */
   private int count;
@@ -89,7 +97,13 @@ final class Execution implements Handler {
     }
   }
 
+  /** Is told that the cell that runs, if one does, is about to be interrupted; from any thread. */
+  void expectInterrupt() {
+    interrupted = true;
+  }
+
   private CellAnswer run(Message message, Order order) {
+    interrupted = false;
     var front = new CellFront(message, count, order.silent(), order.mayAsk(), outbox, questions);
     try {
       return page.get()
@@ -107,6 +121,7 @@ final class Execution implements Handler {
       return new CellAnswer.Failed(e.getClass().getSimpleName(), summary, List.of(summary));
     } finally {
       front.end();
+      Thread.interrupted();
     }
   }
 
@@ -129,7 +144,9 @@ final class Execution implements Handler {
     }
     // Before the answer, for what is sent after it was read is to run.
     if (order.stopsOthers()) {
-      inbox.abort();
+      Message message = request.message();
+      boolean inRun = cell(message).isPresent() && !interrupted;
+      inbox.abort(message.route().get(0), inRun ? GAP_IN_RUN : 0);
     }
     error.addProperty("execution_count", count);
     request.reply("error", error, metadata);

@@ -3,6 +3,7 @@ package whorl.jupyter;
 import com.google.gson.JsonObject;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -32,6 +33,7 @@ public final class Kernel {
   private final Inbox shellInbox = new Inbox();
   private final Inbox controlInbox = new Inbox();
   private final Questions questions;
+  private final Execution execution;
   private final Sockets sockets;
   private final Outbox outbox;
   private final CompletableFuture<Page> page = new CompletableFuture<>();
@@ -67,10 +69,10 @@ public final class Kernel {
             "interrupt_request", this::interrupt,
             "shutdown_request", this::shutDown);
     var history = new History();
+    execution = new Execution(page::join, shellInbox, history, outbox, questions, log);
     var onShell = new HashMap<String, Handler>();
     onShell.put("kernel_info_request", info);
-    onShell.put(
-        "execute_request", new Execution(page::join, shellInbox, history, outbox, questions, log));
+    onShell.put("execute_request", execution);
     onShell.put("history_request", history);
     onShell.put("shutdown_request", this::shutDown);
     onShell.putAll(new CodeQuestions(page::join).handlers());
@@ -113,9 +115,6 @@ public final class Kernel {
    */
   public void run() throws KernelException {
     List.of(moving, sending, control, shell, loading).forEach(Thread::start);
-    var state = new JsonObject();
-    state.addProperty("execution_state", "starting");
-    outbox.publish("status", new JsonObject(), state);
     try {
       ended.await();
     } catch (InterruptedException e) {
@@ -146,6 +145,7 @@ public final class Kernel {
   }
 
   private void interruptCell() {
+    execution.expectInterrupt();
     if (page.isDone() && !page.isCompletedExceptionally()) {
       page.join().interrupt();
     }
@@ -187,6 +187,8 @@ public final class Kernel {
 
   /** Passes on what arrives at the sockets. */
   private final class Arrivals implements Sockets.Receiver {
+    private boolean welcomed;
+
     @Override
     public void received(Channel channel, List<byte[]> frames) {
       switch (channel) {
@@ -197,14 +199,26 @@ public final class Kernel {
       }
     }
 
+    /** The first that comes also learns that the kernel has just started. */
     @Override
-    public List<byte[]> welcome(byte[] topic) {
+    public List<List<byte[]>> welcome(byte[] topic) {
+      var messages = new ArrayList<List<byte[]>>();
+      String text = new String(topic, StandardCharsets.UTF_8);
+      messages.add(message(topic, "iopub_welcome", "subscription", text));
+      if (!welcomed) {
+        welcomed = true;
+        messages.add(message(topic, "status", "execution_state", "starting"));
+      }
+      return messages;
+    }
+
+    private List<byte[]> message(byte[] topic, String type, String field, String value) {
       var content = new JsonObject();
-      content.addProperty("subscription", new String(topic, StandardCharsets.UTF_8));
+      content.addProperty(field, value);
       return format.write(
           new Message(
               List.of(topic),
-              session.header("iopub_welcome"),
+              session.header(type),
               new JsonObject(),
               new JsonObject(),
               content,

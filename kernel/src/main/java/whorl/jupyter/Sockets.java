@@ -1,14 +1,15 @@
 package whorl.jupyter;
 
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Deque;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.concurrent.TimeUnit;
-import org.jspecify.annotations.Nullable;
 import org.zeromq.SocketType;
 import org.zeromq.ZContext;
 import org.zeromq.ZMQ;
@@ -26,8 +27,8 @@ final class Sockets implements Runnable, Outbox.Carrier {
     /** On shell, control or stdin. */
     void received(Channel channel, List<byte[]> frames);
 
-    /** What a front end is told that wants all that is published on a topic from now on. */
-    List<byte[]> welcome(byte[] topic);
+    /** Messages to a front end that wants to hear of a topic from now on. */
+    List<List<byte[]>> welcome(byte[] topic);
   }
 
   private static final List<Channel> REQUESTS =
@@ -63,10 +64,10 @@ final class Sockets implements Runnable, Outbox.Carrier {
   private final Receiver receiver;
   private final Log log;
 
-  /** What could not be published yet. */
-  private @Nullable List<byte[]> waiting;
+  /** What is to be published, in order; nearly always nothing, for nearly always there is room. */
+  private final Deque<List<byte[]>> unpublished = new ArrayDeque<>();
 
-  private long waitingSince;
+  private long lastPublished;
   private boolean ended;
 
   /** Binds the sockets. */
@@ -135,23 +136,18 @@ final class Sockets implements Runnable, Outbox.Carrier {
     poller.register(outgoing, Poller.POLLIN);
     sockets.values().forEach(socket -> poller.register(socket, Poller.POLLIN));
     while (!ended) {
-      if (poller.poll(waiting == null ? -1 : 0) < 0) {
+      if (poller.poll(unpublished.isEmpty() ? -1 : 0) < 0) {
         throw new IllegalStateException("the sockets cannot be watched");
       }
       for (Channel channel : REQUESTS) {
         takeIn(channel);
       }
       returnHeartbeat();
-      if (waiting != null) {
-        publish(waiting);
-      }
-      // A front end is welcomed before it hears anything else.
-      if (waiting == null) {
-        welcome(received(socket(Channel.IOPUB)));
-      }
-      if (waiting == null) {
+      welcome(received(socket(Channel.IOPUB)));
+      if (unpublished.isEmpty()) {
         sendOut(received(outgoing));
       }
+      publish();
     }
     context.close();
   }
@@ -179,7 +175,8 @@ final class Sockets implements Runnable, Outbox.Carrier {
   private void welcome(List<byte[]> wish) {
     if (!wish.isEmpty() && wish.get(0).length > 0 && wish.get(0)[0] == SUBSCRIBE) {
       byte[] subscription = wish.get(0);
-      publish(receiver.welcome(Arrays.copyOfRange(subscription, 1, subscription.length)));
+      byte[] topic = Arrays.copyOfRange(subscription, 1, subscription.length);
+      unpublished.addAll(receiver.welcome(topic));
     }
   }
 
@@ -192,25 +189,26 @@ final class Sockets implements Runnable, Outbox.Carrier {
     if (address.equals(END)) {
       ended = true;
     } else if (address.equals(Channel.IOPUB.name())) {
-      publish(frames);
+      unpublished.add(frames);
     } else {
       isSent(socket(Channel.valueOf(address)), frames);
     }
   }
 
-  private void publish(List<byte[]> frames) {
+  private void publish() {
     Socket iopub = socket(Channel.IOPUB);
-    long now = System.nanoTime();
-    if (isSent(iopub, frames)) {
-      waiting = null;
-    } else if (waiting == null) {
-      waiting = frames;
-      waitingSince = now;
-    } else if (now - waitingSince > PATIENCE) {
-      waiting = null;
-      iopub.setXpubNoDrop(false);
-      isSent(iopub, frames);
-      iopub.setXpubNoDrop(true);
+    while (!unpublished.isEmpty()) {
+      List<byte[]> frames = unpublished.element();
+      if (!isSent(iopub, frames)) {
+        if (System.nanoTime() - lastPublished < PATIENCE) {
+          return;
+        }
+        iopub.setXpubNoDrop(false);
+        isSent(iopub, frames);
+        iopub.setXpubNoDrop(true);
+      }
+      unpublished.remove();
+      lastPublished = System.nanoTime();
     }
   }
 

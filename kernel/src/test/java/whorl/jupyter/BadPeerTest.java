@@ -4,20 +4,16 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
-import java.io.OutputStream;
-import java.net.InetAddress;
-import java.net.Socket;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Map;
+import java.util.concurrent.locks.LockSupport;
 import java.util.function.UnaryOperator;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.CsvSource;
-import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.MethodSource;
 
 /** Whatever comes over the wire, the kernel goes on to serve, and says once what was wrong. */
@@ -236,17 +232,15 @@ class BadPeerTest {
     }
   }
 
-  /** What a front end begins with on a new connection, up to the first message. */
-  private static byte[] greeting() {
-    byte[] mechanism = Arrays.copyOf(bytes("NULL"), 20);
-    byte[] greeting =
-        Arrays.copyOf(new byte[] {(byte) 0xFF, 0, 0, 0, 0, 0, 0, 0, 1, 0x7F, 3, 0}, 64);
-    System.arraycopy(mechanism, 0, greeting, 12, mechanism.length);
-    byte[] ready = bytes("\4\31\5READY\13Socket-Type\0\0\0\6DEALER");
-    ready[1] = (byte) (ready.length - 2);
-    byte[] all = Arrays.copyOf(greeting, greeting.length + ready.length);
-    System.arraycopy(ready, 0, all, greeting.length, ready.length);
-    return all;
+  @Test
+  void aPeerThatGreetsRightIsHeard() throws Exception {
+    try (var kernel = new Served();
+        var peer = new RawPeer(kernel.connection(), Channel.HEARTBEAT)) {
+      peer.send(RawPeer.greeting("DEALER"));
+      assertTrue(peer.hears("ROUTER"));
+      peer.send(new byte[] {0, 4, 'b', 'e', 'a', 't'});
+      assertTrue(peer.hears("beat"));
+    }
   }
 
   static List<Arguments> badBytes() {
@@ -254,15 +248,18 @@ class BadPeerTest {
         Arguments.of("a web browser", List.of(bytes("GET / HTTP/1.1\r\nHost: x\r\n\r\n"))),
         Arguments.of("nothing", List.of()),
         Arguments.of("zeros", List.of(new byte[1_000])),
-        Arguments.of("half a greeting", List.of(Arrays.copyOf(greeting(), 30))),
-        Arguments.of("half a message", List.of(greeting(), new byte[] {1, 3, 'a', 'b', 'c'})),
-        Arguments.of("half a frame", List.of(greeting(), new byte[] {1, 30, 'a', 'b', 'c'})),
+        Arguments.of("half a greeting", List.of(Arrays.copyOf(RawPeer.greeting("DEALER"), 30))),
+        Arguments.of(
+            "half a message",
+            List.of(RawPeer.greeting("DEALER"), new byte[] {1, 3, 'a', 'b', 'c'})),
+        Arguments.of(
+            "half a frame", List.of(RawPeer.greeting("DEALER"), new byte[] {1, 30, 'a', 'b', 'c'})),
         Arguments.of(
             "a frame of a terabyte",
-            List.of(greeting(), new byte[] {2, 0, 0, 1, 0, 0, 0, 0, 0, 0})),
+            List.of(RawPeer.greeting("DEALER"), new byte[] {2, 0, 0, 1, 0, 0, 0, 0, 0, 0})),
         Arguments.of(
             "a frame of less than nothing",
-            List.of(greeting(), new byte[] {2, -1, 0, 0, 0, 0, 0, 0, 0})));
+            List.of(RawPeer.greeting("DEALER"), new byte[] {2, -1, 0, 0, 0, 0, 0, 0, 0})));
   }
 
   @ParameterizedTest(name = "{0}")
@@ -270,12 +267,10 @@ class BadPeerTest {
   void whateverConnectsToAPortTheKernelServes(String name, List<byte[]> parts) throws Exception {
     try (var kernel = new Served();
         var client = kernel.client()) {
-      for (Map.Entry<Channel, Integer> port : kernel.connection().ports().entrySet()) {
-        try (var socket = new Socket(InetAddress.getLoopbackAddress(), port.getValue())) {
-          OutputStream out = socket.getOutputStream();
+      for (Channel channel : Channel.values()) {
+        try (var peer = new RawPeer(kernel.connection(), channel)) {
           for (byte[] part : parts) {
-            out.write(part);
-            out.flush();
+            peer.send(part);
             client.exchange(Channel.CONTROL, "kernel_info_request", "{}");
           }
         } catch (IOException e) {
@@ -288,15 +283,40 @@ class BadPeerTest {
     }
   }
 
-  @ParameterizedTest
-  @EnumSource(Channel.class)
-  void aClientThatComesBackIsServed(Channel unused) throws Exception {
+  @Test
+  void clientsThatComeAndGoAreServed() throws Exception {
     try (var kernel = new Served()) {
       for (int i = 0; i < 3; i++) {
         try (var client = kernel.client()) {
           assertTrue(client.execute("print a").outputs().contains("stdout a"));
         }
       }
+    }
+  }
+
+  @Test
+  void aClientThatReadsSlowlyMissesNothing() throws Exception {
+    try (var kernel = new Served();
+        var slow = new RawPeer(kernel.connection(), Channel.IOPUB);
+        var client = kernel.client()) {
+      slow.subscribe("");
+      client.send(Channel.SHELL, "execute_request", Client.request("displays 5000", "{}"));
+      // Shorter than the kernel's patience.
+      LockSupport.parkNanos(500_000_000);
+      for (int i = 0; i < 5000; i++) {
+        assertTrue(slow.hears("display " + i + " "));
+      }
+    }
+  }
+
+  @Test
+  void aClientThatReadsNothingHoldsUpNoOther() throws Exception {
+    try (var kernel = new Served();
+        var stalled = new RawPeer(kernel.connection(), Channel.IOPUB);
+        var client = kernel.client()) {
+      stalled.subscribe("");
+      assertEquals(5003, client.execute("displays 5000").published().size());
+      assertEquals("[input 2, stdout a]", client.execute("print a").outputs().toString());
     }
   }
 }

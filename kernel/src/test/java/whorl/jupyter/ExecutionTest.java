@@ -205,6 +205,26 @@ class ExecutionTest {
   }
 
   @Test
+  void cellsOfAnotherClientAreNotAborted() throws BadMessageException {
+    try (Client other = kernel.client()) {
+      String first = send("sleep 300\nfail f", "{}");
+      kernel.awaitCell();
+      String others = other.send(Channel.SHELL, "execute_request", Client.request("fail g", "{}"));
+      String mine = send("print a", "{}");
+      String othersNext =
+          other.send(Channel.SHELL, "execute_request", Client.request("print b", "{}"));
+      assertEquals("error", status(first));
+      assertEquals("aborted", status(mine));
+      Message reply = other.receive(Channel.SHELL);
+      assertEquals(others, reply.parentId());
+      assertEquals("g", reply.content().get("evalue").getAsString());
+      Message next = other.receive(Channel.SHELL);
+      assertEquals(othersNext, next.parentId());
+      assertEquals("aborted", next.content().get("status").getAsString());
+    }
+  }
+
+  @Test
   void cellsAreNotAbortedWhereAFailureIsNotToStopThem() throws BadMessageException {
     String first = send("sleep 300\nfail f", "{\"stop_on_error\": false}");
     String second = send("print a", "{}");

@@ -6,7 +6,10 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.PrintWriter;
+import java.io.StringWriter;
 import java.io.Writer;
+import java.nio.charset.StandardCharsets;
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -33,14 +36,40 @@ class LifeTest {
   }
 
   @Test
+  void theFirstToComeIsWelcomedAndToldThatTheKernelStarts() throws Exception {
+    try (var kernel = new Served();
+        var first = kernel.client();
+        var second = kernel.client()) {
+      Message starting = first.receive(Channel.IOPUB);
+      assertEquals("starting", starting.content().get("execution_state").getAsString());
+      assertEquals("{}", starting.parent().toString());
+      assertEquals("iopub_welcome", first.receive(Channel.IOPUB).type());
+      second.send(Channel.SHELL, "kernel_info_request", "{}");
+      for (Client client : List.of(first, second)) {
+        Message busy = client.receive(Channel.IOPUB);
+        assertEquals("busy", busy.content().get("execution_state").getAsString());
+      }
+    }
+  }
+
+  @Test
+  void aTopicMayBeSubscribedToAlone() throws Exception {
+    try (var kernel = new Served();
+        var peer = new RawPeer(kernel.connection(), Channel.IOPUB);
+        var client = kernel.client()) {
+      peer.subscribe("str");
+      client.execute("display a\nprint b");
+      assertTrue(peer.hears("stream"));
+    }
+  }
+
+  @Test
   void controlIsServedWhileACellRuns() throws Exception {
     try (var kernel = new Served();
         var client = kernel.client()) {
       String cell = client.send(Channel.SHELL, "execute_request", Client.request("forever", "{}"));
       assertEquals("ok", client.exchange(Channel.CONTROL, "kernel_info_request", "{}").status());
-      client.sendFrames(
-          Channel.HEARTBEAT,
-          java.util.List.of("beat".getBytes(java.nio.charset.StandardCharsets.US_ASCII)));
+      client.sendFrames(Channel.HEARTBEAT, List.of("beat".getBytes(StandardCharsets.US_ASCII)));
       assertEquals("beat", client.socket(Channel.HEARTBEAT).recvStr());
       kernel.awaitCell();
       assertEquals("ok", client.exchange(Channel.CONTROL, "interrupt_request", "{}").status());
@@ -77,6 +106,26 @@ class LifeTest {
       kernel.join();
       assertEquals(1, kernel.page().requests().size());
     }
+  }
+
+  @Test
+  void aKernelWithoutAPageEndsWithOneLine() throws Exception {
+    var log = new StringWriter();
+    var kernel =
+        new Kernel(
+            new ConnectionFile("127.0.0.1", Served.freePorts(), ""),
+            PlainLanguage.SHEET,
+            () -> {
+              throw new IllegalStateException("no page");
+            },
+            new PrintWriter(log));
+    assertThrows(KernelException.class, kernel::run);
+    assertTrue(
+        log.toString()
+            .startsWith(
+                "whorl: the thread page failed: java.lang.IllegalStateException: no page, at "),
+        log::toString);
+    assertEquals(1, log.toString().lines().count());
   }
 
   @Test

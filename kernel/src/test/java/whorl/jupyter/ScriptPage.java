@@ -70,6 +70,11 @@ final class ScriptPage implements Page {
       case "print" -> front.print(Stream.OUT, object.replace("\\n", "\n"));
       case "warn" -> front.print(Stream.ERR, object);
       case "lines" -> printLines(Integer.parseInt(object), front);
+      case "displays" -> {
+        for (int i = 0; i < Integer.parseInt(object); i++) {
+          front.display(bundle("display " + i + " ".repeat(10_000)), null);
+        }
+      }
       case "display" -> front.display(bundle(object), null);
       case "card" -> front.display(bundle(object), object);
       case "update" -> front.update(bundle("new " + object), object);
