@@ -32,6 +32,12 @@ import whorl.units.kind.Readings;
  * is worked out and the sheet is not touched.
  */
 final class DraftSheet implements Scope {
+  /**
+   * So many lines are read for one question, which must be answered while one types; for what is
+   * further away the sheet as it ran has to do.
+   */
+  private static final int MOST_LINES = 100;
+
   private final Scope sheet;
   private final Set<String> sheetNames;
   private final Source source;
@@ -40,6 +46,7 @@ final class DraftSheet implements Scope {
   private final Map<String, Meaning> standIns = new HashMap<>();
   private final Set<String> settled = new HashSet<>();
   private boolean settling;
+  private int linesRead;
 
   /**
    * A draft.
@@ -119,7 +126,12 @@ final class DraftSheet implements Scope {
 
   /** A statement if it can be read, uses only names that are known, and is sound. */
   Optional<Checked> sound(String text) {
-    return statement(text).filter(this::isKnown).flatMap(new Checker(this)::sound);
+    return known(text).flatMap(new Checker(this)::sound);
+  }
+
+  /** A statement if it can be read and uses only names that are known. */
+  Optional<Statement> known(String text) {
+    return statement(text).filter(this::isKnown);
   }
 
   /** The one statement of a text, if it can be read and worked out. */
@@ -152,25 +164,29 @@ final class DraftSheet implements Scope {
       LogicalLine line = own.get(next);
       if (line == null || settled.contains(next)) {
         open.removeLast();
-        continue;
-      }
-      boolean entered = statements.containsKey(next);
-      Optional<Statement> statement =
-          statements.computeIfAbsent(next, key -> statement(text(line)));
-      if (!entered) {
+      } else if (statements.containsKey(next)) {
+        open.removeLast();
+        settle(next, statements.getOrDefault(next, Optional.empty()));
+      } else if (linesRead >= MOST_LINES) {
+        settled.add(next);
+      } else {
+        linesRead++;
+        Optional<Statement> statement = statement(text(line));
+        statements.put(next, statement);
         statement.map(FreeNames::in).orElse(Set.of()).stream()
             .filter(needed -> !statements.containsKey(needed))
             .forEach(open::add);
-        continue;
       }
-      open.removeLast();
-      statement
-          .filter(this::isKnown)
-          .flatMap(new Checker(this)::sound)
-          .flatMap(DraftSheet::meaning)
-          .ifPresent(meaning -> checked.put(next, meaning));
-      settled.add(next);
     }
+  }
+
+  private void settle(String name, Optional<Statement> statement) {
+    statement
+        .filter(this::isKnown)
+        .flatMap(new Checker(this)::sound)
+        .flatMap(DraftSheet::meaning)
+        .ifPresent(meaning -> checked.put(name, meaning));
+    settled.add(name);
   }
 
   private static Optional<Meaning> meaning(Checked checked) {

@@ -56,7 +56,7 @@ final class FittingUnits {
 
   /** The units that fit by the first statement that tells some from others. */
   static FittingUnits by(List<Trial> trials, DraftSheet draft) {
-    for (Trial trial : trials) {
+    for (Trial trial : new LinkedHashSet<>(trials)) {
       var units = new FittingUnits(trial, draft);
       if (units.tells()) {
         return units;
@@ -67,12 +67,12 @@ final class FittingUnits {
 
   /** Whether some units fit and some do not. */
   private boolean tells() {
-    boolean readable = false;
+    boolean checkable = false;
     for (Map.Entry<Group, Unit> group : Groups.FIRST.entrySet()) {
       Unit unit = group.getValue();
-      // A statement that cannot be read with one unit cannot with another.
-      readable = readable || draft.statement(trialled(unit.text())).isPresent();
-      if (!readable) {
+      // A statement that cannot be read with one unit, or uses unknown names, is so with another.
+      checkable = checkable || draft.known(trialled(unit.text())).isPresent();
+      if (!checkable) {
         return false;
       }
       boolean sound = isSound(unit);

@@ -2,6 +2,7 @@ package whorl.assist;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import whorl.check.Meaning;
 import whorl.syntax.Token;
 import whorl.syntax.Token.Kind;
@@ -58,7 +59,7 @@ record Trial(String before, String after, boolean binding) {
     var trials = new ArrayList<Trial>();
     trials.add(new Trial(before, after, false));
     trials.add(new Trial(before, new Closing(at, holder, draft).text(), false));
-    trials.add(new Piece(at, holder).trial());
+    new Piece(at, holder).trial().ifPresent(trials::add);
     at.line()
         .defines()
         .filter(name -> !at.line().definesFunction())
@@ -126,7 +127,8 @@ record Trial(String before, String after, boolean binding) {
 
   /** The sum or comparison that a number stands in, apart from what is around it. */
   private record Piece(AtCursor at, int holder) {
-    Trial trial() {
+    /** The piece as a statement; empty for a number alone, with which any unit goes. */
+    Optional<Trial> trial() {
       List<Token> tokens = at.tokens();
       int start = holder;
       int depth = 0;
@@ -156,13 +158,15 @@ record Trial(String before, String after, boolean binding) {
       String text =
           at.between(tokens.get(start).span().start(), tokens.get(holder).span().end()) + " ";
       if (compares) {
-        return new Trial("check " + text, "", false);
+        return Optional.of(new Trial("check " + text, "", false));
       }
       boolean branch =
           depth == 0
               && start > 0
               && (tokens.get(start - 1).isWord("then") || tokens.get(start - 1).isWord("else"));
-      return new Trial((branch ? head() : "") + "(" + text, ")", false);
+      return branch || start < holder
+          ? Optional.of(new Trial((branch ? head() : "") + "(" + text, ")", false))
+          : Optional.empty();
     }
 
     /** The line up to its right side, if it defines something. */

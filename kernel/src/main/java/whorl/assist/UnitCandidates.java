@@ -75,12 +75,16 @@ final class UnitCandidates {
 
   /** Units by their beginning, one letter or more; without, a short choice. */
   private List<Candidate> whole() {
-    Set<UnitText> usual = usual();
-    usual.forEach(unit -> addWhole(unit, Use.USUAL));
+    var taken = new HashSet<String>();
+    for (UnitText unit : usual()) {
+      UnitGuide.Entry entry = UNITS.guide().entry(unit);
+      taken.add(entry.symbol());
+      addWhole(entry, Use.USUAL);
+    }
     if (asked || fitting.areKnown()) {
       for (UnitGuide.Entry entry : UNITS.guide().entries()) {
-        if ((asked || !entry.prefixed()) && !usual.contains(entry.text())) {
-          addWhole(entry.text(), entry.prefixed() ? Use.PREFIXED : Use.LISTED);
+        if ((asked || !entry.prefixed()) && taken.add(entry.symbol())) {
+          addWhole(entry, entry.prefixed() ? Use.PREFIXED : Use.LISTED);
         }
       }
     }
@@ -116,24 +120,31 @@ final class UnitCandidates {
     }
   }
 
-  private void addWhole(UnitText unit, Use use) {
-    String text = (brackets ? unit : Trial.tight(unit)).typeset();
-    var closeness = Closeness.of(typed, List.of(text, unit.plain()));
-    if (closeness.compareTo(Closeness.ASIDE) >= 0
-        && Closeness.of(typed, UNITS.guide().alsoRead(unit)).compareTo(Closeness.ASIDE) < 0) {
-      closeness = Closeness.ASIDE;
-    }
+  private void addWhole(UnitGuide.Entry entry, Use use) {
+    UnitText unit = entry.text();
     boolean writable = brackets || !unit.equals(UnitText.ONE);
+    String text = brackets || !unit.over().isEmpty() ? entry.symbol() : Trial.tight(unit).typeset();
+    Closeness closeness = closeness(text, entry.alsoRead());
     if (writable && closeness != Closeness.NONE) {
       found.add(text, unit, closeness, use);
     }
+  }
+
+  private Closeness closeness(String text, Set<String> alsoRead) {
+    Closeness closeness = Closeness.of(typed, List.of(text));
+    if (closeness.compareTo(Closeness.ASIDE) < 0) {
+      return closeness;
+    }
+    return Closeness.of(typed, alsoRead).compareTo(Closeness.ASIDE) < 0
+        ? Closeness.ASIDE
+        : closeness;
   }
 
   /** What may follow the members that already stand there, as {@code m²/s} behind {@code kg·}. */
   private List<Candidate> following(String beginning) {
     var taken = new HashSet<String>();
     for (UnitGuide.Entry entry : UNITS.guide().entries()) {
-      String whole = entry.text().typeset();
+      String whole = entry.symbol();
       if (whole.length() > beginning.length() && whole.startsWith(beginning)) {
         String rest = whole.substring(beginning.length());
         // The parenthesis that closes a divisor is left to its author or the editor.

@@ -65,7 +65,8 @@ final class Look {
       "font-family:monospace;font-size:100%;font-weight:bold;white-space:pre-wrap";
   static final String INFO_LEAD = "margin:2px 0 0 0";
   static final String INFO_TABLE =
-      "border-collapse:collapse;margin:6px 0 0 0;font-size:100%;line-height:1.4;border:none";
+      "border-collapse:collapse;margin:6px 0 0 0;font-size:100%;line-height:1.4;border:none;"
+          + "color:inherit";
   static final String INFO_ROW = "background:transparent";
   static final String INFO_WORD = CELL + "padding:1px 12px 1px 0;white-space:nowrap";
   static final String INFO_FACT = CELL + "padding:1px 0;white-space:pre-wrap";

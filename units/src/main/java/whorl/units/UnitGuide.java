@@ -1,9 +1,9 @@
 package whorl.units;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Collections;
 import java.util.Comparator;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -31,44 +31,44 @@ public final class UnitGuide {
           .toList();
 
   private final UnitCatalogue catalogue;
-  private final Map<UnitText, Set<String>> alsoRead = new LinkedHashMap<>();
-  private final List<Entry> entries;
+  private final Map<UnitText, Entry> entries = new LinkedHashMap<>();
 
   /**
    * A way to write a unit.
    *
    * @param text the unit
+   * @param symbol the unit with raised exponents
+   * @param alsoRead the aliases and names of a row of the catalogue
    * @param prefixed whether it is a row of the catalogue with an SI prefix in front
    */
-  public record Entry(UnitText text, boolean prefixed) {}
+  public record Entry(UnitText text, String symbol, Set<String> alsoRead, boolean prefixed) {
+    /** Copies the set. */
+    public Entry {
+      alsoRead = Set.copyOf(alsoRead);
+    }
+  }
 
   UnitGuide(UnitCatalogue catalogue, List<CatalogueRow> rows, Symbols symbols) {
     this.catalogue = catalogue;
+    Map<UnitText, Set<String>> alsoRead = new LinkedHashMap<>();
     for (CatalogueRow row : rows) {
       Set<String> words = alsoRead.computeIfAbsent(row.text(), text -> new LinkedHashSet<>());
       row.aliases().forEach(alias -> words.add(alias.plain()));
       words.add(row.name());
     }
-    this.entries =
-        Stream.concat(
-                alsoRead.keySet().stream().map(text -> new Entry(text, false)),
-                prefixed(rows, symbols).stream())
-            .toList();
-  }
-
-  private static List<Entry> prefixed(List<CatalogueRow> rows, Symbols symbols) {
-    Set<UnitText> taken = new HashSet<>();
-    rows.forEach(row -> taken.add(row.text()));
-    List<Entry> entries = new ArrayList<>();
+    alsoRead.forEach((text, words) -> add(text, words, false));
     for (Prefix prefix : PREFIXES) {
       for (CatalogueRow row : rows) {
         @Nullable UnitText text = prefixed(row.text(), prefix, symbols);
-        if (text != null && taken.add(text)) {
-          entries.add(new Entry(text, true));
+        if (text != null && !entries.containsKey(text)) {
+          add(text, Set.of(), true);
         }
       }
     }
-    return entries;
+  }
+
+  private void add(UnitText text, Set<String> alsoRead, boolean prefixed) {
+    entries.put(text, new Entry(text, text.typeset(), alsoRead, prefixed));
   }
 
   /** A unit with a prefix in front, or null if its first member takes none or means another. */
@@ -95,13 +95,14 @@ public final class UnitGuide {
   }
 
   /** Ways to write units: the rows of the catalogue in their order, then those with prefixes. */
-  public List<Entry> entries() {
-    return entries;
+  public Collection<Entry> entries() {
+    return Collections.unmodifiableCollection(entries.values());
   }
 
-  /** The aliases and the names of a row of the catalogue; none for other units. */
-  public Set<String> alsoRead(UnitText text) {
-    return Collections.unmodifiableSet(alsoRead.getOrDefault(text, Set.of()));
+  /** A unit, whether it is among the {@link #entries} or not. */
+  public Entry entry(UnitText text) {
+    Entry known = entries.get(text);
+    return known == null ? new Entry(text, text.typeset(), Set.of(), false) : known;
   }
 
   /**
