@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -214,12 +215,12 @@ class BridgeTest {
             .get(0)
             .routine();
     RoutineFailure failure = assertThrows(RoutineFailure.class, () -> apply(routine, 0));
-    assertTrue(
-        failure.getMessage().contains("give a function what it needs as an argument"),
-        failure.getMessage());
+    String said = String.valueOf(failure.getMessage());
+    assertTrue(said.contains("give a function what it needs as an argument"), said);
   }
 
-  private static RoutineFailure interrupted(Routine routine, Runnable interrupt) throws Exception {
+  private static RoutineFailure interrupted(Routine routine, @Nullable Runnable interrupt)
+      throws Exception {
     var failure = new CompletableFuture<RoutineFailure>();
     var caller =
         new Thread(

@@ -57,9 +57,11 @@ final class JavaCells implements AutoCloseable {
   JavaOutcome interrupted(String code) throws Exception {
     var output = new Collected();
     var outcome = CompletableFuture.supplyAsync(() -> side.run("cell [1]", code, output));
-    outcome.thenRun(() -> output.print(JavaOutput.Stream.ERR, "ended"));
+    CompletableFuture<Void> ended =
+        outcome.thenRun(() -> output.print(JavaOutput.Stream.ERR, "ended"));
     output.awaitPrint();
     side.interrupt();
+    ended.get();
     return outcome.get();
   }
 

@@ -33,12 +33,13 @@ final class ShownPage {
 
   /** Runs a cell with an id. */
   CellAnswer run(String cell, String code) {
-    cells.put(cell, new ArrayList<>());
+    var outputs = new ArrayList<Output>();
+    cells.put(cell, outputs);
     var request =
         new CellRequest(
             Optional.of(cell), List.copyOf(deleted), client, ++count, code, /* mayAsk= */ false);
     deleted.clear();
-    return page.run(request, new CellFront(cells.get(cell)));
+    return page.run(request, new CellFront(outputs));
   }
 
   /** Runs an input of a console, and returns what it shows. */
@@ -65,12 +66,12 @@ final class ShownPage {
   }
 
   List<Output> outputs(String cell) {
-    return cells.get(cell);
+    return cells.getOrDefault(cell, List.of());
   }
 
   /** The text of all that a cell shows. */
   String text(String cell) {
-    return String.join("\n", cells.get(cell).stream().map(Output::text).toList());
+    return String.join("\n", outputs(cell).stream().map(Output::text).toList());
   }
 
   private final class CellFront implements Front {
