@@ -10,8 +10,8 @@
 What is measured:
 
 start       from starting the process to the first kernel_info_reply
-round trip  of one cell with one line, a unit conversion and a product, once the kernel is warm: from
-            sending the request until both the reply and idle are there; in ipykernel with pint
+round trip  of one cell with one line, a unit conversion and a product, once the kernel is warm:
+            from sending the request until both the reply and idle are there; in ipykernel with pint
 first note  the first cell of a cold kernel: ten lines with units and a check; in ipykernel the
             same lines with pint, its import included, since a note cannot do without
 output      10 MB printed in lines of 63 characters, until all of it is there

@@ -53,7 +53,7 @@ class Lab:
         own = {
             "HOME": str(self.home),
             "WHORL_LAB": sys.prefix,
-            **{f"JUPYTER_{what}_DIR": str(self.home / what) for what in ("CONFIG", "DATA", "RUNTIME")},
+            **{f"JUPYTER_{w}_DIR": str(self.home / w) for w in ("CONFIG", "DATA", "RUNTIME")},
         }
         self.log = (self.home / "log").open("w")
         self.server = subprocess.Popen(
@@ -90,8 +90,9 @@ class Lab:
     def __exit__(self, *_):
         self.browser.close()
         self.playwright.stop()
-        self.server.send_signal(signal.SIGTERM)
-        self.server.wait(timeout=30)
+        # As Ctrl-C does.
+        self.server.send_signal(signal.SIGINT)
+        self.server.wait(timeout=PATIENCE / 1000)
         self.log.close()
         shutil.rmtree(self.home, ignore_errors=True)
 
@@ -148,8 +149,9 @@ class Note:
             """() => {
               const panel = window.jupyterapp.shell.currentWidget;
               const kernel = panel?.sessionContext?.session?.kernel;
+              const prompts = [...document.querySelectorAll('.jp-InputPrompt')];
               return kernel?.status === 'idle' && kernel?.connectionStatus === 'connected' &&
-                ![...document.querySelectorAll('.jp-InputPrompt')].some(p => /\\*/.test(p.textContent));
+                !prompts.some(prompt => prompt.textContent.includes('*'));
             }"""
         )
 
@@ -354,7 +356,8 @@ def a_note_from_elsewhere_is_shown_without_being_run(folder):
     for cell in demo["cells"]:
         for output in cell.get("outputs", []):
             if "text/html" in output.get("data", {}):
-                output["data"]["text/html"] = "".join(output["data"]["text/html"]) + "<p>changed</p>"
+                html = "".join(output["data"]["text/html"])
+                output["data"]["text/html"] = html + "<p>changed</p>"
     write(LAB.notes / "elsewhere.ipynb", demo)
     with LAB.open("elsewhere.ipynb") as note:
         expect(note.page.locator(".jp-OutputArea-output table").first).to_be_visible()

@@ -1,6 +1,6 @@
 """What the suites of end-to-end checks share: starting the command, notebooks, counting.
 
-A check is a function of a fresh folder. Its name says what must hold; it raises where that does not.
+A check is a function of a fresh folder. Its name says what must hold; it raises where it does not.
 """
 
 import argparse

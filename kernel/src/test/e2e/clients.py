@@ -171,8 +171,8 @@ def java_can_be_typed_into_the_console(folder):
 
 
 def a_later_start_of_lab_needs_no_network(folder):
-    offline = {"WHORL_LAB": sys.prefix, "PIP_INDEX_URL": "http://127.0.0.1:9/", "WHORL_PYTHON": "no"}
-    started = whorl("lab", "--version", env=offline).expect(0)
+    offline = {"PIP_INDEX_URL": "http://127.0.0.1:9/", "WHORL_PYTHON": "no"}
+    started = whorl("lab", "--version", env={"WHORL_LAB": sys.prefix, **offline}).expect(0)
     assert started.out.startswith("4.") and started.err == "", started.err
 
 
