@@ -88,9 +88,12 @@ class Kernel:
         self.manager.shutdown_kernel(now=True)
 
     def run(self, code):
-        """Seconds until a cell is done, and how many characters it printed."""
+        """Runs a cell as JupyterLab does: seconds until it is done, and characters it printed."""
+        content = {"code": code, "silent": False, "store_history": True, "allow_stdin": False}
+        message = self.client.session.msg("execute_request", content, metadata={"cellId": "cell"})
+        request = message["header"]["msg_id"]
         begin = time.perf_counter()
-        request = self.client.execute(code, allow_stdin=False)
+        self.client.shell_channel.send(message)
         sources = (self.client.shell_channel, self.client.iopub_channel)
         poller = zmq.Poller()
         for source in sources:
