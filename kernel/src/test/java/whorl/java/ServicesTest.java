@@ -101,7 +101,7 @@ class ServicesTest {
         "int a = 1\\ntwi|ce(a); int twice(int n)",
         "Str|ing; java.lang.String",
         "%%java\\nMath.ma|x(1, 2); int Math.max(int a, int b)",
-        "sheet.val|ue; double whorl.java.JavaSheet.value(String name, String unit)",
+        "sheet.val|ue; double whorl.java.JavaSheet.value(",
       })
   void aWordIsExplained(String marked, String signature) {
     String code = marked.replace("\\n", "\n");
