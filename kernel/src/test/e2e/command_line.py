@@ -294,8 +294,8 @@ def demos_run_recheck_and_keep_their_bytes(folder):
         assert record["definitions"] and not record["errors"], demo.name
         assert hashlib.sha256(demo.read_bytes()).hexdigest() == before, f"{demo.name} changed"
         assert without_results(read(out)) == without_results(read(demo)), demo.name
-        whorl("recheck", out).expect(result.status, out="All agrees")
-        whorl("recheck", demo).expect(result.status, out="All agrees")
+        whorl("recheck", out, "--java").expect(result.status, out="All agrees")
+        whorl("recheck", demo, "--java").expect(result.status, out="All agrees")
 
 
 CHECKS = [
