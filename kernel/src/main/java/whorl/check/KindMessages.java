@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Stream;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
@@ -109,11 +110,56 @@ final class KindMessages {
           if (declaration.name() != null) {
             context = context.declaring(declaration.name().name());
           }
+          Explanation explanation = Explanation.of(refusal, context);
           return diagnostic(
-              Explanation.of(refusal, context),
+              loneNumeral(value)
+                  .filter(numeral -> !declaration.unit().dimension().isOne())
+                  .map(numeral -> withUnit(explanation.problem(), numeral, value, declaration))
+                  .orElse(explanation),
               value.span(),
               found(value.typed(), declaration.unit().dimension()));
         });
+  }
+
+  /** The one number written out in a product that comes to a plain number and begins with it. */
+  private static Optional<Expr.Numeral> loneNumeral(Part value) {
+    var numerals = new ArrayList<Expr.Numeral>();
+    var constants = new ArrayList<Expr.Name>();
+    Expressions.walk(
+        value.expr(),
+        expr -> {
+          if (expr instanceof Expr.Numeral numeral) {
+            numerals.add(numeral);
+          } else if (expr instanceof Expr.Name name
+              && ConstantAtHand.named(name.name()).isPresent()) {
+            constants.add(name);
+          }
+        });
+    boolean lone =
+        Kinds.isNumber(value.typed())
+            && numerals.size() == 1
+            && constants.isEmpty()
+            && value.expr() instanceof Expr.Product product
+            && product.factors().get(0).value().equals(numerals.get(0))
+            && numerals.get(0).unit() == null;
+    return lone ? Optional.of(numerals.get(0)) : Optional.empty();
+  }
+
+  private static Explanation withUnit(
+      String problem, Expr.Numeral numeral, Part value, Declaration declaration) {
+    String digits = Printer.expression(numeral);
+    String rest = value.text().substring(digits.length());
+    return new Explanation(
+        problem,
+        "`"
+            + digits
+            + "` has no unit: a number takes the declared one only where numbers alone stand on the"
+            + " right side.",
+        "Write the unit that it has, such as "
+            + digits
+            + " "
+            + declaration.unit().text().plain()
+            + rest);
   }
 
   static CheckFailure argument(
