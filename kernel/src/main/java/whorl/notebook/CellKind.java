@@ -43,7 +43,8 @@ public enum CellKind {
     } else if (SHEET_HEAD.matcher(source).lookingAt()) {
       return SHEET;
     }
-    return FOREIGN_HEAD.matcher(source).lookingAt() ? FOREIGN : plain;
+    // Notes in Java may use magics of their extensions.
+    return plain == SHEET && FOREIGN_HEAD.matcher(source).lookingAt() ? FOREIGN : plain;
   }
 
   /** The statements of a cell of the sheet; each keeps the number of its line. */
