@@ -13,7 +13,8 @@ start       from starting the process to the first kernel_info_reply
 round trip  of one cell with one line, a unit conversion and a product, once the kernel is warm:
             from sending the request until both the reply and idle are there; in ipykernel with pint
 first note  the first cell of a cold kernel: ten lines with units and a check; in ipykernel the
-            same lines with pint, its import included, since a note cannot do without
+            same lines with pint, its import included, since a note cannot do without. Once at
+            once, as a program does, and once two seconds after the start, as a person may
 output      10 MB printed in lines of 63 characters, until all of it is there
 archive     what the archive of classes saves of start and first note
 Java        the first cell in Java, and a warm one of one line, without anything to compare with
@@ -116,12 +117,13 @@ class Kernel:
         return time.perf_counter() - begin, printed
 
 
-def cold(name, note, rounds, **options):
+def cold(name, note, rounds, pause=0, **options):
     """Seconds to start, and to the result of a first note: medians over some processes."""
     starts, notes = [], []
     for _ in range(rounds):
         with Kernel(name, **options) as kernel:
             starts.append(kernel.start)
+            time.sleep(pause)
             notes.append(kernel.run(note)[0])
     return statistics.median(starts), statistics.median(notes)
 
@@ -166,6 +168,9 @@ def main():
     row("start to first kernel_info", start, their_start)
     row("first note of ten lines, cold", note, their_note)
     row("start and first note", start + note, their_start + their_note)
+    later = cold(given.whorl, WHORL_NOTE, given.rounds, pause=2)[1]
+    their_later = cold("python3", PINT_NOTE, given.rounds, pause=2)[1]
+    row("first note, two seconds later", later, their_later)
     row(
         "round trip of one line, warm",
         round_trips(given.whorl, None, WHORL_LINE, given.trips),

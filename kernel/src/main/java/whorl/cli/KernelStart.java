@@ -10,6 +10,7 @@ import whorl.jupyter.KernelException;
 import whorl.jupyter.ParentProcess;
 import whorl.page.LivePage;
 import whorl.page.PlainLanguage;
+import whorl.page.WarmUp;
 
 /**
  * Starts a kernel.
@@ -45,7 +46,11 @@ record KernelStart(PlainLanguage language, Path connectionFile) {
     try {
       var kernel =
           new Kernel(
-              ConnectionFile.read(connectionFile), language, () -> new LivePage(language), err);
+              ConnectionFile.read(connectionFile),
+              language,
+              () -> new LivePage(language),
+              new WarmUp(),
+              err);
       ParentProcess.whenGone(System.getenv(), kernel::stop);
       kernel.run();
       return ExitStatus.HOLDS.code();

@@ -15,6 +15,7 @@ import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import whorl.jupyter.ConnectionFile;
 import whorl.jupyter.Rehearsal;
+import whorl.page.WarmUp;
 
 /**
  * {@code whorl rehearse}: does what most runs do, so that the JVM can archive the classes which
@@ -22,23 +23,8 @@ import whorl.jupyter.Rehearsal;
  */
 @Command(name = "rehearse", hidden = true)
 final class RehearseCommand implements Callable<Integer> {
-  private static final String INPUTS =
-      """
-      m [kg] = 412           # weighed
-      D [mm] = 900
-      n [rpm] = 6000
-      """;
-  private static final String RESULTS =
-      """
-      I [kg·m²] = 1/2 * m * (D/2)^2
-      E [MJ] = 1/2 * I * n^2
-      speed(r [m], n [rpm]) = r * n
-      v [m/s] = speed(D/2, n)
-      check E <= 10 MJ
-      assume v < 300 m/s
-      E [ft·lbf]
-      """;
-  private static final String SLIP = "t [s] = E";
+  private static final String NOTE = WarmUp.CELLS.get(0) + WarmUp.CELLS.get(1);
+  private static final String SLIP = WarmUp.CELLS.get(2);
 
   @Override
   public Integer call() throws IOException, InterruptedException {
@@ -48,10 +34,10 @@ final class RehearseCommand implements Callable<Integer> {
     Path record = folder.resolve("record.json");
     Path connection = folder.resolve("connection.json");
     try {
-      Files.writeString(sheet, INPUTS + RESULTS);
+      Files.writeString(sheet, NOTE);
       whorl("run", sheet, "--out", note, "--json", record);
       whorl("recheck", note);
-      Files.writeString(sheet, INPUTS + SLIP);
+      Files.writeString(sheet, WarmUp.CELLS.get(0) + SLIP);
       whorl("run", sheet);
       Files.writeString(connection, connection().toString());
       serve(connection);
@@ -73,7 +59,9 @@ final class RehearseCommand implements Callable<Integer> {
     kernel.setDaemon(true);
     kernel.start();
     try (var front = new Rehearsal(ConnectionFile.read(connection))) {
-      front.run(List.of(INPUTS, RESULTS, SLIP, "n [rpm] = 7000", "%%java\n6 * 7"));
+      var cells = new ArrayList<>(WarmUp.CELLS);
+      cells.addAll(List.of("n [rpm] = 7000", "%%java\n6 * 7"));
+      front.run(cells);
     }
     kernel.join();
   }

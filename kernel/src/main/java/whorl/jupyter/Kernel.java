@@ -51,10 +51,15 @@ public final class Kernel {
    * @param connection where front ends connect
    * @param language of plain cells
    * @param pages makes the page; called once, while first requests are served already
+   * @param warmUp runs beside the first requests once the page is there
    * @param err where trouble is told, one line each
    */
   public Kernel(
-      ConnectionFile connection, PlainLanguage language, Supplier<Page> pages, PrintWriter err)
+      ConnectionFile connection,
+      PlainLanguage language,
+      Supplier<Page> pages,
+      Runnable warmUp,
+      PrintWriter err)
       throws KernelException {
     log = new Log(err);
     format = new WireFormat(new Signatures(connection.key()));
@@ -98,7 +103,7 @@ public final class Kernel {
               sockets.end();
             });
     moving = thread("sockets", DEFAULT_STACK, sockets);
-    loading = thread("page", DEFAULT_STACK, () -> page.complete(pages.get()));
+    loading = thread("page", DEFAULT_STACK, () -> load(pages, warmUp));
   }
 
   private Thread thread(String name, long stack, Runnable task) {
@@ -106,6 +111,16 @@ public final class Kernel {
     thread.setDaemon(true);
     thread.setUncaughtExceptionHandler(this::fail);
     return thread;
+  }
+
+  private void load(Supplier<Page> pages, Runnable warmUp) {
+    page.complete(pages.get());
+    try {
+      warmUp.run();
+    } catch (RuntimeException e) {
+      // A cold kernel is slow, and that is all.
+      log.line("a failure in the warm-up", e);
+    }
   }
 
   /**

@@ -10,6 +10,7 @@ import java.io.StringWriter;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
+import java.util.concurrent.CountDownLatch;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -118,6 +119,7 @@ class LifeTest {
             () -> {
               throw new IllegalStateException("no page");
             },
+            () -> {},
             new PrintWriter(log));
     assertThrows(KernelException.class, kernel::run);
     assertTrue(
@@ -126,6 +128,24 @@ class LifeTest {
                 "whorl: the thread page failed: java.lang.IllegalStateException: no page, at "),
         log::toString);
     assertEquals(1, log.toString().lines().count());
+  }
+
+  @Test
+  void aWarmUpThatFailsLeavesTheKernelAlive() throws Exception {
+    var failed = new CountDownLatch(1);
+    Runnable failing =
+        () -> {
+          failed.countDown();
+          throw new IllegalStateException("cold");
+        };
+    try (var kernel = new Served(Served.KEY, failing);
+        var client = kernel.client()) {
+      failed.await();
+      assertEquals("ok", client.exchange(Channel.CONTROL, "kernel_info_request", "{}").status());
+      client.execute("print a");
+      kernel.close();
+      assertTrue(kernel.log().startsWith("whorl: a failure in the warm-up: "), kernel::log);
+    }
   }
 
   @Test
@@ -139,6 +159,7 @@ class LifeTest {
                       kernel.connection(),
                       PlainLanguage.SHEET,
                       ScriptPage::new,
+                      () -> {},
                       new PrintWriter(Writer.nullWriter())));
       assertTrue(e.getMessage().contains("(shell_port)"), e::getMessage);
       assertFalse(e.getMessage().contains("hb_port"), e::getMessage);

@@ -25,8 +25,12 @@ final class Served implements AutoCloseable {
   }
 
   Served(String key) throws IOException {
+    this(key, () -> {});
+  }
+
+  Served(String key, Runnable warmUp) throws IOException {
     connection = new ConnectionFile("127.0.0.1", freePorts(), key);
-    kernel = new Kernel(connection, PlainLanguage.SHEET, () -> page, new PrintWriter(log));
+    kernel = new Kernel(connection, PlainLanguage.SHEET, () -> page, warmUp, new PrintWriter(log));
     run = CompletableFuture.runAsync(this::runKernel, task -> new Thread(task, "kernel").start());
   }
 
