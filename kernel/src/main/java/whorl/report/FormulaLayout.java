@@ -139,11 +139,18 @@ final class FormulaLayout implements Expr.Cases<Layout> {
       boolean first = terms.isEmpty();
       Layout value = operand(term.value(), Binding.PRODUCT);
       // A sign directly behind another sign is read once too often or not at all.
-      boolean signed = !first && value.binding() == Binding.SIGN;
+      boolean signed = !first && isSigned(value);
       String sign = term.subtracted() ? "−" : first ? "" : "+";
       terms.add(new Layout.Term(sign, signed ? group(value) : value));
     }
     return new Layout.Terms(Binding.SUM, terms);
+  }
+
+  /** Whether a sign stands in front; in {@code −20 °C} it belongs to the number. */
+  private static boolean isSigned(Layout value) {
+    return value instanceof Layout.Measure measure
+        ? isSigned(measure.value())
+        : value.binding() == Binding.SIGN;
   }
 
   @Override
@@ -176,7 +183,7 @@ final class FormulaLayout implements Expr.Cases<Layout> {
 
   private Layout.Factor factor(Expr.Factor factor, boolean first) {
     Layout value = operand(factor.value(), Binding.MEASURE);
-    boolean signed = !first && value.binding() == Binding.SIGN;
+    boolean signed = !first && isSigned(value);
     return new Layout.Factor(joint(factor.joint()), signed ? group(value) : value);
   }
 

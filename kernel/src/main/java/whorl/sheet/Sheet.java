@@ -73,7 +73,8 @@ public final class Sheet {
   /**
    * Runs what was typed in a console, which has no cells. A name that has its definition elsewhere
    * is taken over. Definitions, checks and assumptions stay, a check until it is typed again;
-   * whoever defines one of the names next takes it over in turn. A shown value is shown once.
+   * whoever defines one of the names next takes it over in turn. A value is shown once,
+   * unless it waits for a name; then it is shown when it can be.
    *
    * @param fresh an id of its own
    * @param label how messages call it, as {@code [7]}
@@ -87,10 +88,16 @@ public final class Sheet {
         () -> {
           CellOutcome outcome = take(read(fresh, source), fresh, label, source, true);
           if (outcome.tookEffect()) {
-            contents.forget(fresh, node -> node.statement() instanceof Statement.Show);
+            contents.forget(fresh, this::isShownForGood);
           }
           return outcome;
         });
+  }
+
+  /** What a console shows stays as it is, but what waits is still to be shown. */
+  private boolean isShownForGood(Node node) {
+    return node.statement() instanceof Statement.Show
+        && !(contents.results().of(node).orElse(null) instanceof Result.Waiting);
   }
 
   /**

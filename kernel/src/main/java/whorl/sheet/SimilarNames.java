@@ -27,7 +27,7 @@ final class SimilarNames {
     this.names = names;
   }
 
-  /** Up to four names near to one, the nearest first; none if all are far. */
+  /** Up to four other names near to one, the nearest first; none if all are far. */
   List<String> to(String name) {
     return found.computeIfAbsent(name, this::search);
   }
@@ -43,6 +43,10 @@ final class SimilarNames {
     String folded = name.toLowerCase(Locale.ROOT);
     var near = new ArrayList<Near>();
     for (Candidate candidate : candidates) {
+      // A definition that waits itself is no hint for what waits for it.
+      if (candidate.name().equals(name)) {
+        continue;
+      }
       int distance = distance(folded, candidate.folded(), reach);
       if (distance <= reach) {
         near.add(new Near(candidate.name(), distance));

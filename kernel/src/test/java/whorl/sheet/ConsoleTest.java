@@ -125,6 +125,16 @@ class ConsoleTest {
   }
 
   @Test
+  void aShownValueThatWaitsIsShownWhenItCan() {
+    good(type("2 * n"));
+    CellOutcome outcome = good(type("n = 3"));
+    CellId waiting = new CellId("typed 1");
+    assertEquals(Set.of(waiting), outcome.refreshed());
+    assertEquals(
+        new Value.Real(6), ((Step.Shown) sheet.steps(waiting).get(0)).gives().value());
+  }
+
+  @Test
   void aShownValueIsShownOnce() {
     good(type("n = 1"));
     CellOutcome outcome = good(type("2 * n\nn"));

@@ -333,7 +333,7 @@ final class Wording implements Refusal.Cases<Explanation> {
     return new Explanation(
         "A temperature in °C or °F cannot be multiplied or divided.",
         "It is a point on a scale whose zero is arbitrary.",
-        "Use a temperature difference in K, such as T_2 - T_1");
+        "Use a difference in K: T_2 - T_1, or T_1 - (-273.15 degC) from absolute zero");
   }
 
   @Override
