@@ -23,10 +23,14 @@ import java.util.stream.Stream;
 class PackageDependencyTest {
   private static final String ROOT = "whorl";
 
-  /** Room to rooms that it may use. All but {@code diagnostic} may also use {@code units}. */
+  /**
+   * Room to rooms that it may use. All but {@code diagnostic} and {@code mechanics} may also use
+   * {@code units}.
+   */
   private static final Map<String, Set<String>> MAY_USE =
       Map.ofEntries(
           entry("diagnostic"),
+          entry("mechanics"),
           entry("syntax", "diagnostic"),
           entry("check", "syntax", "diagnostic"),
           entry("eval", "check", "syntax", "diagnostic"),
@@ -82,6 +86,14 @@ class PackageDependencyTest {
       noClasses()
           .that()
           .resideInAPackage(ROOT + ".diagnostic..")
+          .should()
+          .dependOnClassesThat(resideInAPackage(ROOT + ".units.."));
+
+  @ArchTest
+  static final ArchRule MECHANICS_CALCULATES_IN_PLAIN_NUMBERS =
+      noClasses()
+          .that()
+          .resideInAPackage(ROOT + ".mechanics..")
           .should()
           .dependOnClassesThat(resideInAPackage(ROOT + ".units.."));
 
