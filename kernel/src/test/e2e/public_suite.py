@@ -41,6 +41,7 @@ class SheetTests(KernelTests):
     code_history_pattern = JAVA + "6 ? 7"
     supported_history_operations = ("tail", "range", "search")
     code_inspect_sample = "sqrt"
+    code_clear_output = JAVA + 'display("gone"); clearOutput(true);'
 
 
 class JavaTests(KernelTests):
@@ -49,6 +50,13 @@ class JavaTests(KernelTests):
     file_extension = ".java"
     code_hello_world = 'System.out.println("hello, world");'
     code_stderr = 'System.err.println("oops");'
+    completion_samples = [
+        {"text": "Math.sqr", "matches": ["sqrt("]},
+        {"text": "java.util.function.ToDoubleBiF", "matches": ["ToDoubleBiFunction"]},
+    ]
+    complete_code_samples = ["int x = 1;", "1 + 1", "int f() { return 1; }"]
+    incomplete_code_samples = ["int f() {", "int x = (1 +", "if (true)"]
+    invalid_code_samples = ["int x = );", "}"]
     code_generate_error = "int x = ;"
     code_execute_result = [
         {"code": "6 * 7", "result": "42"},
@@ -58,6 +66,8 @@ class JavaTests(KernelTests):
     code_display_data = [{"code": 'display("<b>x</b>", "text/html")', "mime": "text/html"}]
     code_history_pattern = "6 ? 7"
     supported_history_operations = ("tail", "range", "search")
+    code_inspect_sample = "Math.sqrt"
+    code_clear_output = 'display("gone"); clearOutput(true);'
 
 
 class SheetWelcomeTests(IopubWelcomeTests):

@@ -37,6 +37,7 @@ final class JavaSession implements AutoCloseable {
           "java.util.regex.*",
           "java.util.stream.*",
           "static " + BaseNotebookStatics.class.getName() + ".*",
+          "static " + CellOutput.class.getName() + ".*",
           "static " + JavaSheet.class.getName() + ".*");
 
   static {

@@ -40,8 +40,7 @@ public final class WarmUp implements Runnable {
       for (int round = 0; round < ROUNDS; round++) {
         for (int cell = 0; cell < CELLS.size(); cell++) {
           var id = Optional.of(Integer.toString(cell));
-          page.run(
-              new CellRequest(id, List.of(), "", cell + 1, CELLS.get(cell), false), NOWHERE);
+          page.run(new CellRequest(id, List.of(), "", cell + 1, CELLS.get(cell), false), NOWHERE);
         }
       }
     }

@@ -73,8 +73,8 @@ public final class Sheet {
   /**
    * Runs what was typed in a console, which has no cells. A name that has its definition elsewhere
    * is taken over. Definitions, checks and assumptions stay, a check until it is typed again;
-   * whoever defines one of the names next takes it over in turn. A value is shown once,
-   * unless it waits for a name; then it is shown when it can be.
+   * whoever defines one of the names next takes it over in turn. A value is shown once, unless it
+   * waits for a name; then it is shown when it can be.
    *
    * @param fresh an id of its own
    * @param label how messages call it, as {@code [7]}

@@ -53,6 +53,12 @@ class DisplayTest {
   }
 
   @Test
+  void aCellClearsWhatItHasShown() {
+    Collected output = JAVA.run("display(1);\nclearOutput(true);\ndisplay(2);");
+    assertEquals(List.of("2"), output.displays().stream().map(d -> text(d, "text/plain")).toList());
+  }
+
+  @Test
   void whatIsRenderedIsShownAsItIs() {
     JsonObject data = JAVA.run("render(\"# Head\", \"text/markdown\")").resultData();
     assertEquals("# Head", text(data, "text/markdown"));

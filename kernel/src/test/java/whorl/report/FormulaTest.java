@@ -47,8 +47,7 @@ class FormulaTest {
         Arguments.of(product(A, "*", sum(B, "+", C)), "a·(b + c)", "a (b + c)"),
         Arguments.of(sum(A, "-", sum(B, "-", C)), "a − (b − c)", "a − (b − c)"),
         Arguments.of(sum(A, "-", minus(B)), "a − (−b)", "a − (−b)"),
-        Arguments.of(
-            sum(A, "-", num("-273.15", "degC")), "a − (−273.15 °C)", "a − (−273.15 °C)"),
+        Arguments.of(sum(A, "-", num("-273.15", "degC")), "a − (−273.15 °C)", "a − (−273.15 °C)"),
         Arguments.of(minus(squared(A)), "−a²", "−a²"),
         Arguments.of(squared(minus(A)), "(−a)²", "(−a)²"),
         Arguments.of(power(A, product(ONE, "/", TWO)), "a^(1/2)", "a^½"),

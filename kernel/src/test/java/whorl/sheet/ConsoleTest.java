@@ -130,8 +130,7 @@ class ConsoleTest {
     CellOutcome outcome = good(type("n = 3"));
     CellId waiting = new CellId("typed 1");
     assertEquals(Set.of(waiting), outcome.refreshed());
-    assertEquals(
-        new Value.Real(6), ((Step.Shown) sheet.steps(waiting).get(0)).gives().value());
+    assertEquals(new Value.Real(6), ((Step.Shown) sheet.steps(waiting).get(0)).gives().value());
   }
 
   @Test
