@@ -30,15 +30,16 @@ class PackageDependencyTest {
   private static final Map<String, Set<String>> MAY_USE =
       Map.ofEntries(
           entry("diagnostic"),
-          entry("mechanics"),
           entry("syntax", "diagnostic"),
-          entry("check", "syntax", "diagnostic"),
-          entry("eval", "check", "syntax", "diagnostic"),
-          entry("sheet", "eval", "check", "syntax", "diagnostic"),
+          entry("mechanics"),
+          entry("laws", "mechanics"),
+          entry("check", "laws", "mechanics", "syntax", "diagnostic"),
+          entry("eval", "check", "laws", "mechanics", "syntax", "diagnostic"),
+          entry("sheet", "eval", "check", "laws", "mechanics", "syntax", "diagnostic"),
           // A step holds its statement and its value, so their printer knows both.
-          entry("report", "sheet", "eval", "syntax", "diagnostic"),
-          entry("java", "assist", "sheet", "eval", "check", "diagnostic"),
-          entry("assist", "report", "sheet", "eval", "check", "syntax", "diagnostic"),
+          entry("report", "sheet", "eval", "laws", "mechanics", "syntax", "diagnostic"),
+          entry("java", "assist", "sheet", "eval", "check", "laws", "diagnostic"),
+          entry("assist", "report", "sheet", "eval", "check", "laws", "syntax", "diagnostic"),
           // A run of a note ends with values compared with those stored.
           entry("notebook", "java", "report", "sheet", "eval", "check", "syntax", "diagnostic"),
           entry(

@@ -163,6 +163,6 @@ final class NameCards {
         ? real.readings().words()
         : value.type() instanceof whorl.check.Type.Vector vector
             ? vector.readings().words() + ", a vector"
-            : "";
+            : value.type() instanceof whorl.check.Type.Thing thing ? thing.sort().words() : "";
   }
 }

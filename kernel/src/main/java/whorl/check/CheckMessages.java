@@ -114,6 +114,8 @@ final class CheckMessages {
   private static String character(Typed typed) {
     if (typed.type() instanceof Type.Vector) {
       return "a vector";
+    } else if (typed.operation() instanceof Operation.Thing thing) {
+      return thing.sort().withArticle();
     }
     return typed.type() instanceof Type.Truth ? "a condition" : "a number";
   }
@@ -121,6 +123,8 @@ final class CheckMessages {
   private static String described(Typed typed) {
     if (typed.type() instanceof Type.Truth) {
       return "a condition";
+    } else if (typed.operation() instanceof Operation.Thing thing) {
+      return thing.sort().withArticle();
     }
     Readings readings = typed.operand().readings();
     Optional<Kind> kind = readings.kinds().stream().filter(k -> !k.isInternal()).findFirst();

@@ -148,7 +148,7 @@ public final class Checker {
         new Operation.RoutineCall(
             head.span(), new RoutineInUnits(routine, parameters, declaration.unit()), arguments);
     Formula formula = declaration.formula(Typed.of(call, declaration.usualReadings()));
-    var basis = new Basis(List.of(), parameters.size(), List.of());
+    var basis = new Basis(List.of(), new FrameSize(parameters.size(), 0), List.of());
     return function(head.name(), parameters, formula, basis);
   }
 
@@ -241,6 +241,8 @@ public final class Checker {
     Typed typed = checker.check(value, WrittenUnits.Reach.DECLARED);
     if (typed.operation() instanceof Operation.Truth) {
       throw CheckMessages.conditionWithUnit(value, declaration.bracket());
+    } else if (typed.operation() instanceof Operation.Thing) {
+      throw SpaceMessages.thingWithUnit(value, typed.type(), declaration.bracket().span());
     }
     return declaration.formula(Kinds.declared(typed, value, declaration));
   }
@@ -248,6 +250,8 @@ public final class Checker {
   private static Formula formula(Typed typed, Optional<Unit> written) {
     if (typed.operation() instanceof Operation.Truth) {
       return new Formula(typed.operation(), typed.type(), Unit.ONE, false, "");
+    } else if (typed.operation() instanceof Operation.Thing thing) {
+      return new Formula(thing, typed.type(), Unit.ONE, false, thing.sort().words());
     }
     Readings readings = typed.operand().readings();
     return new Formula(

@@ -7,6 +7,7 @@ import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Span;
+import whorl.laws.ThingSort;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
 import whorl.units.Unit;
@@ -71,6 +72,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
       case REAL -> typed;
       case VECTOR -> throw CheckMessages.vectorForNumber(expr);
       case TRUTH -> throw CheckMessages.conditionForNumber(expr);
+      case THING -> throw SpaceMessages.thingForNumber(expr, typed.type());
     };
   }
 
@@ -86,14 +88,17 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   private enum Form {
     REAL,
     VECTOR,
-    TRUTH
+    TRUTH,
+    THING
   }
 
   private static Form form(Typed typed) {
     if (typed.type() instanceof Type.Real) {
       return Form.REAL;
+    } else if (typed.type() instanceof Type.Vector) {
+      return Form.VECTOR;
     }
-    return typed.type() instanceof Type.Vector ? Form.VECTOR : Form.TRUTH;
+    return typed.type() instanceof Type.Truth ? Form.TRUTH : Form.THING;
   }
 
   private static Operation.Real real(Typed typed) {
@@ -139,6 +144,8 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     Typed group = check(inUnit.group());
     if (form(group) == Form.TRUTH) {
       throw CheckMessages.conditionForNumber(inUnit.group());
+    } else if (form(group) == Form.THING) {
+      throw SpaceMessages.thingForNumber(inUnit.group(), group.type());
     }
     Kinds.plainNumberBeforeUnit(group, inUnit);
     return inUnit(group, unit, WrittenUnits.readings(unit, reach), inUnit.span());
@@ -189,9 +196,16 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     }
     if (meaning.get() instanceof Meaning.Quantity quantity) {
       Meaning.Input input = frame.input(name.name(), quantity.type(), true);
-      return new Typed(read(name.span(), input), quantity.type(), null);
+      return new Typed(read(name.span(), input), named(quantity.type(), name), null);
     }
     throw CheckMessages.functionWithoutArguments(name);
+  }
+
+  /** The type of what a name stands for: a thing is known by its name from here on. */
+  private static Type named(Type type, Expr.Name name) {
+    return type instanceof Type.Thing thing && thing.identity() == null
+        ? new Type.Thing(thing.sort(), new Anchor(name.name(), name))
+        : type;
   }
 
   /** Position of a parameter, or −1 where a name is none. */
@@ -243,8 +257,13 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     if (input.type() instanceof Type.Real) {
       return new Operation.Input(span, input.slot());
     }
-    return input.type() instanceof Type.Vector
-        ? new Operation.VectorInput(span, input.slot())
+    if (input.type() instanceof Type.Vector) {
+      return new Operation.VectorInput(span, input.slot());
+    } else if (input.type() instanceof Type.Thing thing) {
+      return new Operation.ThingInput(span, thing.sort(), input.slot());
+    }
+    return input.type() instanceof Type.Tensor
+        ? new Operation.ThingInput(span, ThingSort.INERTIA, input.slot())
         : new Operation.TruthInput(span, input.slot());
   }
 
@@ -321,6 +340,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
               null,
               operand.factors());
       case TRUTH -> throw CheckMessages.conditionForNumber(span);
+      case THING -> throw SpaceMessages.thingForNumber(span, operand.type());
     };
   }
 
@@ -364,6 +384,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
       case REAL -> reals.add(new Operation.Term(term.subtracted(), real(typed)));
       case VECTOR -> vectors.add(new Operation.VectorTerm(term.subtracted(), vector(typed)));
       case TRUTH -> throw CheckMessages.conditionForNumber(term.value());
+      case THING -> throw SpaceMessages.thingForNumber(term.value(), typed.type());
     }
   }
 
@@ -402,8 +423,10 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
               operand.type(),
               null);
       case VECTOR ->
-          Typed.of(new Operation.Magnitude(span, vector(operand)), operand.operand().readings());
+          Typed.of(new Operation.Magnitude(span, vector(operand)), operand.operand().readings())
+              .about(operand.type().about());
       case TRUTH -> throw CheckMessages.conditionForNumber(source);
+      case THING -> throw SpaceMessages.thingForNumber(source, operand.type());
     };
   }
 
@@ -462,6 +485,10 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
         && otherwise.operation() instanceof Operation.Truth other) {
       return Typed.of(new Operation.TruthChoice(span, condition, one, other));
     }
+    if (then.operation() instanceof Operation.Thing one
+        && otherwise.operation() instanceof Operation.Thing other) {
+      return thing(choice, condition, one, other);
+    }
     Readings readings =
         Kinds.meet(Kinds.Together.BRANCHES, then, choice.then(), otherwise, choice.otherwise())
             .operand()
@@ -470,6 +497,14 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
         ? Typed.of(
             new Operation.VectorChoice(span, condition, vector(then), vector(otherwise)), readings)
         : Typed.of(new Operation.Choice(span, condition, real(then), real(otherwise)), readings);
+  }
+
+  private static Typed thing(
+      Expr.Choice choice, Operation.Truth condition, Operation.Thing one, Operation.Thing other) {
+    if (one.sort() != other.sort()) {
+      throw SpaceMessages.mixedThings(choice, one.sort(), other.sort());
+    }
+    return Typed.of(new Operation.ThingChoice(choice.span(), condition, one, other));
   }
 
   @Override
@@ -510,12 +545,19 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
       arguments.add(read(call.span(), input));
     }
     Span span = call.span();
-    Operation operation =
-        function.result() instanceof Type.Real
-            ? new Operation.Call(span, function.body(), arguments)
-            : function.result() instanceof Type.Vector
-                ? new Operation.VectorCall(span, function.body(), arguments)
-                : new Operation.TruthCall(span, function.body(), arguments);
-    return new Typed(operation, function.result(), null);
+    return new Typed(
+        called(span, function.result(), function.body(), arguments), function.result(), null);
+  }
+
+  private static Operation called(
+      Span span, Type result, Operation.Body body, List<Operation> arguments) {
+    if (result instanceof Type.Real) {
+      return new Operation.Call(span, body, arguments);
+    } else if (result instanceof Type.Vector) {
+      return new Operation.VectorCall(span, body, arguments);
+    }
+    return body.body() instanceof Operation.Thing thing
+        ? new Operation.ThingCall(span, thing.sort(), body, arguments)
+        : new Operation.TruthCall(span, body, arguments);
   }
 }

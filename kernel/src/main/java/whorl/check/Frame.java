@@ -8,19 +8,20 @@ import java.util.Map;
 /** Gives the names that a formula reads their slots, in order of first mention. */
 final class Frame {
   private final Map<String, Meaning.Input> inputs = new LinkedHashMap<>();
-  private int size;
+  private FrameSize size;
 
   /** A frame whose first slots are taken by the parameters of a function. */
   Frame(int parameters) {
-    this.size = parameters;
+    this.size = new FrameSize(parameters, 0);
   }
 
   /** The input for a name, with a slot of its own from the first mention on. */
   Meaning.Input input(String name, Type type, boolean direct) {
     Meaning.Input known = inputs.get(name);
     if (known == null) {
-      known = new Meaning.Input(name, type, size, direct);
-      size += type.slots();
+      int slot = type.slots().things() > 0 ? size.things() : size.numbers();
+      known = new Meaning.Input(name, type, slot, direct);
+      size = size.plus(type.slots());
       inputs.put(name, known);
     } else if (direct && !known.direct()) {
       known = new Meaning.Input(name, type, known.slot(), true);
@@ -33,7 +34,7 @@ final class Frame {
     return new ArrayList<>(inputs.values());
   }
 
-  int size() {
+  FrameSize size() {
     return size;
   }
 }

@@ -46,7 +46,8 @@ public sealed interface Meaning {
   /**
    * A name of the sheet that a formula reads.
    *
-   * @param slot first slot of its value in the formula's frame
+   * @param slot first slot of its value in the formula's frame; for a thing in space among the
+   *     slots for things
    * @param direct whether the formula itself names it; otherwise a function that it calls does
    */
   record Input(String name, Type type, int slot, boolean direct) {}

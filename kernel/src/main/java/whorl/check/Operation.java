@@ -2,12 +2,15 @@ package whorl.check;
 
 import java.util.List;
 import whorl.diagnostic.Span;
+import whorl.laws.Rule;
+import whorl.laws.ThingSort;
 
 /**
  * A checked tree: operations on plain numbers in coherent SI units, every conversion factor folded
- * in. Operations come in three characters that cannot be mixed up: {@link Real}, {@link Vector} and
- * {@link Truth}. Inputs are read from a frame of doubles by slot: a real takes one slot, a vector
- * three in the order x, y, z, a truth value one (1 for true, 0 for false).
+ * in. Operations come in four characters that cannot be mixed up: {@link Real}, {@link Vector},
+ * {@link Truth} and {@link Thing}. Inputs are read from a frame by slot: of its doubles a real
+ * takes one, a vector three in the order x, y, z, a truth value one (1 for true, 0 for false); a
+ * thing in space takes one of the frame's slots for things.
  *
  * <p>Every node keeps the span of the expression that it came from, in the text of its definition,
  * so that a numeric failure can name the part at fault.
@@ -32,6 +35,15 @@ public sealed interface Operation {
   sealed interface Truth extends Operation {
     /** Answers one question for every form of condition. */
     <R> R match(TruthCases<R> cases);
+  }
+
+  /** An operation that gives a thing in space. */
+  sealed interface Thing extends Operation {
+    /** What sort of thing it gives. */
+    ThingSort sort();
+
+    /** Answers one question for every form of operation that gives a thing. */
+    <R> R match(ThingCases<R> cases);
   }
 
   /**
@@ -71,6 +83,8 @@ public sealed interface Operation {
     R call(Call call);
 
     R routineCall(RoutineCall call);
+
+    R use(RealUse use);
   }
 
   /**
@@ -96,6 +110,8 @@ public sealed interface Operation {
     R choice(VectorChoice choice);
 
     R call(VectorCall call);
+
+    R use(VectorUse use);
   }
 
   /**
@@ -117,6 +133,21 @@ public sealed interface Operation {
     R choice(TruthChoice choice);
 
     R call(TruthCall call);
+  }
+
+  /**
+   * The forms of operation that give a thing in space.
+   *
+   * @param <R> type of the answer
+   */
+  interface ThingCases<R> {
+    R input(ThingInput input);
+
+    R choice(ThingChoice choice);
+
+    R call(ThingCall call);
+
+    R use(ThingUse use);
   }
 
   /** A number. */
@@ -286,9 +317,14 @@ public sealed interface Operation {
    *
    * @param name as in the sheet
    * @param body what it works out
-   * @param frameSize number of slots
+   * @param frame the room that it takes
    */
-  record Body(String name, Operation body, int frameSize) {}
+  record Body(String name, Operation body, FrameSize frame) {
+    /** A body that reads no things in space. */
+    public Body(String name, Operation body, int numbers) {
+      this(name, body, new FrameSize(numbers, 0));
+    }
+  }
 
   /**
    * Arguments in order of the slots of the callee's frame: those of the parameters, then those that
@@ -488,6 +524,97 @@ public sealed interface Operation {
 
     @Override
     public <R> R match(TruthCases<R> cases) {
+      return cases.call(this);
+    }
+  }
+
+  /**
+   * What goes into one use of a rule for one of its parameters.
+   *
+   * @param parameter by number, from 0
+   * @param values one, or as many as the author wrote where the parameter takes a list
+   * @param list whether the parameter takes a list
+   */
+  record Argument(int parameter, List<Operation> values, boolean list) {
+    /** Copies the values. */
+    public Argument {
+      values = List.copyOf(values);
+    }
+
+    /** The one value of a parameter. */
+    public static Argument of(int parameter, Operation value) {
+      return new Argument(parameter, List.of(value), false);
+    }
+  }
+
+  /**
+   * A rule at work: a law, or the reading of a part.
+   *
+   * @param rule whose work gives what the operation around it gives
+   * @param arguments in the order in which they are worked out; what is not given is left out
+   */
+  record Use(Rule rule, List<Argument> arguments) {
+    /** Copies the arguments. */
+    public Use {
+      arguments = List.copyOf(arguments);
+    }
+  }
+
+  /** A rule that gives a number. */
+  record RealUse(Span span, Use use) implements Real {
+    @Override
+    public <R> R match(RealCases<R> cases) {
+      return cases.use(this);
+    }
+  }
+
+  /** A rule that gives a vector. */
+  record VectorUse(Span span, Use use) implements Vector {
+    @Override
+    public <R> R match(VectorCases<R> cases) {
+      return cases.use(this);
+    }
+  }
+
+  /** A rule that gives a thing in space. */
+  record ThingUse(Span span, ThingSort sort, Use use) implements Thing {
+    @Override
+    public <R> R match(ThingCases<R> cases) {
+      return cases.use(this);
+    }
+  }
+
+  /** The thing in a slot of the frame. */
+  record ThingInput(Span span, ThingSort sort, int slot) implements Thing {
+    @Override
+    public <R> R match(ThingCases<R> cases) {
+      return cases.input(this);
+    }
+  }
+
+  /** One of two things; the other is not worked out. */
+  record ThingChoice(Span span, Truth condition, Thing then, Thing otherwise) implements Thing {
+    @Override
+    public ThingSort sort() {
+      return then.sort();
+    }
+
+    @Override
+    public <R> R match(ThingCases<R> cases) {
+      return cases.choice(this);
+    }
+  }
+
+  /** A call of a function that gives a thing; arguments as in {@link Call}. */
+  record ThingCall(Span span, ThingSort sort, Body callee, List<Operation> arguments)
+      implements Thing {
+    /** Copies the arguments. */
+    public ThingCall {
+      arguments = List.copyOf(arguments);
+    }
+
+    @Override
+    public <R> R match(ThingCases<R> cases) {
       return cases.call(this);
     }
   }

@@ -35,6 +35,9 @@ final class ProductChecker {
       if (next.operation() instanceof Operation.Truth) {
         throw CheckMessages.conditionForNumber(factor.value());
       }
+      if (next.operation() instanceof Operation.Thing) {
+        throw SpaceMessages.thingForNumber(factor.value(), next.type());
+      }
       boolean second = next.operation() instanceof Operation.Vector && vector != null;
       switch (factor.joint()) {
         case TIMES -> {

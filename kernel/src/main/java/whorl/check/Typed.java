@@ -3,6 +3,7 @@ package whorl.check;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
+import whorl.laws.ThingSort;
 import whorl.units.Rational;
 import whorl.units.kind.Operand;
 import whorl.units.kind.Powered;
@@ -34,6 +35,15 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
     return new Typed(operation, new Type.Vector(readings), null);
   }
 
+  static Typed of(Operation.Thing operation) {
+    return new Typed(
+        operation,
+        operation.sort() == ThingSort.INERTIA
+            ? new Type.Tensor(null, null)
+            : new Type.Thing(operation.sort()),
+        null);
+  }
+
   static Typed of(Operation.Truth operation) {
     return new Typed(operation, new Type.Truth(), null);
   }
@@ -45,7 +55,7 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
     } else if (type instanceof Type.Vector vector) {
       return Operand.of(vector.readings());
     }
-    throw new IllegalStateException("a condition has no kind of quantity");
+    throw new IllegalStateException("only numbers and vectors have a kind of quantity: " + type);
   }
 
   /** The same operation with other readings. */
@@ -56,10 +66,40 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
   /** Another operation of the same character, with other readings. */
   Typed read(Operation other, Operand operand) {
     Type read =
-        other instanceof Operation.Vector
-            ? new Type.Vector(operand.readings())
-            : new Type.Real(operand.readings());
+        type instanceof Type.Vector vector
+            ? new Type.Vector(operand.readings(), vector.reference(), vector.frame())
+            : new Type.Real(operand.readings(), type.about());
     return new Typed(other, read, operand.literal());
+  }
+
+  /** The same taken about something, if a quantity of its kind can be. */
+  Typed about(@Nullable Reference reference) {
+    if (type instanceof Type.Real real) {
+      return new Typed(operation, new Type.Real(real.readings(), reference), literal, factors);
+    } else if (type instanceof Type.Vector vector) {
+      return new Typed(
+          operation,
+          new Type.Vector(vector.readings(), reference, vector.frame()),
+          literal,
+          factors);
+    } else if (type instanceof Type.Tensor tensor) {
+      return new Typed(operation, new Type.Tensor(reference, tensor.frame()), null);
+    }
+    return this;
+  }
+
+  /** The same seen from a frame; null for the world. */
+  Typed seenFrom(@Nullable Anchor frame) {
+    if (type instanceof Type.Vector vector) {
+      return new Typed(
+          operation,
+          new Type.Vector(vector.readings(), vector.reference(), frame),
+          literal,
+          factors);
+    }
+    return type instanceof Type.Tensor tensor
+        ? new Typed(operation, new Type.Tensor(tensor.reference(), frame), null)
+        : this;
   }
 
   /** The same with the factors that it consists of. */

@@ -10,25 +10,31 @@ final class Activation {
   static final int MOST_LEVELS = 4_000;
 
   private final double[] frame;
+  private final Object[] things;
   private final Procedure[] procedures;
   private final Meter meter;
   private final int level;
 
-  private Activation(double[] frame, Procedure[] procedures, Meter meter, int level) {
+  private Activation(
+      double[] frame, Object[] things, Procedure[] procedures, Meter meter, int level) {
     this.frame = frame;
+    this.things = things;
     this.procedures = procedures;
     this.meter = meter;
     this.level = level;
   }
 
   /** A formula at work: the first of the procedures. */
-  static Activation of(Procedure[] procedures, double[] frame, Meter meter) {
-    return entered(procedures[0], new Activation(frame, procedures, meter, 0));
+  static Activation of(Procedure[] procedures, double[] frame, Object[] things, Meter meter) {
+    return entered(procedures[0], new Activation(frame, things, procedures, meter, 0));
   }
 
   /** The body of a function at work with its own frame, called from a level of this body. */
-  Activation calling(Procedure callee, double[] calleeFrame, int fromLevel) {
-    return entered(callee, new Activation(calleeFrame, procedures, meter, level + fromLevel + 1));
+  Activation calling(Procedure callee, Slots calleeFrame, int fromLevel) {
+    return entered(
+        callee,
+        new Activation(
+            calleeFrame.numbers(), calleeFrame.things(), procedures, meter, level + fromLevel + 1));
   }
 
   private static Activation entered(Procedure body, Activation activation) {
@@ -43,6 +49,16 @@ final class Activation {
   /** The numbers it reads, by slot. */
   double[] frame() {
     return frame;
+  }
+
+  /** The things it reads, by slot. */
+  Object[] things() {
+    return things;
+  }
+
+  /** Notes that a law was used where it does not hold. */
+  void breach(Breach breach) {
+    meter.breach(breach);
   }
 
   /** The body of a function, by number. */

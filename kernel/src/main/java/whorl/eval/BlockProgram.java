@@ -12,7 +12,7 @@ import whorl.check.Operation;
  * <p>The formulas are worked out a block of rows at a time, operation by operation, in registers
  * that fit into the cache; what formulas have in common is worked out once, what does not vary once
  * a run. Functions are written out in place of their calls. A formula that would be too large when
- * written out, or that calls a routine, is worked out row by row instead.
+ * written out, that calls a routine or uses a law, is worked out row by row instead.
  *
  * <p>Every number is the same, to the last bit, as {@link ScalarEvaluator} gives for that row, and
  * so is every failure: a row in which a result comes out infinite or NaN is worked out again by
@@ -39,7 +39,7 @@ public final class BlockProgram {
   }
 
   /**
-   * Makes formulas ready.
+   * Makes formulas ready that read no things in space.
    *
    * @param formulas checked trees that read one frame
    * @param frameSize number of slots of the frame
@@ -47,6 +47,19 @@ public final class BlockProgram {
    */
   public static BlockProgram compile(
       List<? extends Operation> formulas, int frameSize, BitSet varyingSlots) {
+    return compile(formulas, frameSize, List.of(), varyingSlots);
+  }
+
+  /**
+   * Makes formulas ready.
+   *
+   * @param formulas checked trees that read one frame
+   * @param frameSize number of slots of the frame
+   * @param things what the frame's slots for things hold, the same for all rows
+   * @param varyingSlots the slots that have a column
+   */
+  public static BlockProgram compile(
+      List<? extends Operation> formulas, int frameSize, List<?> things, BitSet varyingSlots) {
     if (varyingSlots.length() > frameSize) {
       throw new IllegalArgumentException(
           "varyingSlots must be below frameSize " + frameSize + ", but are " + varyingSlots);
@@ -67,7 +80,7 @@ public final class BlockProgram {
       } catch (RowGraphWriter.RowByRow rowByRow) {
         inBlocks = false;
       }
-      RowFormula rowFormula = RowFormula.of(formula, column, inBlocks);
+      RowFormula rowFormula = RowFormula.of(formula, things, column, inBlocks);
       rowFormulas.add(rowFormula);
       column += rowFormula.columns();
     }

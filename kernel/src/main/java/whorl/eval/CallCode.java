@@ -1,6 +1,7 @@
 package whorl.eval;
 
 import java.util.List;
+import whorl.check.FrameSize;
 import whorl.check.Operation;
 import whorl.check.Operation.Body;
 
@@ -9,14 +10,14 @@ import whorl.check.Operation.Body;
  * body reads them or not, and then the body.
  *
  * @param number of the body among the procedures
- * @param frameSize slots of the body's frame
+ * @param frameSize the room of the body's frame
  * @param arguments in the order of their slots
  * @param level of the call in the body it stands in
  */
-record CallCode(int number, int frameSize, List<Code> arguments, int level) {
+record CallCode(int number, FrameSize frameSize, List<Code> arguments, int level) {
   static CallCode of(Body callee, List<Operation> arguments, CodeWriter writer) {
     List<Code> codes = arguments.stream().map(writer::any).toList();
-    return new CallCode(writer.numberOf(callee), callee.frameSize(), codes, writer.level());
+    return new CallCode(writer.numberOf(callee), callee.frame(), codes, writer.level());
   }
 
   /** A call whose body gives a number. */
@@ -34,15 +35,19 @@ record CallCode(int number, int frameSize, List<Code> arguments, int level) {
     return ((Code.Truth) code(caller)).in(activation(caller));
   }
 
+  /** A call whose body gives a thing in space. */
+  Object thing(Activation caller) {
+    return ((Code.Thing) code(caller)).in(activation(caller));
+  }
+
   private Code code(Activation caller) {
     return caller.procedure(number).code();
   }
 
   private Activation activation(Activation caller) {
-    double[] frame = new double[frameSize];
-    int slot = 0;
+    var frame = new Slots(frameSize);
     for (Code argument : arguments) {
-      slot = argument.store(caller, frame, slot);
+      argument.store(caller, frame);
     }
     return caller.calling(caller.procedure(number), frame, level);
   }

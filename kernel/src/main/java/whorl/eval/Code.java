@@ -1,5 +1,8 @@
 package whorl.eval;
 
+import whorl.laws.Given;
+import whorl.laws.ThingSort;
+
 /**
  * A checked tree made ready to run: one small object per operation, without a boxed number on the
  * way. Throws {@link NoValue} where an operation has no value.
@@ -8,8 +11,11 @@ sealed interface Code {
   /** The value. */
   Value valueIn(Activation activation);
 
-  /** Puts the value into a frame and gives the slot behind it. */
-  int store(Activation activation, double[] frame, int slot);
+  /** Puts the value into the next slots of a frame. */
+  void store(Activation activation, Slots frame);
+
+  /** Gives the value to a parameter of a rule. */
+  void give(Activation activation, Given given, int parameter);
 
   /** Gives a number. */
   non-sealed interface Real extends Code {
@@ -21,9 +27,13 @@ sealed interface Code {
     }
 
     @Override
-    default int store(Activation activation, double[] frame, int slot) {
-      frame[slot] = in(activation);
-      return slot + 1;
+    default void store(Activation activation, Slots frame) {
+      frame.add(in(activation));
+    }
+
+    @Override
+    default void give(Activation activation, Given given, int parameter) {
+      given.put(parameter, in(activation));
     }
   }
 
@@ -37,12 +47,17 @@ sealed interface Code {
     }
 
     @Override
-    default int store(Activation activation, double[] frame, int slot) {
+    default void store(Activation activation, Slots frame) {
       Value.Vector vector = in(activation);
-      frame[slot] = vector.x();
-      frame[slot + 1] = vector.y();
-      frame[slot + 2] = vector.z();
-      return slot + 3;
+      frame.add(vector.x());
+      frame.add(vector.y());
+      frame.add(vector.z());
+    }
+
+    @Override
+    default void give(Activation activation, Given given, int parameter) {
+      Value.Vector vector = in(activation);
+      given.put(parameter, vector.x(), vector.y(), vector.z());
     }
   }
 
@@ -56,9 +71,36 @@ sealed interface Code {
     }
 
     @Override
-    default int store(Activation activation, double[] frame, int slot) {
-      frame[slot] = in(activation) ? 1 : 0;
-      return slot + 1;
+    default void store(Activation activation, Slots frame) {
+      frame.add(in(activation) ? 1 : 0);
+    }
+
+    @Override
+    default void give(Activation activation, Given given, int parameter) {
+      given.put(parameter, in(activation) ? 1 : 0);
+    }
+  }
+
+  /** Gives a thing in space. */
+  non-sealed interface Thing extends Code {
+    Object in(Activation activation);
+
+    /** What sort of thing it gives. */
+    ThingSort sort();
+
+    @Override
+    default Value valueIn(Activation activation) {
+      return new Value.Thing(sort(), in(activation));
+    }
+
+    @Override
+    default void store(Activation activation, Slots frame) {
+      frame.add(in(activation));
+    }
+
+    @Override
+    default void give(Activation activation, Given given, int parameter) {
+      given.put(parameter, in(activation));
     }
   }
 }

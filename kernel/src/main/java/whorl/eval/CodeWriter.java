@@ -16,6 +16,7 @@ final class CodeWriter {
   private final RealCodeWriter reals = new RealCodeWriter(this);
   private final VectorCodeWriter vectors = new VectorCodeWriter(this);
   private final TruthCodeWriter truths = new TruthCodeWriter(this);
+  private final ThingCodeWriter things = new ThingCodeWriter(this);
 
   // Two equal bodies may be one for our purpose, but comparing deep trees costs more than it saves.
   private final IdentityHashMap<Body, Integer> numbers = new IdentityHashMap<>();
@@ -69,7 +70,9 @@ final class CodeWriter {
     if (operation instanceof Operation.Vector vector) {
       return vector(vector);
     }
-    return truth((Operation.Truth) operation);
+    return operation instanceof Operation.Thing thing
+        ? thing(thing)
+        : truth((Operation.Truth) operation);
   }
 
   Code.Real real(Operation.Real operation) {
@@ -91,6 +94,18 @@ final class CodeWriter {
     Code.Truth code = operation.match(truths);
     level--;
     return code;
+  }
+
+  Code.Thing thing(Operation.Thing operation) {
+    enter();
+    Code.Thing code = operation.match(things);
+    level--;
+    return code;
+  }
+
+  /** A rule at work. */
+  UseCode use(Span span, Operation.Use use) {
+    return UseCode.of(site(span), use, this);
   }
 
   private void enter() {

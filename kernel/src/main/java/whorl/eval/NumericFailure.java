@@ -15,9 +15,15 @@ import whorl.diagnostic.Span;
  *     and where a result is too large the last number that went in; where the evaluation was ended,
  *     the number of operations or levels it had come to
  * @param call the call of a routine that gave no number; null in any other case
+ * @param refused what a law said of an argument that it cannot take; null in any other case
  */
 public record NumericFailure(
-    Reason reason, Span span, String inFunction, double operand, @Nullable Call call) {
+    Reason reason,
+    Span span,
+    String inFunction,
+    double operand,
+    @Nullable Call call,
+    @Nullable Refused refused) {
 
   /**
    * A call of a routine that gave no number.
@@ -32,9 +38,18 @@ public record NumericFailure(
     }
   }
 
+  /**
+   * What a law said of an argument that it cannot take.
+   *
+   * @param rule the law
+   * @param reason what is wrong, and why
+   * @param fix what to do; may be empty
+   */
+  public record Refused(String rule, String reason, String fix) {}
+
   /** A failure of the sheet's own arithmetic. */
   public NumericFailure(Reason reason, Span span, String inFunction, double operand) {
-    this(reason, span, inFunction, operand, null);
+    this(reason, span, inFunction, operand, null, null);
   }
 
   /** The ways in which a part can have no value. */
@@ -55,6 +70,8 @@ public record NumericFailure(
     ZERO_TO_NEGATIVE_POWER,
     /** A routine gave infinity or NaN, which is the operand, or failed; the operand is then NaN. */
     ROUTINE_WITHOUT_VALUE,
+    /** A law cannot take an argument. */
+    REFUSED,
     /** The evaluation was interrupted. */
     INTERRUPTED,
     /** The evaluation took more operations than allowed. */

@@ -17,12 +17,14 @@ import whorl.check.Operation.Power;
 import whorl.check.Operation.Product;
 import whorl.check.Operation.Real;
 import whorl.check.Operation.RealCases;
+import whorl.check.Operation.RealUse;
 import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Unary;
 import whorl.check.Operation.UnaryFunction;
 import whorl.check.Operation.VariablePower;
 import whorl.eval.NumericFailure.Reason;
+import whorl.laws.Work;
 
 /** Writes the code of scalar operations. Every number the code gives is finite. */
 final class RealCodeWriter implements RealCases<Code.Real> {
@@ -175,5 +177,12 @@ final class RealCodeWriter implements RealCases<Code.Real> {
   public Code.Real routineCall(RoutineCall call) {
     List<Code.Real> arguments = call.arguments().stream().map(writer::real).toList();
     return new RoutineCode(writer.site(call.span()), call.routine(), arguments);
+  }
+
+  @Override
+  public Code.Real use(RealUse use) {
+    UseCode code = writer.use(use.span(), use.use());
+    var work = (Work.Real) use.use().rule().work();
+    return in -> code.real(in, work);
   }
 }

@@ -15,6 +15,7 @@ import whorl.check.Operation.Part;
 import whorl.check.Operation.Power;
 import whorl.check.Operation.Product;
 import whorl.check.Operation.RealCases;
+import whorl.check.Operation.RealUse;
 import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Term;
@@ -194,6 +195,12 @@ final class RealNodes implements RealCases<Integer> {
   /** Routines are called row by row: a row that does not need one must not call it. */
   @Override
   public Integer routineCall(RoutineCall call) {
+    throw new RowGraphWriter.RowByRow();
+  }
+
+  /** Laws are worked out row by row, so that each row is judged by where they hold. */
+  @Override
+  public Integer use(RealUse use) {
     throw new RowGraphWriter.RowByRow();
   }
 }

@@ -14,9 +14,8 @@ record RoutineCode(Site site, Routine routine, List<Code.Real> arguments) implem
   @Override
   public double in(Activation activation) {
     double[] values = new double[arguments.size()];
-    int slot = 0;
-    for (Code.Real argument : arguments) {
-      slot = argument.store(activation, values, slot);
+    for (int i = 0; i < values.length; i++) {
+      values[i] = arguments.get(i).in(activation);
     }
     if (Thread.currentThread().isInterrupted()) {
       throw interrupted();

@@ -1,5 +1,6 @@
 package whorl.eval;
 
+import java.util.List;
 import whorl.check.Operation;
 
 /**
@@ -11,9 +12,13 @@ import whorl.check.Operation;
  * @param inBlocks whether the block program works it out too, so that only failing rows are left
  */
 record RowFormula(ScalarEvaluator evaluator, int firstColumn, int columns, boolean inBlocks) {
-  static RowFormula of(Operation formula, int firstColumn, boolean inBlocks) {
+  static RowFormula of(Operation formula, List<?> things, int firstColumn, boolean inBlocks) {
+    if (formula instanceof Operation.Thing) {
+      throw new IllegalArgumentException("formulas must give numbers, but one gives a thing");
+    }
     int columns = formula instanceof Operation.Vector ? 3 : 1;
-    return new RowFormula(ScalarEvaluator.of(formula), firstColumn, columns, inBlocks);
+    return new RowFormula(
+        ScalarEvaluator.of(formula, things.toArray()), firstColumn, columns, inBlocks);
   }
 
   /** Whether the row has still to be worked out by itself. */

@@ -55,7 +55,8 @@ final class RowGraphWriter {
   /**
    * The nodes of a formula's value: one, or three for a vector.
    *
-   * @throws RowByRow if it is too large or calls a routine; the writer stays usable
+   * @throws RowByRow if it is too large, calls a routine or reads things in space; the writer stays
+   *     usable
    */
   List<Integer> write(Operation formula) {
     frame = formulaFrame;
@@ -109,6 +110,9 @@ final class RowGraphWriter {
     if (operation instanceof Operation.Vector vector) {
       VectorNode node = vector(vector);
       return List.of(node.x(), node.y(), node.z());
+    }
+    if (operation instanceof Operation.Thing) {
+      throw new RowByRow();
     }
     return List.of(truth((Operation.Truth) operation));
   }

@@ -14,6 +14,9 @@ import whorl.check.Operation;
  * interrupted, where functions that call functions come to more work than allowed, and where they
  * nest deeper than the stack allows. The interrupt status is left as it is.
  *
+ * <p>The things in space that a formula reads are given when it is made ready, the numbers each
+ * time.
+ *
  * <p>Immutable: one evaluator may serve several threads at once.
  */
 public final class ScalarEvaluator {
@@ -22,15 +25,22 @@ public final class ScalarEvaluator {
 
   private final Site formula;
   private final Procedure[] procedures;
+  private final Object[] things;
 
-  private ScalarEvaluator(Site formula, Procedure[] procedures) {
+  private ScalarEvaluator(Site formula, Procedure[] procedures, Object[] things) {
     this.formula = formula;
     this.procedures = procedures;
+    this.things = things;
   }
 
-  /** Makes a checked tree ready to be worked out. */
-  public static ScalarEvaluator of(Operation tree) {
-    return new ScalarEvaluator(new Site(tree.span(), ""), new CodeWriter().write(tree));
+  /**
+   * Makes a checked tree ready to be worked out.
+   *
+   * @param things the things in space that it reads, by slot
+   */
+  public static ScalarEvaluator of(Operation tree, Object... things) {
+    return new ScalarEvaluator(
+        new Site(tree.span(), ""), new CodeWriter().write(tree), things.clone());
   }
 
   /**
@@ -53,8 +63,9 @@ public final class ScalarEvaluator {
     }
     Meter meter = new Meter(formula, mostOperations);
     try {
-      Activation activation = Activation.of(procedures, frame, meter);
-      return new Outcome.Done(procedures[0].code().valueIn(activation));
+      Activation activation = Activation.of(procedures, frame, things, meter);
+      Value value = procedures[0].code().valueIn(activation);
+      return new Outcome.Done(value, meter.breaches());
     } catch (NoValue noValue) {
       return new Outcome.Failed(noValue.failure());
     }

@@ -18,6 +18,13 @@ record Site(Span span, String inFunction) {
   NoValue noValue(NumericFailure.Call call, double given) {
     return new NoValue(
         new NumericFailure(
-            NumericFailure.Reason.ROUTINE_WITHOUT_VALUE, span, inFunction, given, call));
+            NumericFailure.Reason.ROUTINE_WITHOUT_VALUE, span, inFunction, given, call, null));
+  }
+
+  /** What to throw where a law cannot take this part. */
+  NoValue noValue(NumericFailure.Refused refused) {
+    return new NoValue(
+        new NumericFailure(
+            NumericFailure.Reason.REFUSED, span, inFunction, Double.NaN, null, refused));
   }
 }

@@ -1,5 +1,7 @@
 package whorl.eval;
 
+import whorl.laws.ThingSort;
+
 /** A result in coherent SI units. */
 public sealed interface Value {
   /** A number. */
@@ -10,4 +12,7 @@ public sealed interface Value {
 
   /** Whether a condition holds. */
   record Truth(boolean holds) implements Value {}
+
+  /** A thing in space, of the class that its sort asks for. */
+  record Thing(ThingSort sort, Object content) implements Value {}
 }

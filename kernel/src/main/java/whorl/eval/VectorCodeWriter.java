@@ -11,6 +11,8 @@ import whorl.check.Operation.VectorInput;
 import whorl.check.Operation.VectorNegation;
 import whorl.check.Operation.VectorSum;
 import whorl.check.Operation.VectorTerm;
+import whorl.check.Operation.VectorUse;
+import whorl.laws.Work;
 
 /** Writes the code of vector operations. Every part of a vector that the code gives is finite. */
 final class VectorCodeWriter implements VectorCases<Code.Vector> {
@@ -117,5 +119,12 @@ final class VectorCodeWriter implements VectorCases<Code.Vector> {
   @Override
   public Code.Vector call(VectorCall call) {
     return CallCode.of(call.callee(), call.arguments(), writer)::vector;
+  }
+
+  @Override
+  public Code.Vector use(VectorUse use) {
+    UseCode code = writer.use(use.span(), use.use());
+    var work = (Work.Vector) use.use().rule().work();
+    return in -> code.vector(in, work);
   }
 }

@@ -13,6 +13,7 @@ import whorl.check.Operation.VectorInput;
 import whorl.check.Operation.VectorNegation;
 import whorl.check.Operation.VectorSum;
 import whorl.check.Operation.VectorTerm;
+import whorl.check.Operation.VectorUse;
 
 /** Writes vector operations into the graph, part by part. */
 final class VectorNodes implements VectorCases<VectorNode> {
@@ -109,5 +110,11 @@ final class VectorNodes implements VectorCases<VectorNode> {
   public VectorNode call(VectorCall call) {
     List<Integer> value = writer.call(call.callee(), call.arguments());
     return new VectorNode(value.get(0), value.get(1), value.get(2));
+  }
+
+  /** Laws are worked out row by row, so that each row is judged by where they hold. */
+  @Override
+  public VectorNode use(VectorUse use) {
+    throw new RowGraphWriter.RowByRow();
   }
 }

@@ -172,6 +172,13 @@ public final class JavaSheet {
     if (quantity.value() instanceof Value.Real real) {
       return real.value();
     }
+    if (quantity.value() instanceof Value.Thing thing) {
+      throw new IllegalArgumentException(
+          name
+              + " is "
+              + thing.sort().withArticle()
+              + "; a cell in Java reads numbers, such as one of its parts under a name of its own");
+    }
     throw new IllegalArgumentException(
         quantity.value() instanceof Value.Vector
             ? name

@@ -31,6 +31,9 @@ final class Amounts {
     if (quantity.value() instanceof Value.Vector vector) {
       return vector(quantity, vector);
     }
+    if (quantity.value() instanceof Value.Thing thing) {
+      return new Amount(true, thing.sort().withArticle(), "", "", "");
+    }
     boolean holds = quantity.value() instanceof Value.Truth truth && truth.holds();
     return new Amount(true, holds ? "holds" : "does not hold", "", "", "");
   }

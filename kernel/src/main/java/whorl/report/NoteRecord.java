@@ -96,6 +96,9 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
       parts.add(unit.fromSi(vector.z()));
       return parts;
     }
+    if (value instanceof Value.Thing thing) {
+      return new JsonPrimitive(thing.sort().words());
+    }
     return new JsonPrimitive(unit.fromSi(((Value.Real) value).value()));
   }
 

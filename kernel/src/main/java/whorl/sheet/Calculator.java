@@ -96,9 +96,9 @@ final class Calculator {
     return compared(node, (Checked.Reproduction) checked, frame);
   }
 
-  /** The values of the names that a statement reads, each in its slots. */
+  /** The numbers that a statement reads, each in its slots. */
   private double[] frame(Checked checked) {
-    var frame = new double[checked.basis().frameSize()];
+    var frame = new double[checked.basis().frameSize().numbers()];
     for (Meaning.Input input : checked.basis().inputs()) {
       var valued = (Result.Valued) results.of(input.name()).orElseThrow();
       if (valued.value() instanceof Value.Real real) {
@@ -114,9 +114,21 @@ final class Calculator {
     return frame;
   }
 
+  /** The things in space that a statement reads, each in its slot. */
+  private Object[] things(Checked checked) {
+    var things = new Object[checked.basis().frameSize().things()];
+    for (Meaning.Input input : checked.basis().inputs()) {
+      var valued = (Result.Valued) results.of(input.name()).orElseThrow();
+      if (valued.value() instanceof Value.Thing thing) {
+        things[input.slot()] = thing.content();
+      }
+    }
+    return things;
+  }
+
   private Value value(Node node, Checked checked, Operation operation, double[] frame)
       throws NoResult {
-    Outcome outcome = ScalarEvaluator.of(operation).evaluate(frame);
+    Outcome outcome = ScalarEvaluator.of(operation, things(checked)).evaluate(frame);
     if (outcome instanceof Outcome.Done done) {
       return done.value();
     }

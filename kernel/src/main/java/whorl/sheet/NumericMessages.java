@@ -37,6 +37,18 @@ final class NumericMessages {
         && results.of(failure.inFunction()).orElse(null) instanceof Result.Callable f) {
       return routine(call, f.checked().meaning(), failure.operand(), span);
     }
+    NumericFailure.Refused refused = failure.refused();
+    if (refused != null) {
+      return Diagnostic.of(
+          code(failure.reason()),
+          (inBody ? "In " + failure.inFunction() + ", " : "")
+              + refused.rule()
+              + ": "
+              + refused.reason(),
+          span,
+          with(given),
+          refused.fix());
+    }
     String part = text.slice(failure.span());
     String where = inBody ? "In " + failure.inFunction() + ", " : "";
     return Diagnostic.of(
@@ -103,7 +115,7 @@ final class NumericMessages {
       case DIRECTION_OF_ZERO -> "`" + part + "` has length zero, and so no direction.";
       case ZERO_TO_NEGATIVE_POWER ->
           "division by zero: `" + part + "` is 0 and stands under a negative power.";
-      case ROUTINE_WITHOUT_VALUE -> "`" + part + "` gives no number.";
+      case ROUTINE_WITHOUT_VALUE, REFUSED -> "`" + part + "` gives no number.";
       case INTERRUPTED -> "the calculation was interrupted.";
       case TOO_LONG -> "the calculation takes too many operations and was stopped.";
       case TOO_DEEP -> "functions call each other too deeply.";
@@ -117,7 +129,7 @@ final class NumericMessages {
       case OVERFLOW -> "Check the units and the exponents of what goes in.";
       case ROOT_OF_NEGATIVE, LOGARITHM_OF_NON_POSITIVE, ARC_OUT_OF_RANGE ->
           "Check what goes in: the formula holds only where `" + part + "` is in range.";
-      case DIRECTION_OF_ZERO -> "Check what goes in.";
+      case DIRECTION_OF_ZERO, REFUSED -> "Check what goes in.";
       case INTERRUPTED -> "The sheet is as it was.";
       case TOO_LONG -> "Functions that call each other many times over make many operations.";
       case TOO_DEEP -> "Give intermediate results names of their own.";
