@@ -2,6 +2,7 @@ package whorl.mechanics.body;
 
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.function.Supplier;
 import org.apache.commons.math3.geometry.euclidean.threed.Rotation;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import whorl.mechanics.Given;
@@ -19,6 +20,8 @@ import whorl.mechanics.reference.Turn;
  * centre of mass, and where that frame is.
  */
 public final class Body {
+  private static final double ROUNDING = 1e-9;
+
   private final Shape shape;
   private final double mass;
   private final Frame frame;
@@ -51,7 +54,8 @@ public final class Body {
             "rigid body",
             properties.atCentre().times(1 / mass),
             OptionalDouble.empty(),
-            properties.centre().negate());
+            properties.centre().negate(),
+            () -> Outline.NONE);
     return new Body(shape, mass, at(properties.centre()));
   }
 
@@ -68,42 +72,58 @@ public final class Body {
     }
     Body first = parts.get(0);
     MassProperties sum = first.inWorld;
-    double volume = first.shape.volume().orElse(Double.NaN);
+    double volume = first.volumeOrNaN();
     for (Body part : parts.subList(1, parts.size())) {
       first.demandMovesWith(part);
       sum = sum.plus(part.inWorld);
-      volume += part.shape.volume().orElse(Double.NaN);
+      volume += part.volumeOrNaN();
     }
-    return first.joined("assembly", sum, volume);
+    List<Body> all = List.copyOf(parts);
+    return first.joined("assembly", sum, volume, () -> outline(all));
   }
 
   /**
    * What is left of this body when others are taken out of it, such as a bore or a keyway.
    *
-   * @throws Refusal where a removed body moves differently, or where nothing sound is left
+   * @param removed bodies of the material that is taken out, each within this body
+   * @throws Refusal where a removed body moves differently or reaches outside this one, or where
+   *     nothing sound is left
    */
   public Body without(Body... removed) {
     MassProperties rest = inWorld;
-    double volume = shape.volume().orElse(Double.NaN);
+    double volume = volumeOrNaN();
     for (Body part : removed) {
       demandMovesWith(part);
       rest = rest.minus(part.inWorld);
-      volume -= part.shape.volume().orElse(Double.NaN);
+      volume -= part.volumeOrNaN();
     }
-    return joined(shape.name(), rest, volume);
+    List<Body> out = List.of(removed);
+    Enclosure.demandWithin(outline(), outline(out));
+    return joined(shape.name(), rest, volume, () -> outline().without(outline(out)));
   }
 
-  private Body joined(String name, MassProperties whole, double volume) {
+  private double volumeOrNaN() {
+    return shape.volume().orElse(Double.NaN);
+  }
+
+  /** The whole that replaces this body and goes with its frame; its outline is in the world. */
+  private Body joined(String name, MassProperties whole, double volume, Supplier<Outline> outline) {
     double mass = whole.mass();
     Vector3D inFrame = frame.fromWorld(whole.centre().subtract(frame.origin().position()));
     Rotation back = frame.attitude().revert();
+    Frame place = Frame.in(frame, inFrame, Rotation.IDENTITY);
     Shape joint =
         new Shape(
             name,
             whole.atCentre().times(1 / mass).turned(back),
             Double.isNaN(volume) ? OptionalDouble.empty() : OptionalDouble.of(volume),
-            shape.datum().subtract(inFrame));
-    return new Body(joint, mass, Frame.in(frame, inFrame, Rotation.IDENTITY));
+            shape.datum().subtract(inFrame),
+            () -> outline.get().mapped(v -> place.coordinates(Point.fixed(v)), false));
+    return new Body(joint, mass, place);
+  }
+
+  private static Outline outline(List<Body> bodies) {
+    return bodies.stream().map(Body::outline).reduce(Outline.NONE, Outline::plus);
   }
 
   private void demandMovesWith(Body part) {
@@ -121,8 +141,6 @@ public final class Body {
           "Place all parts in one frame.");
     }
   }
-
-  private static final double ROUNDING = 1e-9;
 
   /** Mass, centre of mass and inertia tensor along the axes of the world. */
   public MassProperties massProperties() {
@@ -152,6 +170,11 @@ public final class Body {
   /** The origin of the coordinates that the shape is described in; see {@link Shape#datum}. */
   public Point datum() {
     return frame.point(shape.datum());
+  }
+
+  /** What the body looks like, in the world. */
+  public Outline outline() {
+    return shape.drawn().get().mapped(v -> frame.point(v).position(), false);
   }
 
   /** The inertia tensor about the centre of mass along the axes of the body's own frame. */
@@ -187,6 +210,45 @@ public final class Body {
     Vector3D pivot = about.through().position();
     Vector3D centre = turn.applyTo(centre().position().subtract(pivot)).add(pivot);
     return placed(Frame.in(Frame.WORLD, centre, Turn.after(frame.attitude(), turn)));
+  }
+
+  /**
+   * This body mirrored in a plane. Its frame stays right-handed: y and z are mirrored with the
+   * body, x against it.
+   *
+   * @param through a point of the plane
+   * @param normal of the plane
+   * @throws Refusal where the body's frame moves, or where the normal has length zero
+   */
+  public Body mirrored(Point through, Vector3D normal) {
+    demandRest("mirrored");
+    Vector3D n = Given.direction("normal", normal);
+    double ahead = centre().minus(through).dotProduct(n);
+    Vector3D centre = centre().position().subtract(2 * ahead, n);
+    Vector3D y = frame.toWorld(Vector3D.PLUS_J);
+    Vector3D z = frame.toWorld(Vector3D.PLUS_K);
+    Vector3D mirroredY = y.subtract(2 * y.dotProduct(n), n);
+    Vector3D mirroredZ = z.subtract(2 * z.dotProduct(n), n);
+    Rotation attitude = Frame.axes(mirroredY.crossProduct(mirroredZ), mirroredY, mirroredZ);
+    return new Body(shape.mirrored(), mass, Frame.in(Frame.WORLD, centre, attitude));
+  }
+
+  /**
+   * This body with all lengths times a factor, of the same material: the mass grows with the cube,
+   * moments of inertia with the fifth power of the factor. The centre of mass stays where it is.
+   *
+   * @throws Refusal where the factor is not positive, or where the body has no volume, so that
+   *     nothing tells how its mass grows
+   */
+  public Body scaled(double factor) {
+    Given.positive("factor", factor, "");
+    if (shape.volume().isEmpty()) {
+      throw new Refusal(
+          "body",
+          "The " + shape.name() + " has no volume, so nothing tells how its mass grows with size.",
+          "Make the body again with the lengths and the mass that it is to have.");
+    }
+    return new Body(shape.scaled(factor), mass * factor * factor * factor, frame);
   }
 
   private void demandRest(String what) {

@@ -1,6 +1,7 @@
 package whorl.mechanics.body;
 
 import java.util.OptionalDouble;
+import java.util.function.Supplier;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import whorl.mechanics.Given;
 import whorl.mechanics.Refusal;
@@ -14,8 +15,15 @@ import whorl.mechanics.reference.InertiaTensor;
  * @param volume in m³; none for what is thin
  * @param datum the origin of the coordinates that the shape is described in, such as the middle of
  *     the base of a cone, as seen from the centre of mass, in m
+ * @param drawn makes what it looks like; only asked when that is wanted, for it takes longer than
+ *     all the rest
  */
-public record Shape(String name, InertiaTensor perMass, OptionalDouble volume, Vector3D datum) {
+public record Shape(
+    String name,
+    InertiaTensor perMass,
+    OptionalDouble volume,
+    Vector3D datum,
+    Supplier<Outline> drawn) {
 
   /**
    * The body of this shape with a mass in kg.
@@ -40,5 +48,31 @@ public record Shape(String name, InertiaTensor perMass, OptionalDouble volume, V
           "Give its mass, or take a shape that has a thickness.");
     }
     return ofMass(density * volume.getAsDouble());
+  }
+
+  /** The shape with all lengths times a factor. */
+  Shape scaled(double factor) {
+    double cube = factor * factor * factor;
+    return new Shape(
+        name,
+        perMass.times(factor * factor),
+        volume.isPresent() ? OptionalDouble.of(cube * volume.getAsDouble()) : volume,
+        datum.scalarMultiply(factor),
+        () -> drawn.get().mapped(v -> v.scalarMultiply(factor), false));
+  }
+
+  /** The shape mirrored in its own plane x = 0. */
+  Shape mirrored() {
+    return new Shape(
+        name,
+        new InertiaTensor(
+            perMass.xx(), perMass.yy(), perMass.zz(), -perMass.xy(), perMass.yz(), -perMass.zx()),
+        volume,
+        inX(datum),
+        () -> drawn.get().mapped(Shape::inX, true));
+  }
+
+  private static Vector3D inX(Vector3D v) {
+    return new Vector3D(-v.getX(), v.getY(), v.getZ());
   }
 }

@@ -13,7 +13,6 @@ import whorl.mechanics.reference.Axis;
 import whorl.mechanics.reference.Frame;
 import whorl.mechanics.reference.InertiaTensor;
 import whorl.mechanics.reference.Point;
-import whorl.mechanics.reference.Turn;
 
 class BodyTest {
   private static final double TINY = 1e-12;
@@ -124,9 +123,65 @@ class BodyTest {
   @Test
   void takingOutMoreThanThereIsIsRefused() {
     assertRefused("mass", "not less than", () -> DISC.without(DISC));
-    Body far = Shapes.solidCylinder(0.1, 0.1).ofMass(5);
-    Body outside =
-        far.placed(Frame.in(Frame.WORLD, new Vector3D(3, 0, 0), Turn.zTo(Vector3D.PLUS_K)));
-    assertRefused("inertia", "no body has", () -> DISC.without(outside));
+    Body bore = Shapes.solidCylinder(0.1, 0.1).ofMass(0.5);
+    Body outside = bore.placed(Frame.WORLD, new Vector3D(0.3, 0, 0), Vector3D.PLUS_K);
+    assertRefused("removed body", "reaches outside", () -> DISC.without(outside));
+    Body tooLong = Shapes.solidCylinder(0.1, 0.12).ofMass(0.5);
+    assertRefused("removed body", "reaches outside", () -> DISC.without(tooLong));
+    assertEquals(9.5, DISC.without(bore).mass());
+    Body catalogue = Body.of(DISC.massProperties());
+    Body heavy = Shapes.solidCylinder(0.1, 0.1).ofMass(5);
+    Body far = heavy.placed(Frame.WORLD, new Vector3D(3, 0, 0), Vector3D.PLUS_K);
+    assertRefused("inertia", "no body has", () -> catalogue.without(far));
+  }
+
+  @Test
+  void whatIsTakenOutMayTouchTheSurface() {
+    double density = 7850;
+    Body solid = Shapes.solidCylinder(0.4, 0.1).ofDensity(density);
+    Body rim = Shapes.hollowCylinder(0.4, 0.36, 0.1).ofDensity(density);
+    Body turned = rim.turned(new Axis(Point.ORIGIN, Vector3D.PLUS_K), 0.02);
+    Body core = Shapes.solidCylinder(0.36, 0.1).ofDensity(density);
+    assertEquals(core.mass(), solid.without(turned).mass(), TINY * solid.mass());
+    Body ball = Shapes.hollowSphere(0.4, 0.2).ofDensity(density);
+    Body inHollow = Shapes.solidSphere(0.1).ofDensity(density);
+    assertRefused("removed body", "reaches outside", () -> ball.without(inHollow));
+  }
+
+  @Test
+  void aMirroredBodyHasTheMirroredTensor() {
+    InertiaTensor tensor = new InertiaTensor(3, 4, 5, 0.1, -0.2, 0.3);
+    Body body = Body.of(new MassProperties(7, new Vector3D(1, 2, 3), tensor));
+    Body mirrored = body.mirrored(Point.fixed(0, 5, 0), Vector3D.PLUS_J);
+    assertNear(new Vector3D(1, 8, 3), mirrored.centre().position(), TINY);
+    assertNear(
+        new InertiaTensor(3, 4, 5, -0.1, 0.2, 0.3), mirrored.massProperties().atCentre(), TINY);
+    Body askew = mirrored.mirrored(Point.fixed(1, 1, 1), new Vector3D(1, 2, 3));
+    Body back = askew.mirrored(Point.fixed(1, 1, 1), new Vector3D(1, 2, 3));
+    assertNear(mirrored.massProperties().atCentre(), back.massProperties().atCentre(), TINY);
+    assertNear(mirrored.centre().position(), back.centre().position(), TINY);
+  }
+
+  @Test
+  void aScaledBodyKeepsItsMaterial() {
+    Body cone = Shapes.cone(0.2, 0.3).ofDensity(2700);
+    Body twice = cone.scaled(2);
+    Body made = Shapes.cone(0.4, 0.6).ofDensity(2700);
+    assertEquals(made.mass(), twice.mass(), TINY * made.mass());
+    assertNear(made.ownInertia(), twice.ownInertia(), TINY);
+    assertNear(made.datum().position(), twice.datum().position(), TINY);
+    assertRefused("body", "has no volume", () -> ThinShapes.ring(1).ofMass(2).scaled(2));
+    assertRefused("factor", "positive", () -> cone.scaled(0));
+  }
+
+  @Test
+  void theOutlineOfAnAssemblyStandsWhereItsPartsAre() {
+    Body left = DISC.placed(Frame.WORLD, new Vector3D(-1, 0, 0.5), Vector3D.PLUS_I);
+    Body both = Body.assembly(List.of(left, DISC));
+    Body moved = both.placed(Frame.in(Frame.WORLD, Vector3D.ZERO, Rotation.IDENTITY));
+    assertEquals(2, moved.outline().solids().size());
+    Vector3D before = left.outline().solids().get(0).skin().vertex(5);
+    Vector3D after = both.outline().solids().get(0).skin().vertex(5);
+    assertNear(before, after, TINY);
   }
 }
