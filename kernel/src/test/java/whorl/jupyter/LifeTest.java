@@ -143,7 +143,8 @@ class LifeTest {
       failed.await();
       assertEquals("ok", client.exchange(Channel.CONTROL, "kernel_info_request", "{}").status());
       client.execute("print a");
-      kernel.close();
+      kernel.stop();
+      kernel.join();
       assertTrue(kernel.log().startsWith("whorl: a failure in the warm-up: "), kernel::log);
     }
   }
