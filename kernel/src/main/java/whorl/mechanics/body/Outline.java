@@ -75,7 +75,7 @@ public record Outline(List<Solid> solids, List<Facets> sheets, List<Wire> wires)
   }
 
   /** The same with every point elsewhere; a mirroring map turns the triangles over. */
-  Outline mapped(UnaryOperator<Vector3D> map, boolean mirroring) {
+  public Outline mapped(UnaryOperator<Vector3D> map, boolean mirroring) {
     return new Outline(
         solids.stream().map(solid -> solid.mapped(map, mirroring)).toList(),
         sheets.stream().map(sheet -> sheet.mapped(map, mirroring)).toList(),
