@@ -7,7 +7,9 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import whorl.assist.Completion.Candidate;
 import whorl.check.Checked;
+import whorl.check.PartOfThing;
 import whorl.check.Type;
+import whorl.laws.ThingSort;
 import whorl.sheet.Sheet;
 import whorl.syntax.Token;
 import whorl.syntax.Token.Kind;
@@ -126,12 +128,27 @@ final class Completer {
       return List.of();
     }
     String whole = at.between(tokens.get(first).span().start(), tokens.get(last).span().end());
-    boolean vector =
-        draft.sound(whole).orElse(null) instanceof Checked.Value value
-            && value.formula().type() instanceof Type.Vector;
-    return Stream.of("x", "y", "z")
-        .filter(part -> vector && part.startsWith(at.typed()))
-        .map(part -> new Candidate(part, "property", part + " part of " + whole))
+    return partsOf(whole).stream().filter(part -> part.text().startsWith(at.typed())).toList();
+  }
+
+  private List<Candidate> partsOf(String whole) {
+    if (!(draft.sound(whole).orElse(null) instanceof Checked.Value value)) {
+      return List.of();
+    }
+    Type type = value.formula().type();
+    if (type instanceof Type.Vector) {
+      return Stream.of("x", "y", "z")
+          .map(part -> new Candidate(part, "property", part + " part of " + whole))
+          .toList();
+    } else if (type instanceof Type.Thing thing) {
+      return partsOf(thing.sort());
+    }
+    return type instanceof Type.Tensor ? partsOf(ThingSort.INERTIA) : List.of();
+  }
+
+  private static List<Candidate> partsOf(ThingSort sort) {
+    return PartOfThing.of(sort).stream()
+        .map(part -> new Candidate(part.name(), "property", part.meaning()))
         .toList();
   }
 

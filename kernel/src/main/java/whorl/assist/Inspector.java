@@ -86,6 +86,7 @@ final class Inspector {
         .or(() -> ofArgument(name))
         .or(() -> ofSheetOrCell(name))
         .or(() -> FunctionFacts.named(name).map(FunctionFacts::card))
+        .or(() -> LawCards.named(name))
         .or(() -> ConstantAtHand.named(name).map(Inspector::ofConstant))
         .or(() -> Keyword.named(name).map(Keyword::card));
   }
@@ -104,7 +105,7 @@ final class Inspector {
     }
     return draft.defines(name)
         ? Optional.empty()
-        : FunctionFacts.named(name).map(FunctionFacts::card);
+        : FunctionFacts.named(name).map(FunctionFacts::card).or(() -> LawCards.named(name));
   }
 
   /** A parameter of the function that the line defines. */
@@ -133,9 +134,15 @@ final class Inspector {
     }
     return at.calls().stream()
         .findFirst()
-        .flatMap(function -> draft.meaning(function.name().name()))
-        .filter(Meaning.Function.class::isInstance)
-        .flatMap(meaning -> ofParameter((Meaning.Function) meaning, name));
+        .map(function -> function.name().name())
+        .flatMap(
+            function ->
+                draft.defines(function)
+                    ? draft
+                        .meaning(function)
+                        .filter(Meaning.Function.class::isInstance)
+                        .flatMap(meaning -> ofParameter((Meaning.Function) meaning, name))
+                    : LawCards.parameter(function, name));
   }
 
   private static Optional<InfoCard> ofParameter(Meaning.Function function, String name) {

@@ -10,11 +10,15 @@ import java.util.stream.Collectors;
 import whorl.assist.Completion.Candidate;
 import whorl.check.ConstantAtHand;
 import whorl.check.Meaning;
+import whorl.laws.Law;
+import whorl.laws.Laws;
 import whorl.report.QuantityText;
 import whorl.sheet.Quantity;
 import whorl.sheet.Sheet;
 import whorl.syntax.GreekNames;
 import whorl.syntax.LogicalLine;
+import whorl.syntax.Token;
+import whorl.syntax.Token.Kind;
 import whorl.units.Unit;
 import whorl.units.UnitText;
 
@@ -41,7 +45,8 @@ final class NameCandidates {
 
   /** The names that begin as typed, the closest first; functions at hand behind the others. */
   List<Candidate> all() {
-    var names = new ArrayList<Name>(parameters());
+    var names = new ArrayList<Name>(argumentNames());
+    names.addAll(parameters());
     names.addAll(ofSheetNames());
     names.addAll(ofCellNames());
     names.addAll(atHand());
@@ -70,6 +75,38 @@ final class NameCandidates {
 
   private Closeness closeness(String name) {
     return Closeness.of(typed, List.of(name, GreekNames.spelled(name)));
+  }
+
+  /** What an argument of the call around the place could be named, those that are not given yet. */
+  private List<Name> argumentNames() {
+    Token before = at.index() == 0 ? at.word() : at.tokens().get(at.index() - 1);
+    if (!before.is(Kind.OPEN) && !before.is(Kind.COMMA)) {
+      return List.of();
+    }
+    return new WordAt(at.source(), at.lines(), at.line(), at.index())
+        .calls().stream()
+            .findFirst()
+            .map(function -> function.name().name())
+            .map(this::argumentNames)
+            .orElse(List.of());
+  }
+
+  private List<Name> argumentNames(String function) {
+    if (draft.defines(function)) {
+      return draft.meaning(function).orElse(null) instanceof Meaning.Function known
+          ? known.parameters().stream()
+              .map(parameter -> argument(parameter.name(), NameCards.words(parameter)))
+              .toList()
+          : List.of();
+    }
+    return Laws.named(function).stream()
+        .flatMap(law -> law.parameters().stream())
+        .map(parameter -> argument(parameter.word(), LawCards.words(parameter)))
+        .toList();
+  }
+
+  private static Name argument(String word, String about) {
+    return new Name(word, false, () -> new Candidate(word + " = ", "param", about));
   }
 
   /** The parameters of the function that the line defines, once its head is complete. */
@@ -146,6 +183,14 @@ final class NameCandidates {
               function.name(),
               true,
               () -> new Candidate(function.name(), "function", function.head())));
+    }
+    for (String law : Laws.names()) {
+      Law first = Laws.named(law).get(0);
+      names.add(
+          new Name(
+              law,
+              true,
+              () -> new Candidate(law, "function", first.head() + ", " + first.title())));
     }
     return names;
   }

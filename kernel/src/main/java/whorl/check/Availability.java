@@ -41,8 +41,6 @@ public final class Availability {
   private static Optional<Diagnostic> gap(Expr expr, Predicate<String> defined) {
     if (expr instanceof Expr.Tolerance tolerance) {
       return Optional.of(CheckMessages.notAvailable("A tolerance with ±", tolerance.span()));
-    } else if (expr instanceof Expr.InFrame inFrame) {
-      return Optional.of(CheckMessages.notAvailable("A vector in a frame", inFrame.span()));
     } else if (expr instanceof Expr.Call call && call.over() != null) {
       return Optional.of(CheckMessages.notAvailable("“over” a case set", call.span()));
     } else if (expr instanceof Expr.Rate rate) {

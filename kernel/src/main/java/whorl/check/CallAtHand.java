@@ -56,7 +56,7 @@ final class CallAtHand {
       case MIN -> extreme(Operation.BinaryFunction.MIN);
       case MAX -> extreme(Operation.BinaryFunction.MAX);
       case ANGLE -> Typed.of(new Operation.AngleBetween(span, vector(0), vector(1)), ANGLE);
-      case UNIT -> Typed.of(new Operation.Direction(span, vector(0)), Readings.NUMBER);
+      case UNIT -> direction();
       case CROSS -> joined(Expr.Joint.CROSS);
       case DOT -> joined(Expr.Joint.DOT);
     };
@@ -111,16 +111,28 @@ final class CallAtHand {
       Typed met = Kinds.meet(Kinds.Together.COMPARED, extreme, argument(i - 1), next, argument(i));
       extreme =
           Typed.of(
-              new Operation.Binary(span, operation, real(extreme), real(next)),
-              met.operand().readings());
+                  new Operation.Binary(span, operation, real(extreme), real(next)),
+                  met.operand().readings())
+              .about(met.type().about());
     }
     return extreme;
   }
 
+  private Typed direction() {
+    Typed vector = checkedVector(0);
+    return Typed.of(
+            new Operation.Direction(span, (Operation.Vector) vector.operation()), Readings.NUMBER)
+        .seenFrom(((Type.Vector) vector.type()).frame());
+  }
+
   private Operation.Vector vector(int index) {
+    return (Operation.Vector) checkedVector(index).operation();
+  }
+
+  private Typed checkedVector(int index) {
     Typed typed = checker.check(argument(index));
-    if (typed.operation() instanceof Operation.Vector vector) {
-      return vector;
+    if (typed.type() instanceof Type.Vector) {
+      return typed;
     }
     throw CheckMessages.vectorNeeded(function, argument(index));
   }

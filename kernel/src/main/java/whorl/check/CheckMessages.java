@@ -120,7 +120,7 @@ final class CheckMessages {
     return typed.type() instanceof Type.Truth ? "a condition" : "a number";
   }
 
-  private static String described(Typed typed) {
+  static String described(Typed typed) {
     if (typed.type() instanceof Type.Truth) {
       return "a condition";
     } else if (typed.operation() instanceof Operation.Thing thing) {

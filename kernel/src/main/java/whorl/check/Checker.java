@@ -147,7 +147,7 @@ public final class Checker {
     var call =
         new Operation.RoutineCall(
             head.span(), new RoutineInUnits(routine, parameters, declaration.unit()), arguments);
-    Formula formula = declaration.formula(Typed.of(call, declaration.usualReadings()));
+    Formula formula = declaration.formula(Typed.of(call, declaration.usualReadings()), call);
     var basis = new Basis(List.of(), new FrameSize(parameters.size(), 0), List.of());
     return function(head.name(), parameters, formula, basis);
   }
@@ -228,7 +228,8 @@ public final class Checker {
   }
 
   private Formula undeclared(ExpressionChecker checker, Expr value) {
-    return formula(checker.check(value), checker.writtenUnit(value));
+    Typed typed = checker.check(value);
+    return formula(typed, checker.seen(typed), checker.writtenUnit(value));
   }
 
   private static Formula declared(ExpressionChecker checker, Expr value, Declaration declaration) {
@@ -236,7 +237,7 @@ public final class Checker {
     if (Expressions.isBare(value)) {
       Typed bare = checker.check(value);
       Typed taken = ExpressionChecker.inUnit(bare, unit, declaration.usualReadings(), value.span());
-      return declaration.formula(taken);
+      return declaration.formula(taken, checker.seen(taken));
     }
     Typed typed = checker.check(value, WrittenUnits.Reach.DECLARED);
     if (typed.operation() instanceof Operation.Truth) {
@@ -244,14 +245,19 @@ public final class Checker {
     } else if (typed.operation() instanceof Operation.Thing) {
       throw SpaceMessages.thingWithUnit(value, typed.type(), declaration.bracket().span());
     }
-    return declaration.formula(Kinds.declared(typed, value, declaration));
+    Typed settled = Kinds.declared(typed, value, declaration);
+    return declaration.formula(settled, checker.seen(settled));
   }
 
   private static Formula formula(Typed typed, Optional<Unit> written) {
+    return formula(typed, typed.operation(), written);
+  }
+
+  private static Formula formula(Typed typed, Operation seen, Optional<Unit> written) {
     if (typed.operation() instanceof Operation.Truth) {
-      return new Formula(typed.operation(), typed.type(), Unit.ONE, false, "");
+      return new Formula(typed.operation(), typed.type(), Unit.ONE, false, "", seen);
     } else if (typed.operation() instanceof Operation.Thing thing) {
-      return new Formula(thing, typed.type(), Unit.ONE, false, thing.sort().words());
+      return new Formula(thing, typed.type(), Unit.ONE, false, thing.sort().words(), seen);
     }
     Readings readings = typed.operand().readings();
     return new Formula(
@@ -261,6 +267,7 @@ public final class Checker {
             .or(() -> Kinds.usualUnit(readings))
             .orElseThrow(() -> CheckMessages.noUnit(typed.span(), readings)),
         written.isPresent(),
-        Kinds.words(readings));
+        Kinds.words(readings),
+        seen);
   }
 }

@@ -44,8 +44,12 @@ record Declaration(
     return wanted.isEmpty() ? unit.readings() : Readings.of(wanted.get(0));
   }
 
-  /** A value that fits, shown in the declared unit as a unit of the kind that it settled to. */
-  Formula formula(Typed typed) {
+  /**
+   * A value that fits, shown in the declared unit as a unit of the kind that it settled to.
+   *
+   * @param seen the same along the axes of the frame that it is seen from
+   */
+  Formula formula(Typed typed, Operation seen) {
     Readings readings = typed.operand().readings();
     Unit serving =
         readings.kinds().stream()
@@ -53,6 +57,6 @@ record Declaration(
             .flatMap(kind -> UnitCatalogue.standard().resolve(bracket.unit(), kind))
             .filter(narrowed -> narrowed.factor().equals(unit.factor()))
             .orElse(unit);
-    return new Formula(typed.operation(), typed.type(), serving, true, Kinds.words(readings));
+    return new Formula(typed.operation(), typed.type(), serving, true, Kinds.words(readings), seen);
   }
 }

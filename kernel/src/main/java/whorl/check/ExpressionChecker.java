@@ -7,6 +7,8 @@ import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Interruption;
 import whorl.diagnostic.Span;
+import whorl.laws.Law;
+import whorl.laws.Laws;
 import whorl.laws.ThingSort;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
@@ -21,6 +23,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   private final Scope scope;
   private final List<Meaning.Parameter> parameters;
   private final Frame frame;
+  private final boolean direct;
   private final List<Diagnostic> remarks = new ArrayList<>();
 
   /**
@@ -30,9 +33,33 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
    *     first of the frame
    */
   ExpressionChecker(Scope scope, List<Meaning.Parameter> parameters, Frame frame) {
+    this(scope, parameters, frame, true);
+  }
+
+  private ExpressionChecker(
+      Scope scope, List<Meaning.Parameter> parameters, Frame frame, boolean direct) {
     this.scope = scope;
     this.parameters = parameters;
     this.frame = frame;
+    this.direct = direct;
+  }
+
+  /** A checker over the same frame for what another statement writes and this one rests on. */
+  ExpressionChecker outside() {
+    return new ExpressionChecker(scope, List.of(), frame, false);
+  }
+
+  /** Whether an expression names a parameter, so that its value differs from call to call. */
+  boolean namesParameter(Expr expr) {
+    var found = new ArrayList<Expr>();
+    Expressions.walk(
+        expr,
+        part -> {
+          if (part instanceof Expr.Name name && parameter(name.name()) >= 0) {
+            found.add(part);
+          }
+        });
+    return !found.isEmpty();
   }
 
   /** What has been read so far, and what looked odd. */
@@ -63,6 +90,11 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
       return negated(negation.span(), check(negation.operand(), reach));
     }
     return check(expr);
+  }
+
+  /** What shows a value along the axes of the frame that it is seen from. */
+  Operation seen(Typed typed) {
+    return new Space(this).seen(typed).operation();
   }
 
   /** Checks an expression that must be a number. */
@@ -195,7 +227,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
           : new IllegalStateException("no meaning for " + name.name());
     }
     if (meaning.get() instanceof Meaning.Quantity quantity) {
-      Meaning.Input input = frame.input(name.name(), quantity.type(), true);
+      Meaning.Input input = frame.input(name.name(), quantity.type(), direct);
       return new Typed(read(name.span(), input), named(quantity.type(), name), null);
     }
     throw CheckMessages.functionWithoutArguments(name);
@@ -270,6 +302,9 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   @Override
   public Typed part(Expr.Part part) {
     Typed whole = check(part.of());
+    if (form(whole) == Form.THING) {
+      return new Space(this).part(part, whole);
+    }
     if (!(whole.type() instanceof Type.Vector type)) {
       throw CheckMessages.noParts(part, whole);
     }
@@ -280,7 +315,9 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
           case "z" -> Operation.Axis.Z;
           default -> throw CheckMessages.noParts(part, whole);
         };
-    return Typed.of(new Operation.Part(part.span(), vector(whole), axis), type.readings());
+    Typed seen = new Space(this).seen(whole);
+    return Typed.of(new Operation.Part(part.span(), vector(seen), axis), type.readings())
+        .about(ofUnknown(whole));
   }
 
   @Override
@@ -290,7 +327,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed inFrame(Expr.InFrame inFrame) {
-    throw unavailable(inFrame);
+    return new Space(this).inFrame(inFrame);
   }
 
   @Override
@@ -316,7 +353,8 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     Typed first = Kinds.meet(Kinds.Together.PARTS, x, vector.x(), y, vector.y());
     Typed all = Kinds.meet(Kinds.Together.PARTS, first, vector.x(), z, vector.z());
     return Typed.of(
-        new Operation.Parts(vector.span(), real(x), real(y), real(z)), all.operand().readings());
+            new Operation.Parts(vector.span(), real(x), real(y), real(z)), all.operand().readings())
+        .about(all.type().about());
   }
 
   @Override
@@ -329,32 +367,43 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     return switch (form(operand)) {
       case REAL ->
           new Typed(
-              new Operation.Negation(span, real(operand)),
-              operand.type(),
-              literal,
-              operand.factors());
+                  new Operation.Negation(span, real(operand)),
+                  operand.type(),
+                  literal,
+                  operand.factors())
+              .about(ofUnknown(operand));
       case VECTOR ->
           new Typed(
-              new Operation.VectorNegation(span, vector(operand)),
-              operand.type(),
-              null,
-              operand.factors());
+                  new Operation.VectorNegation(span, vector(operand)),
+                  operand.type(),
+                  null,
+                  operand.factors())
+              .about(ofUnknown(operand));
       case TRUTH -> throw CheckMessages.conditionForNumber(span);
       case THING -> throw SpaceMessages.thingForNumber(span, operand.type());
     };
   }
 
+  private static @Nullable Reference ofUnknown(Typed typed) {
+    Reference reference = typed.type().about();
+    return reference == null ? null : reference.ofUnknown();
+  }
+
   @Override
   public Typed sum(Expr.Sum sum) {
     var reach = WrittenUnits.Reach.TERM;
+    List<Typed> checked = sum.terms().stream().map(term -> check(term.value(), reach)).toList();
+    if (checked.stream().anyMatch(term -> form(term) == Form.THING)) {
+      return new Space(this).sum(sum, checked);
+    }
     Expr.Term first = sum.terms().get(0);
-    Typed total = check(first.value(), reach);
+    Typed total = checked.get(0);
     var reals = new ArrayList<Operation.Term>();
     var vectors = new ArrayList<Operation.VectorTerm>();
     collect(first, total, reals, vectors);
     for (int i = 1; i < sum.terms().size(); i++) {
       Expr.Term term = sum.terms().get(i);
-      Typed next = check(term.value(), reach);
+      Typed next = checked.get(i);
       if (form(next) != form(total)) {
         throw CheckMessages.mixedCharacters(first.value().span(), total, term.value().span(), next);
       }
@@ -370,7 +419,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   }
 
   /** The first terms of a sum. */
-  private static Expr upTo(Expr.Sum sum, int count) {
+  static Expr upTo(Expr.Sum sum, int count) {
     Expr first = sum.terms().get(0).value();
     Expr last = sum.terms().get(count - 1).value();
     return count == 1
@@ -424,7 +473,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
               null);
       case VECTOR ->
           Typed.of(new Operation.Magnitude(span, vector(operand)), operand.operand().readings())
-              .about(operand.type().about());
+              .about(ofUnknown(operand));
       case TRUTH -> throw CheckMessages.conditionForNumber(source);
       case THING -> throw SpaceMessages.thingForNumber(source, operand.type());
     };
@@ -487,24 +536,34 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     }
     if (then.operation() instanceof Operation.Thing one
         && otherwise.operation() instanceof Operation.Thing other) {
-      return thing(choice, condition, one, other);
+      return thing(choice, condition, then, one, otherwise, other);
     }
-    Readings readings =
-        Kinds.meet(Kinds.Together.BRANCHES, then, choice.then(), otherwise, choice.otherwise())
-            .operand()
-            .readings();
-    return form(then) == Form.VECTOR
-        ? Typed.of(
-            new Operation.VectorChoice(span, condition, vector(then), vector(otherwise)), readings)
-        : Typed.of(new Operation.Choice(span, condition, real(then), real(otherwise)), readings);
+    Typed met =
+        Kinds.meet(Kinds.Together.BRANCHES, then, choice.then(), otherwise, choice.otherwise());
+    return new Typed(
+        form(then) == Form.VECTOR
+            ? new Operation.VectorChoice(span, condition, vector(then), vector(otherwise))
+            : new Operation.Choice(span, condition, real(then), real(otherwise)),
+        met.type(),
+        null);
   }
 
   private static Typed thing(
-      Expr.Choice choice, Operation.Truth condition, Operation.Thing one, Operation.Thing other) {
+      Expr.Choice choice,
+      Operation.Truth condition,
+      Typed then,
+      Operation.Thing one,
+      Typed otherwise,
+      Operation.Thing other) {
     if (one.sort() != other.sort()) {
       throw SpaceMessages.mixedThings(choice, one.sort(), other.sort());
     }
-    return Typed.of(new Operation.ThingChoice(choice.span(), condition, one, other));
+    Typed typed = Typed.of(new Operation.ThingChoice(choice.span(), condition, one, other));
+    return then.type() instanceof Type.Tensor tensor
+        ? typed
+            .about(References.shared(then, choice::then, otherwise, choice.otherwise()))
+            .seenFrom(tensor.frame())
+        : typed;
   }
 
   @Override
@@ -524,6 +583,10 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
         return call(call, function);
       }
       throw CheckMessages.notAFunction(call);
+    }
+    List<Law> laws = Laws.named(name);
+    if (!laws.isEmpty()) {
+      return new LawCall(this, call, laws).typed();
     }
     FunctionAtHand atHand =
         FunctionAtHand.named(name)

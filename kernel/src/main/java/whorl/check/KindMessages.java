@@ -8,14 +8,18 @@ import java.util.Optional;
 import java.util.stream.Stream;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
+import whorl.laws.Law;
+import whorl.laws.Parameter;
 import whorl.syntax.Expr;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 import whorl.units.Dimension;
 import whorl.units.Rational;
 import whorl.units.Unit;
+import whorl.units.UnitCatalogue;
 import whorl.units.kind.Context;
 import whorl.units.kind.Explanation;
+import whorl.units.kind.Kind;
 import whorl.units.kind.Powered;
 import whorl.units.kind.Readings;
 import whorl.units.kind.Refusal;
@@ -186,6 +190,35 @@ final class KindMessages {
               new Explanation(problem, explanation.reason(), explanation.fix()),
               value.span(),
               found(value.typed(), parameter.unit().dimension()));
+        });
+  }
+
+  static CheckFailure lawArgument(
+      Refusal refusal, Part value, List<Kind> kinds, Parameter parameter, Law law) {
+    return new CheckFailure(
+        names -> {
+          Readings found = value.typed().operand().readings();
+          String problem =
+              law.name()
+                  + " takes "
+                  + parameter.sort().withArticle()
+                  + " as "
+                  + parameter.word()
+                  + ", but "
+                  + found.withArticle()
+                  + " stands there.";
+          Unit unit = UnitCatalogue.standard().usual(kinds.get(0));
+          Explanation explanation =
+              Expressions.isBare(value.expr())
+                  ? new Explanation(
+                      "",
+                      "`" + value.text() + "` has no unit.",
+                      "Write it with its unit, such as " + inUnit(value, unit))
+                  : Explanation.of(refusal, context(names, value));
+          return diagnostic(
+              new Explanation(problem, explanation.reason(), explanation.fix()),
+              value.span(),
+              found(value.typed(), kinds.get(0).dimension()));
         });
   }
 

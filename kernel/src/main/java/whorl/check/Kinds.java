@@ -7,6 +7,8 @@ import java.util.function.Consumer;
 import java.util.function.Function;
 import java.util.function.Supplier;
 import whorl.diagnostic.Diagnostic;
+import whorl.laws.Law;
+import whorl.laws.Parameter;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
 import whorl.units.Rational;
@@ -26,6 +28,7 @@ import whorl.units.kind.Readings;
  */
 final class Kinds {
   private static final UnitCatalogue UNITS = UnitCatalogue.standard();
+  private static final Kind LENGTH = Kind.named("length");
   private static final Kind TEMPERATURE = Kind.named("temperature");
   private static final Kind TEMPERATURE_DIFFERENCE = Kind.named("temperature_difference");
 
@@ -76,7 +79,8 @@ final class Kinds {
       throw KindMessages.unlike(
           refused.refusal(), together, part(leftText, left), part(rightText, right));
     }
-    return left.read(((Judgement.Accepted) judgement).operand());
+    return left.read(((Judgement.Accepted) judgement).operand())
+        .about(References.shared(left, () -> leftText, right, rightText));
   }
 
   /**
@@ -94,7 +98,9 @@ final class Kinds {
       throw KindMessages.unlike(
           refused.refusal(), Together.COMPARED, part(soFar.get(), total), part(nextText, next));
     }
-    return total.read(((Judgement.Accepted) judgement).operand());
+    return total
+        .read(((Judgement.Accepted) judgement).operand())
+        .about(References.shared(total, soFar, next, nextText));
   }
 
   static Typed product(
@@ -184,6 +190,31 @@ final class Kinds {
       throw KindMessages.argument(refused.refusal(), part(text, value), parameter, function);
     }
     return value;
+  }
+
+  /** Whether a number or vector is of one of some kinds; of any where there are none. */
+  static boolean fits(Typed value, List<Kind> kinds) {
+    return kinds.isEmpty()
+        || KindAlgebra.assigned(value.operand(), kinds, kinds.get(0).dimension())
+            instanceof Judgement.Accepted;
+  }
+
+  /** An argument of a law must be of one of some kinds; of any where there are none. */
+  static void lawArgument(Typed value, Expr text, List<Kind> kinds, Parameter parameter, Law law) {
+    if (kinds.isEmpty()) {
+      return;
+    }
+    Judgement judgement = KindAlgebra.assigned(value.operand(), kinds, kinds.get(0).dimension());
+    if (judgement instanceof Judgement.Refused refused) {
+      throw KindMessages.lawArgument(refused.refusal(), part(text, value), kinds, parameter, law);
+    }
+  }
+
+  /** What displaces a point must be a length. */
+  static void meetLength(Typed value, Expr text) {
+    if (!fits(value, List.of(LENGTH))) {
+      throw SpaceMessages.displacedByNoLength(text, value);
+    }
   }
 
   /** A unit for which no kind is named asks at least for the readings of its members. */

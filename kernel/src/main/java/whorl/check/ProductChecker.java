@@ -4,8 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
+import whorl.laws.ThingSort;
 import whorl.syntax.Expr;
 import whorl.units.Rational;
+import whorl.units.kind.Kind;
 
 /**
  * Checks a product. Stretches without a product of two vectors are judged whole by the kind
@@ -13,6 +15,8 @@ import whorl.units.Rational;
  * stretch to its left.
  */
 final class ProductChecker {
+  private static final Kind INERTIA = Kind.named("rotational_inertia");
+
   private final ExpressionChecker checker;
   private final Expr.Product product;
 
@@ -21,6 +25,15 @@ final class ProductChecker {
 
   private final List<Operation.Factor> reals = new ArrayList<>();
   private Operation.@Nullable Vector vector;
+  private Operation.@Nullable Thing tensor;
+
+  private @Nullable Reference reference;
+  private @Nullable Anchor frame;
+  private boolean framed;
+
+  /** Whether factors are taken about different things, so that the product is about neither. */
+  private boolean differ;
+
   private Span span;
 
   ProductChecker(ExpressionChecker checker, Expr.Product product) {
@@ -35,7 +48,7 @@ final class ProductChecker {
       if (next.operation() instanceof Operation.Truth) {
         throw CheckMessages.conditionForNumber(factor.value());
       }
-      if (next.operation() instanceof Operation.Thing) {
+      if (next.type() instanceof Type.Thing) {
         throw SpaceMessages.thingForNumber(factor.value(), next.type());
       }
       boolean second = next.operation() instanceof Operation.Vector && vector != null;
@@ -49,6 +62,8 @@ final class ProductChecker {
         case OVER -> {
           if (next.operation() instanceof Operation.Vector) {
             throw CheckMessages.overVector(factor.value());
+          } else if (next.type() instanceof Type.Tensor) {
+            throw SpaceMessages.overTensor(factor.value());
           }
           take(factor, next);
         }
@@ -56,10 +71,12 @@ final class ProductChecker {
           if (!second) {
             throw CheckMessages.crossNeedsVectors(span, vector != null, factor.value());
           }
+          note(next);
           close(Kinds.cross(closed(), next, upTo(factor)), factor);
         }
         case DOT -> {
           if (second) {
+            note(next);
             close(Kinds.dot(closed(), next, upTo(factor)), factor);
           } else {
             take(factor, next);
@@ -80,10 +97,32 @@ final class ProductChecker {
   private void take(Expr.Factor factor, Typed next) {
     boolean divisor = factor.joint() == Expr.Joint.OVER;
     kinds.add(factor.value(), next, divisor ? Rational.of(-1) : Rational.ONE);
+    note(next);
     if (next.operation() instanceof Operation.Vector operand) {
       vector = operand;
+    } else if (next.operation() instanceof Operation.Thing operand) {
+      if (tensor != null) {
+        throw SpaceMessages.twoTensors(factor.value());
+      }
+      tensor = operand;
     } else {
       reals.add(new Operation.Factor(divisor, (Operation.Real) next.operation()));
+    }
+  }
+
+  /** What the factors are taken about, and the frame of the first vector or tensor. */
+  private void note(Typed factor) {
+    Reference about = factor.type().about();
+    if (about != null) {
+      differ |= reference != null && !reference.sameAs(about);
+      reference = about.ofUnknown();
+    }
+    if (!framed && factor.type() instanceof Type.Vector seen) {
+      frame = seen.frame();
+      framed = true;
+    } else if (!framed && factor.type() instanceof Type.Tensor seen) {
+      frame = seen.frame();
+      framed = true;
     }
   }
 
@@ -100,14 +139,39 @@ final class ProductChecker {
   }
 
   private Typed closed() {
-    if (vector == null) {
+    if (tensor != null && vector != null) {
+      vector = new Operation.VectorUse(span, SpaceRule.TENSOR_TIMES_VECTOR.on(tensor, vector));
+      tensor = null;
+    }
+    if (tensor != null) {
+      return settled(tensorProduct(tensor));
+    } else if (vector == null) {
       Operation.Real whole =
           reals.size() == 1 && !reals.get(0).divisor()
               ? reals.get(0).value()
               : new Operation.Product(span, reals);
-      return Kinds.product(kinds.list(), product, whole, checker::remark);
+      return settled(Kinds.product(kinds.list(), product, whole, checker::remark));
     }
     Operation.Vector whole = reals.isEmpty() ? vector : new Operation.Scaled(span, vector, reals);
-    return Kinds.product(kinds.list(), product, whole, checker::remark);
+    return settled(Kinds.product(kinds.list(), product, whole, checker::remark));
+  }
+
+  /** A tensor times numbers, which must leave it a tensor. */
+  private Typed tensorProduct(Operation.Thing factor) {
+    if (reals.isEmpty()) {
+      return Typed.of(factor);
+    }
+    var whole = new Operation.Product(span, reals);
+    Typed judged = Kinds.product(kinds.list(), product, whole, checker::remark);
+    if (!Kinds.fits(judged, List.of(INERTIA))) {
+      throw SpaceMessages.noTensor(product, judged);
+    }
+    return Typed.of(
+        new Operation.ThingUse(span, ThingSort.INERTIA, SpaceRule.TENSOR_SCALED.on(factor, whole)));
+  }
+
+  /** The product with what it is taken about and the frame that it is seen from. */
+  private Typed settled(Typed typed) {
+    return typed.about(differ ? null : reference).seenFrom(frame);
   }
 }

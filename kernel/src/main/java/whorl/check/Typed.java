@@ -5,6 +5,7 @@ import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
 import whorl.laws.ThingSort;
 import whorl.units.Rational;
+import whorl.units.kind.Kind;
 import whorl.units.kind.Operand;
 import whorl.units.kind.Powered;
 import whorl.units.kind.Readings;
@@ -17,6 +18,8 @@ import whorl.units.kind.Readings;
  *     around it is judged by all of them at once; empty for anything else
  */
 record Typed(Operation operation, Type type, @Nullable Rational literal, List<Powered> factors) {
+
+  private static final Readings INERTIA = Readings.of(Kind.named("rotational_inertia"));
 
   /** Copies the factors. */
   Typed {
@@ -54,6 +57,8 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
       return new Operand(real.readings(), literal);
     } else if (type instanceof Type.Vector vector) {
       return Operand.of(vector.readings());
+    } else if (type instanceof Type.Tensor) {
+      return Operand.of(INERTIA);
     }
     throw new IllegalStateException("only numbers and vectors have a kind of quantity: " + type);
   }
@@ -70,6 +75,11 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
             ? new Type.Vector(operand.readings(), vector.reference(), vector.frame())
             : new Type.Real(operand.readings(), type.about());
     return new Typed(other, read, operand.literal());
+  }
+
+  /** The same worked out otherwise, by an operation of the same character. */
+  Typed with(Operation other) {
+    return new Typed(other, type, null);
   }
 
   /** The same taken about something, if a quantity of its kind can be. */

@@ -9,6 +9,7 @@ import whorl.notebook.Mark;
 import whorl.notebook.Note;
 import whorl.notebook.NoteRun;
 import whorl.notebook.Tally;
+import whorl.sheet.Lapse;
 import whorl.sheet.Step;
 
 /** Says on the error output what is wrong in a note and how it stands. */
@@ -47,6 +48,9 @@ final class RunSummary {
               + "\n");
     }
     for (Step step : run.steps()) {
+      for (Lapse lapse : step.standing().lapses()) {
+        err.println(cell + step.place().line() + ": OUTSIDE VALIDITY: " + lapse.text());
+      }
       if (Mark.of(step).isFailure()) {
         int line = step.place().line();
         err.println(cell + line + ": FAILS: " + run.source().lineText(line).strip());

@@ -2,6 +2,7 @@ package whorl.notebook;
 
 import com.google.gson.JsonArray;
 import com.google.gson.JsonElement;
+import com.google.gson.JsonObject;
 import com.google.gson.JsonParseException;
 import com.google.gson.JsonPrimitive;
 import java.util.ArrayList;
@@ -129,10 +130,23 @@ public final class Recheck {
     return true;
   }
 
-  /** The numbers of a value; none where it is no number and no array of numbers. */
+  /** All numbers of a value in order; none where there is anything else in it. */
   private static double[] numbers(JsonElement value) {
-    List<JsonElement> parts = value instanceof JsonArray array ? array.asList() : List.of(value);
-    boolean all = parts.stream().allMatch(part -> part instanceof JsonPrimitive p && p.isNumber());
-    return all ? parts.stream().mapToDouble(JsonElement::getAsDouble).toArray() : new double[0];
+    var numbers = new ArrayList<Double>();
+    return collected(value, numbers)
+        ? numbers.stream().mapToDouble(Double::doubleValue).toArray()
+        : new double[0];
+  }
+
+  private static boolean collected(JsonElement value, List<Double> numbers) {
+    if (value instanceof JsonArray array) {
+      return array.asList().stream().allMatch(part -> collected(part, numbers));
+    } else if (value instanceof JsonObject object) {
+      return object.asMap().values().stream().allMatch(part -> collected(part, numbers));
+    } else if (value instanceof JsonPrimitive primitive && primitive.isNumber()) {
+      numbers.add(primitive.getAsDouble());
+      return true;
+    }
+    return false;
   }
 }

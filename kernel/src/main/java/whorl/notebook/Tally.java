@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import whorl.sheet.Step;
 
 /** How a run note stands, counted. */
 public final class Tally {
@@ -11,10 +12,17 @@ public final class Tally {
   private final int errors;
 
   private Tally(NoteRun run) {
-    run.cells().stream()
-        .flatMap(cell -> cell.steps().stream())
-        .forEach(step -> marks.merge(Mark.of(step), 1, Integer::sum));
+    run.cells().stream().flatMap(cell -> cell.steps().stream()).forEach(this::count);
     errors = run.cells().stream().mapToInt(cell -> cell.errors().size()).sum();
+  }
+
+  /** Counts a step; a law outside its validity is an assumption that fails. */
+  private void count(Step step) {
+    marks.merge(Mark.of(step), 1, Integer::sum);
+    int lapses = step.standing().lapses().size();
+    if (lapses > 0) {
+      marks.merge(Mark.ASSUMPTION_FAILS, lapses, Integer::sum);
+    }
   }
 
   /** Counts the steps and errors of a run. */

@@ -1,5 +1,7 @@
 package whorl.report;
 
+import java.util.List;
+
 /**
  * A value as it is set on the page.
  *
@@ -7,14 +9,20 @@ package whorl.report;
  * @param number its digits, or the parts of a vector in parentheses, or the words of a truth value
  * @param power the power of ten behind the digits, as {@code ×10³}; empty for none
  * @param unit typeset; empty for a plain number
- * @param detail what a vector has to say besides, its axes and its size; empty for numbers
+ * @param details what a vector or a thing in space has to say besides, such as its axes and its
+ *     size; none for numbers
  */
-record Amount(boolean exact, String number, String power, String unit, String detail) {
+record Amount(boolean exact, String number, String power, String unit, List<String> details) {
   private static final String NO_BREAK = "\u00A0";
+
+  /** Copies the list. */
+  Amount {
+    details = List.copyOf(details);
+  }
 
   /** A number in a unit, which is empty for a plain number. */
   static Amount of(Figure figure, String unit) {
-    return new Amount(figure.exact(), figure.significand(), figure.power(), unit, "");
+    return new Amount(figure.exact(), figure.significand(), figure.power(), unit, List.of());
   }
 
   /** {@code =}, or {@code ≈} where digits were rounded away. */

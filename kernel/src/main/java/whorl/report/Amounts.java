@@ -2,10 +2,12 @@ package whorl.report;
 
 import java.math.BigDecimal;
 import java.math.BigInteger;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import whorl.eval.Value;
 import whorl.sheet.Quantity;
+import whorl.sheet.Setting;
 import whorl.units.Rational;
 import whorl.units.Unit;
 import whorl.units.UnitCatalogue;
@@ -32,10 +34,10 @@ final class Amounts {
       return vector(quantity, vector);
     }
     if (quantity.value() instanceof Value.Thing thing) {
-      return new Amount(true, thing.sort().withArticle(), "", "", "");
+      return ThingAmounts.of(thing, quantity.setting());
     }
     boolean holds = quantity.value() instanceof Value.Truth truth && truth.holds();
-    return new Amount(true, holds ? "holds" : "does not hold", "", "", "");
+    return new Amount(true, holds ? "holds" : "does not hold", "", "", List.of());
   }
 
   /**
@@ -87,18 +89,30 @@ final class Amounts {
   private static Amount vector(Quantity quantity, Value.Vector vector) {
     double size = Math.hypot(Math.hypot(vector.x(), vector.y()), vector.z());
     Unit unit = shownIn(quantity, size);
-    List<Figure> parts =
-        Figures.together(
-            List.of(unit.fromSi(vector.x()), unit.fromSi(vector.y()), unit.fromSi(vector.z())));
+    Amount length = in(unit, Figures.of(unit.fromSi(size)));
+    Setting setting = quantity.setting();
+    var details = new ArrayList<String>();
+    details.add(axes(setting) + ", size " + length.signed());
+    about(setting).ifPresent(details::add);
+    return triple(vector.x(), vector.y(), vector.z(), unit, details);
+  }
+
+  /** Three parts in a unit, at one power of ten. */
+  static Amount triple(double x, double y, double z, Unit unit, List<String> details) {
+    List<Figure> parts = Figures.together(List.of(unit.fromSi(x), unit.fromSi(y), unit.fromSi(z)));
     boolean exact = parts.stream().allMatch(Figure::exact);
     String inside = String.join(", ", parts.stream().map(Figure::significand).toList());
-    Amount length = in(unit, Figures.of(unit.fromSi(size)));
-    return new Amount(
-        exact,
-        "(" + inside + ")",
-        parts.get(0).power(),
-        UnitSigns.of(unit),
-        "world axes, size " + length.signed());
+    return new Amount(exact, "(" + inside + ")", parts.get(0).power(), UnitSigns.of(unit), details);
+  }
+
+  /** Along whose axes parts are shown. */
+  static String axes(Setting setting) {
+    return setting.frame().isEmpty() ? "world axes" : "axes of " + setting.frame();
+  }
+
+  /** What a quantity is taken about, if it is about something. */
+  static Optional<String> about(Setting setting) {
+    return setting.about().isEmpty() ? Optional.empty() : Optional.of("about " + setting.about());
   }
 
   private static Amount in(Unit unit, Figure figure) {

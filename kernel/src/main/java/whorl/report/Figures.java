@@ -24,6 +24,10 @@ public final class Figures {
 
   private static final int MOST_DIGITS = 15;
   private static final MathContext WITHOUT_NOISE = new MathContext(14, RoundingMode.HALF_EVEN);
+
+  /** Beside a number of size one, as many digits down as are taken for noise behind it. */
+  private static final double NOISE = 1e-14;
+
   private static final int LARGEST_PLAIN_ORDER = 3;
   private static final int SMALLEST_PLAIN_ORDER = -3;
 
@@ -76,7 +80,14 @@ public final class Figures {
     int order = order(new BigDecimal(largest).round(new MathContext(USUAL_DIGITS)));
     // Parts that are whole at four digits of the largest keep their own short form.
     int places = Math.max(leadPlaces, USUAL_DIGITS - 1 - (order - exponent));
-    return values.stream().map(value -> atPlace(value, exponent, places)).toList();
+    return values.stream()
+        .map(value -> atPlace(isNoise(value, largest) ? 0 : value, exponent, places))
+        .toList();
+  }
+
+  /** Whether a part is what rounding leaves of zero beside the largest. */
+  private static boolean isNoise(double value, double largest) {
+    return Math.abs(value) < largest * NOISE;
   }
 
   private static Figure atPlace(double value, int exponent, int places) {

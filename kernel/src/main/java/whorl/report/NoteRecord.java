@@ -6,12 +6,15 @@ import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 import whorl.eval.Value;
 import whorl.sheet.Comparison;
+import whorl.sheet.Lapse;
 import whorl.sheet.Quantity;
+import whorl.sheet.Setting;
 import whorl.sheet.Step;
 import whorl.sheet.Verdict;
 import whorl.syntax.Printer;
@@ -46,7 +49,10 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
   /** The record of some steps and errors. */
   public static JsonObject of(List<Step> steps, List<Fault> faults) {
     var record = new NoteRecord();
-    steps.forEach(step -> step.match(record));
+    for (Step step : steps) {
+      step.match(record);
+      step.standing().lapses().forEach(record::lapse);
+    }
     faults.forEach(record::fault);
     var object = new JsonObject();
     object.add("definitions", record.definitions);
@@ -70,12 +76,35 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     Quantity gives = defined.gives();
     var definition = new JsonObject();
     definition.addProperty("kind", gives.kind());
-    definition.addProperty("unit", gives.unit().symbol());
+    definition.addProperty("unit", unit(gives));
     definition.add("value", value(gives));
     definition.add("si", inUnit(gives.value(), gives.unit().coherent()));
+    reference(gives.setting()).ifPresent(found -> definition.add("reference", found));
     definition.addProperty("formula", Printer.expression(defined.statement().value()));
     definitions.add(defined.statement().name().name(), definition);
     return this;
+  }
+
+  /** The unit of the numbers; those of a thing in space are in coherent units. */
+  private static String unit(Quantity quantity) {
+    return quantity.value() instanceof Value.Thing thing
+        ? ThingRecord.unit(thing.sort())
+        : quantity.unit().symbol();
+  }
+
+  /** What a quantity is taken about and where it is seen from, if that is to be said. */
+  private static Optional<JsonObject> reference(Setting setting) {
+    if (setting.equals(Setting.NONE)) {
+      return Optional.empty();
+    }
+    var reference = new JsonObject();
+    if (!setting.about().isEmpty()) {
+      reference.addProperty("about", setting.about());
+    }
+    if (!setting.frame().isEmpty()) {
+      reference.addProperty("frame", setting.frame());
+    }
+    return Optional.of(reference);
   }
 
   private static JsonElement value(Quantity quantity) {
@@ -97,7 +126,7 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
       return parts;
     }
     if (value instanceof Value.Thing thing) {
-      return new JsonPrimitive(thing.sort().words());
+      return ThingRecord.of(thing);
     }
     return new JsonPrimitive(unit.fromSi(((Value.Real) value).value()));
   }
@@ -112,6 +141,15 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
   public NoteRecord assumed(Step.Assumed assumed) {
     assumptions.add(judged(Printer.expression(assumed.statement().condition()), assumed.verdict()));
     return this;
+  }
+
+  /** A law outside its validity is an assumption that fails. */
+  private void lapse(Lapse lapse) {
+    var assumption = new JsonObject();
+    assumption.addProperty("text", lapse.text());
+    assumption.addProperty("holds", false);
+    assumption.addProperty("law", lapse.law());
+    assumptions.add(assumption);
   }
 
   private static JsonObject judged(String text, Verdict verdict) {

@@ -22,8 +22,9 @@ public final class QuantityText {
     var lines = new ArrayList<String>();
     lines.add((amount.exact() ? "" : "≈ ") + amount.text());
     Amounts.coherent(quantity).map(Amount::signed).ifPresent(lines::add);
-    if (!amount.detail().isEmpty()) {
-      lines.add(amount.detail());
+    lines.addAll(amount.details());
+    if (amount.details().isEmpty()) {
+      Amounts.about(quantity.setting()).ifPresent(lines::add);
     }
     return lines.stream().map(line -> line.replace('\u00A0', ' ')).toList();
   }

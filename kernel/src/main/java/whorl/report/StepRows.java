@@ -10,6 +10,7 @@ import org.jspecify.annotations.Nullable;
 import whorl.eval.Value;
 import whorl.sheet.Comparison;
 import whorl.sheet.Given;
+import whorl.sheet.Lapse;
 import whorl.sheet.Quantity;
 import whorl.sheet.Step;
 import whorl.sheet.Verdict;
@@ -79,17 +80,18 @@ final class StepRows implements Step.Cases<Row> {
     Amount amount = Amounts.of(gives);
     var further = new ArrayList<Line>();
     var columns = new ArrayList<Amount>();
-    if (amount.detail().isEmpty()) {
+    if (amount.details().isEmpty()) {
       columns.add(amount);
+      Amounts.about(gives.setting()).ifPresent(about -> further.add(Line.of(Piece.quiet(about))));
     } else {
       further.add(Line.of(new Piece.Value(amount.signed())));
-      further.add(Line.of(Piece.quiet(amount.detail())));
+      amount.details().forEach(detail -> further.add(Line.of(Piece.quiet(detail))));
     }
     if (!input) {
       Amounts.coherent(gives).ifPresent(columns::add);
     }
     return new Row(
-        step.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL,
+        tone(step),
         quantity,
         gives.kind(),
         rule,
@@ -140,16 +142,7 @@ final class StepRows implements Step.Cases<Row> {
     if (result != null && !result.unit().equals(UnitText.ONE)) {
       gives.add(Line.of(Piece.quiet("in "), new Piece.Value(UnitSigns.of(result.unit()))));
     }
-    return new Row(
-        step.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL,
-        head,
-        kind,
-        List.of(rule),
-        with,
-        List.of(),
-        gives,
-        why(step),
-        null);
+    return new Row(tone(step), head, kind, List.of(rule), with, List.of(), gives, why(step), null);
   }
 
   private static Line head(Expr.Name name, List<Statement.Parameter> parameters) {
@@ -229,7 +222,14 @@ final class StepRows implements Step.Cases<Row> {
     if (!holds) {
       return Tone.BAD;
     }
-    return step.doubts().isEmpty() ? Tone.GOOD : Tone.DOUBTFUL;
+    return step.standing().isFirm() ? Tone.GOOD : Tone.DOUBTFUL;
+  }
+
+  private static Tone tone(Step step) {
+    if (!step.standing().lapses().isEmpty()) {
+      return Tone.BAD;
+    }
+    return step.doubts().isEmpty() ? Tone.PLAIN : Tone.DOUBTFUL;
   }
 
   private static List<Line> compared(Comparison comparison, boolean several) {
@@ -405,6 +405,12 @@ final class StepRows implements Step.Cases<Row> {
 
   private List<Line> why(Step step) {
     var lines = new ArrayList<Line>();
+    for (Lapse lapse : step.standing().lapses()) {
+      lines.add(
+          Line.of(
+              new Piece.State("outside its validity:", Tone.BAD),
+              Piece.words(" " + lapse.text() + " does not hold")));
+    }
     if (!step.doubts().isEmpty()) {
       lines.add(doubts(step.doubts()));
     }

@@ -12,7 +12,7 @@ import whorl.diagnostic.Interruption;
 import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 
-/** Which statements rest on names of an assumption that fails now. */
+/** Which statements rest on an assumption that fails now, or on a law outside its validity. */
 final class Doubts {
   /** No doubts. */
   static final Doubts NONE = new Doubts(Map.of());
@@ -20,7 +20,8 @@ final class Doubts {
   /** A statement may rest on more failing assumptions than anybody would read. */
   private static final int MOST_NAMED = 10;
 
-  private record Failing(Node assumption, String text) {}
+  /** An assumption that fails, or a definition that uses a law where it does not hold. */
+  private record Failing(Node at, String text) {}
 
   private final Map<Node, List<List<Failing>>> doubts;
 
@@ -40,6 +41,18 @@ final class Doubts {
             .computeIfAbsent(node.uses(), names -> new ArrayList<>())
             .add(new Failing(node, Printer.expression(assumption.condition())));
       }
+    }
+    for (Node node : results.lapsed()) {
+      node.defines()
+          .filter(name -> graph.definition(name).filter(node::equals).isPresent())
+          .ifPresent(
+              name -> {
+                List<Failing> ofName =
+                    failing.computeIfAbsent(Set.of(name), names -> new ArrayList<>());
+                for (Lapse lapse : results.of(node).map(Result::lapses).orElse(List.of())) {
+                  ofName.add(new Failing(node, lapse.text() + ", in " + name));
+                }
+              });
     }
     failing.values().forEach(alike -> alike.sort(Comparator.comparing(Failing::text)));
     var doubts = new LinkedHashMap<Node, List<List<Failing>>>();
@@ -67,7 +80,7 @@ final class Doubts {
 
   private static Stream<String> firstOf(List<Failing> alike, Node node) {
     return alike.stream()
-        .filter(failing -> failing.assumption() != node)
+        .filter(failing -> failing.at() != node)
         .map(Failing::text)
         .distinct()
         .limit(MOST_NAMED);

@@ -3,7 +3,6 @@ package whorl.sheet;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.Collectors;
 import whorl.check.Meaning;
 import whorl.check.Mentions;
 import whorl.diagnostic.Diagnostic;
@@ -137,13 +136,8 @@ final class NumericMessages {
   }
 
   private static String with(List<Given> given) {
-    if (given.isEmpty()) {
-      return "";
-    }
-    return given.stream()
-        .map(NumericMessages::named)
-        .flatMap(Optional::stream)
-        .collect(Collectors.joining(", ", "Here ", "."));
+    List<String> numbers = given.stream().flatMap(each -> named(each).stream()).toList();
+    return numbers.isEmpty() ? "" : "Here " + String.join(", ", numbers) + ".";
   }
 
   private static Optional<String> named(Given given) {

@@ -1,9 +1,12 @@
 package whorl.sheet;
 
 import org.jspecify.annotations.Nullable;
+import whorl.check.Anchor;
 import whorl.check.Checked;
 import whorl.check.ConstantAtHand;
 import whorl.check.Formula;
+import whorl.check.Reference;
+import whorl.check.Type;
 import whorl.eval.Value;
 import whorl.syntax.Expr;
 import whorl.syntax.Statement;
@@ -33,7 +36,24 @@ final class Quantities {
     Checked.Value checked = valued.checked();
     Formula formula = checked.formula();
     return new Quantity(
-        valued.value(), formula.unit(), formula.chosen(), formula.kind(), written(node, formula));
+        valued.seen(),
+        formula.unit(),
+        formula.chosen(),
+        formula.kind(),
+        written(node, formula),
+        setting(formula.type()));
+  }
+
+  private static Setting setting(Type type) {
+    Reference reference = type.about();
+    Anchor frame =
+        type instanceof Type.Vector vector
+            ? vector.frame()
+            : type instanceof Type.Tensor tensor ? tensor.frame() : null;
+    return reference == null && frame == null
+        ? Setting.NONE
+        : new Setting(
+            reference == null ? "" : reference.about().text(), frame == null ? "" : frame.text());
   }
 
   private static @Nullable String written(Node node, Formula formula) {

@@ -13,6 +13,11 @@ sealed interface Result {
     return List.of();
   }
 
+  /** Laws that the statement uses where they do not hold. */
+  default List<Lapse> lapses() {
+    return List.of();
+  }
+
   /** A result of a statement that passed the check. */
   sealed interface Sound extends Result {
     /** The checked statement. */
@@ -24,14 +29,30 @@ sealed interface Result {
     }
   }
 
-  /** A definition or shown expression with its value. */
-  record Valued(Checked.Value checked, Value value) implements Sound {}
+  /**
+   * A definition or shown expression with its value.
+   *
+   * @param value along the axes of the world, as other statements read it
+   * @param seen the same along the axes of the frame that it is seen from
+   */
+  record Valued(Checked.Value checked, Value value, Value seen, List<Lapse> lapses)
+      implements Sound {
+    /** Copies the list. */
+    public Valued {
+      lapses = List.copyOf(lapses);
+    }
+  }
 
   /** A function, ready to be called. */
   record Callable(Checked.Function checked) implements Sound {}
 
   /** A condition that was judged. */
-  record Judged(Checked.Condition checked, Verdict verdict) implements Sound {}
+  record Judged(Checked.Condition checked, Verdict verdict, List<Lapse> lapses) implements Sound {
+    /** Copies the list. */
+    public Judged {
+      lapses = List.copyOf(lapses);
+    }
+  }
 
   /**
    * A hand-worked value compared.
@@ -40,8 +61,18 @@ sealed interface Result {
    * @param within the largest deviation allowed, a fraction
    */
   record Compared(
-      Checked.Reproduction checked, Value computed, Value stated, double deviation, double within)
+      Checked.Reproduction checked,
+      Value computed,
+      Value stated,
+      double deviation,
+      double within,
+      List<Lapse> lapses)
       implements Sound {
+    /** Copies the list. */
+    public Compared {
+      lapses = List.copyOf(lapses);
+    }
+
     boolean holds() {
       return Math.abs(deviation) <= within;
     }

@@ -2,6 +2,7 @@ package whorl.sheet;
 
 import java.util.Collection;
 import java.util.HashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -16,19 +17,23 @@ final class Results implements Scope {
   private final Map<Node, Result> settled;
   private final Map<Node, Result> staged = new HashMap<>();
 
-  private Results(Graph graph, Map<Node, Result> settled) {
+  /** The settled statements that use a law outside its validity: few, and asked for often. */
+  private final Set<Node> settledLapsed;
+
+  private Results(Graph graph, Map<Node, Result> settled, Set<Node> settledLapsed) {
     this.graph = graph;
     this.settled = settled;
+    this.settledLapsed = settledLapsed;
   }
 
   /** No results yet. */
   static Results of(Graph graph) {
-    return new Results(graph, new HashMap<>());
+    return new Results(graph, new HashMap<>(), new LinkedHashSet<>());
   }
 
   /** The same results, over which new ones can be staged without touching these. */
   Results staging() {
-    return new Results(graph, settled);
+    return new Results(graph, settled, settledLapsed);
   }
 
   void stage(Node node, Result result) {
@@ -38,8 +43,26 @@ final class Results implements Scope {
   /** Makes the staged results those of the sheet, and forgets those of removed statements. */
   void settle(Collection<Node> removed) {
     settled.keySet().removeAll(Set.copyOf(removed));
+    Set<Node> lapsed = lapsed();
+    lapsed.removeAll(Set.copyOf(removed));
+    settledLapsed.clear();
+    settledLapsed.addAll(lapsed);
     settled.putAll(staged);
     staged.clear();
+  }
+
+  /** The statements that use a law outside its validity. */
+  Set<Node> lapsed() {
+    var lapsed = new LinkedHashSet<>(settledLapsed);
+    staged.forEach(
+        (node, result) -> {
+          if (result.lapses().isEmpty()) {
+            lapsed.remove(node);
+          } else {
+            lapsed.add(node);
+          }
+        });
+    return lapsed;
   }
 
   Optional<Result> of(Node node) {

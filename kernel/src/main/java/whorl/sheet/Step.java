@@ -17,11 +17,13 @@ public sealed interface Step {
   /** The statement as written. */
   Statement statement();
 
-  /**
-   * The assumptions, as written, that fail now and on whose names this step depends, ten at most;
-   * empty where the argument stands.
-   */
-  List<String> doubts();
+  /** What the argument of this step rests on and does not hold. */
+  Standing standing();
+
+  /** The assumptions and laws that fail now and on which this step depends. */
+  default List<String> doubts() {
+    return standing().doubts();
+  }
 
   /** Answers one question for every form of step. */
   <R> R match(Cases<R> cases);
@@ -64,12 +66,11 @@ public sealed interface Step {
       boolean input,
       List<Given> with,
       Quantity gives,
-      List<String> doubts)
+      Standing standing)
       implements Step {
     /** Copies the lists. */
     public Defined {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -88,12 +89,11 @@ public sealed interface Step {
       Statement.Function statement,
       List<Given> with,
       String resultKind,
-      List<String> doubts)
+      Standing standing)
       implements Step {
     /** Copies the lists. */
     public Function {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -111,8 +111,8 @@ public sealed interface Step {
   record Published(Place place, String label, Statement.Published statement, String resultKind)
       implements Step {
     @Override
-    public List<String> doubts() {
-      return List.of();
+    public Standing standing() {
+      return Standing.FIRM;
     }
 
     @Override
@@ -123,12 +123,11 @@ public sealed interface Step {
 
   /** A shown expression. A name shown alone has nothing in {@code with}. */
   record Shown(
-      Place place, Statement.Show statement, List<Given> with, Quantity gives, List<String> doubts)
+      Place place, Statement.Show statement, List<Given> with, Quantity gives, Standing standing)
       implements Step {
     /** Copies the lists. */
     public Shown {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -139,16 +138,11 @@ public sealed interface Step {
 
   /** A check of a condition. */
   record Checked(
-      Place place,
-      Statement.Check statement,
-      List<Given> with,
-      Verdict verdict,
-      List<String> doubts)
+      Place place, Statement.Check statement, List<Given> with, Verdict verdict, Standing standing)
       implements Step {
     /** Copies the lists. */
     public Checked {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -174,12 +168,11 @@ public sealed interface Step {
       double deviation,
       double within,
       boolean holds,
-      List<String> doubts)
+      Standing standing)
       implements Step {
     /** Copies the lists. */
     public Reproduced {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -194,12 +187,11 @@ public sealed interface Step {
       Statement.Assumption statement,
       List<Given> with,
       Verdict verdict,
-      List<String> doubts)
+      Standing standing)
       implements Step {
     /** Copies the lists. */
     public Assumed {
       with = List.copyOf(with);
-      doubts = List.copyOf(doubts);
     }
 
     @Override
@@ -243,8 +235,8 @@ public sealed interface Step {
     }
 
     @Override
-    public List<String> doubts() {
-      return List.of();
+    public Standing standing() {
+      return Standing.FIRM;
     }
 
     @Override
@@ -262,8 +254,8 @@ public sealed interface Step {
   record Broken(Place place, Statement statement, Diagnostic diagnostic, @Nullable Quantity last)
       implements Step {
     @Override
-    public List<String> doubts() {
-      return List.of();
+    public Standing standing() {
+      return Standing.FIRM;
     }
 
     @Override

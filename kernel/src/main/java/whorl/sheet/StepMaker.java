@@ -36,7 +36,7 @@ final class StepMaker {
   /** The step of a statement. */
   Step step(Node node) {
     Result result = results.of(node).orElseThrow();
-    List<String> doubts = allDoubts.on(node);
+    var standing = new Standing(allDoubts.on(node), result.lapses());
     Place place = node.place();
     Statement statement = node.statement();
     if (result instanceof Result.Waiting waiting) {
@@ -53,7 +53,7 @@ final class StepMaker {
           (Statement.Function) statement,
           given(statement, callable.checked()),
           callable.checked().kind(),
-          doubts);
+          standing);
     } else if (result instanceof Result.Compared compared) {
       Checked.Reproduction checked = compared.checked();
       return new Step.Reproduced(
@@ -65,24 +65,24 @@ final class StepMaker {
           compared.deviation(),
           compared.within(),
           compared.holds(),
-          doubts);
+          standing);
     } else if (result instanceof Result.Judged judged) {
       List<Given> given = given(statement, judged.checked());
       return statement instanceof Statement.Check check
-          ? new Step.Checked(place, check, given, judged.verdict(), doubts)
+          ? new Step.Checked(place, check, given, judged.verdict(), standing)
           : new Step.Assumed(
-              place, (Statement.Assumption) statement, given, judged.verdict(), doubts);
+              place, (Statement.Assumption) statement, given, judged.verdict(), standing);
     }
     var valued = (Result.Valued) result;
     Quantity gives = Quantities.of(node, valued);
     List<Given> given = given(statement, valued.checked());
     if (statement instanceof Statement.Definition definition) {
       boolean input = InputForm.isInput(definition.value());
-      return new Step.Defined(place, definition, input, given, gives, doubts);
+      return new Step.Defined(place, definition, input, given, gives, standing);
     }
     var show = (Statement.Show) statement;
     boolean name = show.value() instanceof Expr.Name;
-    return new Step.Shown(place, show, name ? List.of() : given, gives, doubts);
+    return new Step.Shown(place, show, name ? List.of() : given, gives, standing);
   }
 
   private List<Given> given(Statement statement, Checked checked) {

@@ -18,6 +18,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 import whorl.assist.Completion.Candidate;
 import whorl.check.ConstantAtHand;
 import whorl.check.Vocabulary;
+import whorl.laws.Laws;
 import whorl.sheet.CellId;
 import whorl.sheet.CellOutcome;
 import whorl.sheet.Sheet;
@@ -170,9 +171,11 @@ class CardTest {
     }
     assertEquals(
         new TreeSet<>(Vocabulary.atHand()),
-        Stream.concat(
+        Stream.of(
                 FunctionFacts.all().stream().map(FunctionFacts::name),
-                ConstantAtHand.all().stream().map(ConstantAtHand::symbol))
+                ConstantAtHand.all().stream().map(ConstantAtHand::symbol),
+                Laws.names().stream())
+            .flatMap(names -> names)
             .collect(Collectors.toCollection(TreeSet::new)));
   }
 

@@ -22,6 +22,7 @@ import whorl.sheet.Comparison;
 import whorl.sheet.Given;
 import whorl.sheet.Place;
 import whorl.sheet.Quantity;
+import whorl.sheet.Standing;
 import whorl.sheet.Step;
 import whorl.sheet.Verdict;
 import whorl.syntax.Expr;
@@ -63,13 +64,18 @@ final class SampleNote {
   static Step.Defined input(String name, Quantity quantity, String remark) {
     Expr value = num(quantity.written() == null ? "0" : quantity.written());
     return new Step.Defined(
-        HERE, definition(name, value, remark), true, List.of(), quantity, List.of());
+        HERE, definition(name, value, remark), true, List.of(), quantity, Standing.FIRM);
   }
 
   static Step.Defined derived(
       String name, Expr value, Quantity gives, String remark, List<String> doubts, Given... with) {
     return new Step.Defined(
-        HERE, definition(name, value, remark), false, List.of(with), gives, doubts);
+        HERE,
+        definition(name, value, remark),
+        false,
+        List.of(with),
+        gives,
+        new Standing(doubts, List.of()));
   }
 
   static Statement.Definition definition(String name, Expr value, String remark) {
@@ -91,7 +97,7 @@ final class SampleNote {
         new Statement.Check(NOWHERE, false, text, remark),
         List.of(with),
         new Verdict(holds, List.of(comparison)),
-        List.of());
+        Standing.FIRM);
   }
 
   static SampleNote flywheel() {
@@ -246,7 +252,7 @@ final class SampleNote {
             new Statement.Show(NOWHERE, magnitude(name("M_v")), null, ""),
             List.of(new Given("M_v", arrow(1931.41, 0, 0, "N·m", "moment of force"))),
             free(1931.41, "N·m", "moment of force"),
-            List.of()));
+            Standing.FIRM));
     note.add(
         derived(
             "F_m",
@@ -290,7 +296,7 @@ final class SampleNote {
                 new Given("r_c", written("300", "mm", "radius")),
                 new Given("l_0", written("600", "m", "length"))),
             "radius",
-            List.of()));
+            Standing.FIRM));
     note.add(
         check(
             compare(name("E"), Expr.Relation.AT_MOST, num("10", "MJ")),
@@ -328,7 +334,7 @@ final class SampleNote {
             (inertia * speed - 26200) / 26200,
             0.01,
             true,
-            List.of()));
+            Standing.FIRM));
     note.add(
         new Step.Reproduced(
             HERE,
@@ -345,7 +351,7 @@ final class SampleNote {
             (1931.41 - 1700) / 1700,
             0.03,
             false,
-            List.of()));
+            Standing.FIRM));
     Expr.Comparison assumption =
         compare(
             squared(name("L_s")),
@@ -370,7 +376,7 @@ final class SampleNote {
                         OptionalDouble.of(246.1643 / 232.0284),
                         real(-14.1359, "N^2·m^2·s^2", ""),
                         false))),
-            List.of()));
+            Standing.FIRM));
     note.add(
         new Step.Waiting(
             HERE,
