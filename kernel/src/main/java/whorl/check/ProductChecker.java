@@ -28,6 +28,7 @@ final class ProductChecker {
   private Operation.@Nullable Thing tensor;
 
   private @Nullable Reference reference;
+  private @Nullable Reference ofVectors;
   private @Nullable Anchor frame;
   private boolean framed;
 
@@ -116,6 +117,8 @@ final class ProductChecker {
     if (about != null) {
       differ |= reference != null && !reference.sameAs(about);
       reference = about.ofUnknown();
+      // A number about an axis says nothing of a vector that it stretches.
+      ofVectors = factor.type() instanceof Type.Real ? ofVectors : reference;
     }
     if (!framed && factor.type() instanceof Type.Vector seen) {
       frame = seen.frame();
@@ -172,6 +175,7 @@ final class ProductChecker {
 
   /** The product with what it is taken about and the frame that it is seen from. */
   private Typed settled(Typed typed) {
-    return typed.about(differ ? null : reference).seenFrom(frame);
+    Reference about = typed.type() instanceof Type.Vector ? ofVectors : reference;
+    return typed.about(differ ? null : about).seenFrom(frame);
   }
 }

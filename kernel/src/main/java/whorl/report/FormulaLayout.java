@@ -109,11 +109,17 @@ final class FormulaLayout implements Expr.Cases<Layout> {
 
   @Override
   public Layout inFrame(Expr.InFrame inFrame) {
-    return side(
-        operand(inFrame.vector(), Binding.ATOM),
-        new Layout.Upright(" @ "),
-        operand(inFrame.frame(), Binding.ATOM));
+    // As a factor it needs parentheses, or the next factor would seem to belong to the frame.
+    return new Layout.SideBySide(
+        Binding.PRODUCT,
+        List.of(
+            operand(inFrame.vector(), Binding.ATOM),
+            new Layout.Upright(" @ "),
+            operand(inFrame.frame(), Binding.ATOM)));
   }
+
+  /** A line does not end within a named argument. */
+  private static final String NAMED = "\u00A0=\u00A0";
 
   private static Layout side(Layout... pieces) {
     return new Layout.SideBySide(Binding.ATOM, List.of(pieces));
@@ -310,7 +316,7 @@ final class FormulaLayout implements Expr.Cases<Layout> {
       arguments.add(
           name == null
               ? value
-              : side(symbol(name.name(), false), new Layout.Upright(" = "), value));
+              : side(symbol(name.name(), false), new Layout.Upright(NAMED), value));
     }
     Expr.Name over = call.over();
     if (over != null && !arguments.isEmpty()) {

@@ -3,11 +3,12 @@ package whorl.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 
 /**
  * Breaks a line that is too long for its column: in front of a sign such as {@code +} or {@code ≤}
- * if one stands late enough, else at a blank, else in front of a dot, and where all fail in
- * between. No-break spaces hold, and so do the dots of a unit.
+ * if one stands late enough, else at a blank, best one in few parentheses, else in front of a dot,
+ * and where all fail in between. No-break spaces hold, and so do the dots of a unit.
  */
 final class TextWrap {
   /** Marks a place inside a word where a line may break; takes no room. */
@@ -67,9 +68,12 @@ final class TextWrap {
     IntPredicate beforeSign = i -> points[i - 1] == ' ' && SIGNS.indexOf(points[i]) >= 0;
     IntPredicate outside = i -> depth[i] == 0 && beforeSign.test(i);
     IntPredicate atBlank = i -> points[i] == ' ' || points[i - 1] == ' ';
+    int shallowest = shallowest(depth, atBlank, Math.max(least, room / 3), room);
+    IntPredicate atShallowBlank = i -> depth[i] == shallowest && atBlank.test(i);
     IntPredicate beforeDot = i -> points[i] == MAY_BREAK.charAt(0);
     IntPredicate dotOutside = i -> depth[i] == 0 && beforeDot.test(i);
-    for (IntPredicate place : List.of(outside, dotOutside, beforeSign, atBlank, beforeDot)) {
+    for (IntPredicate place :
+        List.of(outside, dotOutside, beforeSign, atShallowBlank, atBlank, beforeDot)) {
       // A break that leaves most of the line empty is no gain over a lesser place.
       int earliest = place == atBlank || place == beforeDot ? least : Math.max(least, room / 3);
       for (int i = Math.min(room, points.length - 1); i >= earliest; i--) {
@@ -79,6 +83,15 @@ final class TextWrap {
       }
     }
     return room;
+  }
+
+  /** The fewest parentheses that are open at a place where a line may end; −1 without a place. */
+  private static int shallowest(int[] depth, IntPredicate place, int earliest, int room) {
+    return IntStream.rangeClosed(earliest, Math.min(room, depth.length - 1))
+        .filter(place)
+        .map(i -> depth[i])
+        .min()
+        .orElse(-1);
   }
 
   /** How many parentheses are open in front of each code point. */
