@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import whorl.laws.Laws;
 import whorl.report.Layout.Binding;
 import whorl.syntax.Expr;
 
@@ -325,7 +326,12 @@ final class FormulaLayout implements Expr.Cases<Layout> {
           last,
           side(arguments.get(last), new Layout.Upright(" over "), symbol(over.name(), false)));
     }
-    return side(symbol(function, false), new Layout.Group(arguments));
+    // The words of a law are no subscript.
+    Layout called =
+        Laws.named(function).isEmpty()
+            ? symbol(function, false)
+            : new Layout.Symbol(function, Layout.Face.UPRIGHT, "");
+    return side(called, new Layout.Group(arguments));
   }
 
   @Override
