@@ -120,7 +120,7 @@ final class FormulaLayout implements Expr.Cases<Layout> {
   }
 
   /** A line does not end within a named argument. */
-  private static final String NAMED = "\u00A0=\u00A0";
+  static final String NAMED = "\u00A0=\u00A0";
 
   private static Layout side(Layout... pieces) {
     return new Layout.SideBySide(Binding.ATOM, List.of(pieces));

@@ -119,9 +119,11 @@ final class FormulaText implements Layout.Cases<String> {
 
   @Override
   public String group(Layout.Group group) {
-    return group.members().stream()
-        .map(FormulaText::breakable)
-        .collect(Collectors.joining(", ", "(", ")"));
+    String members =
+        group.members().stream().map(FormulaText::breakable).collect(Collectors.joining(", "));
+    // Named arguments hold together, so they may need a line of their own.
+    String open = members.contains(FormulaLayout.NAMED) ? "(" + TextWrap.MAY_BREAK : "(";
+    return open + members + ")";
   }
 
   @Override
