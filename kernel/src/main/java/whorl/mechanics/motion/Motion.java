@@ -49,8 +49,8 @@ public final class Motion {
    * Something that should not change.
    *
    * @param name what it is: "energy"
-   * @param value its value; also used to judge what change is small
-   * @param scale the size that a change is judged by, worked out at the start
+   * @param value its value
+   * @param scale the size that a change is judged by: the largest during the run
    */
   public record Conserved(String name, StateFunction value, StateFunction scale) {
     /** A quantity whose change is judged by its own size. */

@@ -151,13 +151,15 @@ public final class MotionRun {
   private Kept kept(Motion.Conserved conserved) {
     double start = first(conserved.value());
     double change = 0;
+    double scale = 0;
     for (Piece piece : pieces) {
       for (int i = 0; i < Piece.POINTS; i++) {
         double value = conserved.value().at(piece.time(i), piece.state(i));
         change = Math.max(change, Math.abs(value - start));
+        scale = Math.max(scale, conserved.scale().at(piece.time(i), piece.state(i)));
       }
     }
-    return new Kept(conserved.name(), start, change, first(conserved.scale()));
+    return new Kept(conserved.name(), start, change, scale);
   }
 
   /** A function at all points of all pieces, those that two pieces share once. */
