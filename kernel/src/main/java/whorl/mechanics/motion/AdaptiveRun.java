@@ -43,7 +43,7 @@ final class AdaptiveRun {
   AdaptiveRun(Motion motion) {
     this.motion = motion;
     this.state = motion.start();
-    this.stepper = new Stepper(state, motion.limit());
+    this.stepper = new Stepper(state, motion.groups(), motion.limit());
     this.longest = motion.limit() * LONGEST_STEP;
     this.first = longest * FIRST_STEP;
     this.sides = new boolean[motion.jumps().size()];

@@ -1,6 +1,7 @@
 package whorl.mechanics.motion;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
@@ -19,6 +20,7 @@ public final class Motion {
 
   private final Rates rates;
   private final double[] start;
+  private final int[] groups;
   private final double limit;
   private final @Nullable Condition stop;
   private final List<Condition> jumps;
@@ -29,6 +31,7 @@ public final class Motion {
   private Motion(
       Rates rates,
       double[] start,
+      int[] groups,
       double limit,
       @Nullable Condition stop,
       List<Condition> jumps,
@@ -37,6 +40,7 @@ public final class Motion {
       Runnable poll) {
     this.rates = rates;
     this.start = start.clone();
+    this.groups = groups.clone();
     this.limit = limit;
     this.stop = stop;
     this.jumps = List.copyOf(jumps);
@@ -78,34 +82,49 @@ public final class Motion {
       throw new IllegalArgumentException(
           "the time limit must be positive and finite, but is " + limit + " s");
     }
-    return new Motion(rates, start, limit, null, List.of(), List.of(), USUAL_STEPS, () -> {});
+    int[] groups = new int[start.length];
+    Arrays.fill(groups, 1);
+    return new Motion(rates, start, groups, limit, null, List.of(), List.of(), USUAL_STEPS, () -> {});
+  }
+
+  /**
+   * The same, with states that are parts of one thing each, as those of a vector: their errors are
+   * judged by the largest of them.
+   *
+   * @param sizes how many states, one behind the other, belong together; 1 for a number
+   */
+  public Motion inGroups(int... sizes) {
+    if (Arrays.stream(sizes).sum() != start.length) {
+      throw new IllegalArgumentException("the groups do not make up the states");
+    }
+    return new Motion(rates, start, sizes, limit, stop, jumps, conserved, mostSteps, poll);
   }
 
   /** The same, ended as soon as a condition holds. */
   public Motion stopWhen(Condition condition) {
-    return new Motion(rates, start, limit, condition, jumps, conserved, mostSteps, poll);
+    return new Motion(rates, start, groups, limit, condition, jumps, conserved, mostSteps, poll);
   }
 
   /** The same, with conditions at whose turning the rates may jump: no step reaches across. */
   public Motion jumpingAt(List<Condition> conditions) {
-    return new Motion(rates, start, limit, stop, conditions, conserved, mostSteps, poll);
+    return new Motion(rates, start, groups, limit, stop, conditions, conserved, mostSteps, poll);
   }
 
   /** The same, with one more quantity that should not change, watched. */
   public Motion keeping(Conserved quantity) {
     var more = new ArrayList<>(conserved);
     more.add(quantity);
-    return new Motion(rates, start, limit, stop, jumps, more, mostSteps, poll);
+    return new Motion(rates, start, groups, limit, stop, jumps, more, mostSteps, poll);
   }
 
   /** The same with another bound on the number of steps. */
   public Motion inSteps(int most) {
-    return new Motion(rates, start, limit, stop, jumps, conserved, most, poll);
+    return new Motion(rates, start, groups, limit, stop, jumps, conserved, most, poll);
   }
 
   /** The same, with an action before every step; what it throws ends the run. */
   public Motion polling(Runnable action) {
-    return new Motion(rates, start, limit, stop, jumps, conserved, mostSteps, action);
+    return new Motion(rates, start, groups, limit, stop, jumps, conserved, mostSteps, action);
   }
 
   /**
@@ -123,6 +142,10 @@ public final class Motion {
 
   double[] start() {
     return start.clone();
+  }
+
+  int[] groups() {
+    return groups.clone();
   }
 
   double limit() {

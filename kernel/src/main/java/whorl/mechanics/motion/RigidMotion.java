@@ -120,6 +120,7 @@ public final class RigidMotion {
       return new SplitRun(this).run();
     }
     Motion motion = Motion.of(this::rates, start(), limit).polling(poll);
+    motion = isFree() ? motion.inGroups(3, 4, 3, 3) : motion.inGroups(3, 4);
     for (Motion.Conserved quantity : conserved()) {
       motion = motion.keeping(quantity);
     }

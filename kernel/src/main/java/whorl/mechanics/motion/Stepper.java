@@ -1,11 +1,13 @@
 package whorl.mechanics.motion;
 
+import java.util.Arrays;
 import org.apache.commons.math3.ode.nonstiff.DormandPrince853Integrator;
 
 /**
  * The method of Dormand and Prince of order 8, whose errors are judged by the largest size that
  * each state has had so far. So no scale has to be asked for, a state may start from 0, and one
- * that swings through 0 takes no needless steps there.
+ * that swings through 0 takes no needless steps there. The parts of a vector or a quaternion are
+ * judged by the largest of them.
  *
  * <p>Source: E. Hairer, S. P. Nørsett and G. Wanner, Solving Ordinary Differential Equations I, 2nd
  * ed., section II.5 (from memory); as worked out by Apache Commons Math.
@@ -18,16 +20,20 @@ final class Stepper extends DormandPrince853Integrator {
   private static final double SHORTEST = 1e-18;
 
   private final double[] largest;
+  private final int[] groupEnds;
   private final double limit;
 
   /**
    * A stepper.
    *
+   * @param groups how many states, one behind the other, are parts of one thing each
    * @param limit time up to which it will be asked to go, in s
    */
-  Stepper(double[] start, double limit) {
+  Stepper(double[] start, int[] groups, double limit) {
     super(0, Double.POSITIVE_INFINITY, new double[start.length], new double[start.length]);
     this.largest = new double[start.length];
+    this.groupEnds = groups.clone();
+    Arrays.parallelPrefix(groupEnds, Integer::sum);
     this.limit = limit;
     reached(start);
   }
@@ -53,11 +59,17 @@ final class Stepper extends DormandPrince853Integrator {
 
   @Override
   protected double estimateError(double[][] rates, double[] before, double[] after, double step) {
-    for (int i = 0; i < largest.length; i++) {
-      double size =
-          Math.max(largest[i], Math.max(Math.abs(after[i]), Math.abs(step * rates[0][i])));
+    int first = 0;
+    for (int end : groupEnds) {
+      double size = 0;
+      for (int i = first; i < end; i++) {
+        double here = Math.max(Math.abs(after[i]), Math.abs(step * rates[0][i]));
+        size = Math.max(size, Math.max(largest[i], here));
+      }
       // The least number keeps a state that is 0 throughout from being judged by 0.
-      vecAbsoluteTolerance[i] = Math.max(TOLERANCE * size, Double.MIN_NORMAL);
+      Arrays.fill(
+          vecAbsoluteTolerance, first, end, Math.max(TOLERANCE * size, Double.MIN_NORMAL));
+      first = end;
     }
     double error = super.estimateError(rates, before, after, step);
     if (error < 1) {
