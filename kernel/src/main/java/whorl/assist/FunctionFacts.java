@@ -10,11 +10,11 @@ import whorl.report.InfoCard.Fact;
  *
  * @param head its name with its arguments
  * @param gist what it is, in a few words
- * @param formula what it works out
+ * @param formula what it works out; empty where the gist says it
  * @param takes its arguments and their kinds
  * @param gives the kind of its result
  * @param valid for which arguments it has a value; empty for all
- * @param example a line with it that stands by itself
+ * @param example a line with it that stands by itself, if need be with a motion above it
  */
 record FunctionFacts(
     String head,
@@ -26,6 +26,9 @@ record FunctionFacts(
     String example) {
   private static final String NUMBER = "x, a number";
   private static final String ANGLE = "x, an angle";
+  private static final String NUMBERS = "a course of numbers, such as run_up.ω of a motion run_up";
+  private static final String ANY = "a course, such as run_up.ω of a motion run_up";
+  private static final String SAME = "a quantity of the kind of the course";
   private static final String ONE_KIND = "two or more quantities of one kind";
 
   private static final List<FunctionFacts> ALL =
@@ -187,7 +190,39 @@ record FunctionFacts(
               "two vectors",
               "a quantity, as an energy for a force and a path",
               "",
-              "dot((3, 0, 0) N, (2, 0, 0) m) [J]"));
+              "dot((3, 0, 0) N, (2, 0, 0) m) [J]"),
+          ofCourse("first(course)", "value at the start of a motion", ANY, SAME, "first(run_up.ω)"),
+          ofCourse("last(course)", "value at the end of a motion", ANY, SAME, "last(run_up.ω)"),
+          ofCourse(
+              "peak(course)", "largest value during a motion", NUMBERS, SAME, "peak(run_up.ω)"),
+          ofCourse(
+              "least(course)", "least value during a motion", NUMBERS, SAME, "least(run_up.ω)"),
+          ofCourse(
+              "mean(course)", "mean over the time of a motion", NUMBERS, SAME, "mean(run_up.ω)"),
+          ofCourse(
+              "rms(course)",
+              "root of the mean square over the time of a motion",
+              NUMBERS,
+              SAME,
+              "rms(run_up.ω)"),
+          ofCourse(
+              "at(course, time)",
+              "value at a time of a motion",
+              ANY + ", and a time from its start",
+              SAME,
+              "at(run_up.ω, 3 s)"),
+          ofCourse(
+              "when(course, value)",
+              "time at which a value is first reached",
+              NUMBERS + ", and a value of its kind",
+              "a time",
+              "when(run_up.ω, 30 rpm)"));
+
+  private static FunctionFacts ofCourse(
+      String head, String gist, String takes, String gives, String call) {
+    String motion = "motion run_up\n    ω [rpm] starts 0\n    ω' = 1 rad/s^2\n    within 10 s\n";
+    return new FunctionFacts(head, gist, "", takes, gives, "", motion + call);
+  }
 
   /** All functions at hand. */
   static List<FunctionFacts> all() {
@@ -205,11 +240,11 @@ record FunctionFacts(
         head,
         gist,
         List.of(
-            Fact.of("formula", formula),
+            new Fact("formula", formula.isEmpty() ? List.of() : List.of(formula)),
             Fact.of("takes", takes),
             Fact.of("gives", gives),
             new Fact("valid for", valid.isEmpty() ? List.of() : List.of(valid)),
-            Fact.of("example", example)));
+            new Fact("example", example.lines().toList())));
   }
 
   /** Its name. */

@@ -12,7 +12,7 @@ import whorl.report.InfoCard.Fact;
  * @param place where it may stand
  * @param gist what it does, in a few words
  * @param paragraph the same for someone who has not met it
- * @param example a line with it that stands by itself
+ * @param example a statement with it that stands by itself
  */
 record Keyword(String word, At place, String gist, String paragraph, String example) {
   /** Where a word may stand. */
@@ -50,6 +50,15 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
               "States a condition that the note rests on. While it does not hold, every result that"
                   + " uses one of its names is marked.",
               "assume 180 MPa < 235 MPa"),
+          new Keyword(
+              "motion",
+              At.LINE,
+              "follows equations of motion over time",
+              "Follows equations of motion over time. In the indented lines below it, states start"
+                  + " somewhere and have rates, written with a prime; stop when and within say when"
+                  + " it ends. Behind it, run_up.ω is the course of a state, and peak(run_up.ω) its"
+                  + " largest value.",
+              "motion run_up\n    ω [rpm] starts 0\n    ω' = 1 rad/s^2\n    within 10 s"),
           new Keyword(
               "nominal",
               At.CHECK,
@@ -116,7 +125,7 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
 
   /** All of it on a card. */
   InfoCard card() {
-    return new InfoCard(word, paragraph, List.of(Fact.of("example", example)));
+    return new InfoCard(word, paragraph, List.of(new Fact("example", example.lines().toList())));
   }
 
   /** The keyword of a spelling, if it is one. */

@@ -43,8 +43,6 @@ public final class Availability {
       return Optional.of(CheckMessages.notAvailable("A tolerance with ±", tolerance.span()));
     } else if (expr instanceof Expr.Call call && call.over() != null) {
       return Optional.of(CheckMessages.notAvailable("“over” a case set", call.span()));
-    } else if (expr instanceof Expr.Rate rate) {
-      return Optional.of(CheckMessages.notAvailable("A rate of a motion", rate.span()));
     } else if (expr instanceof Expr.Text text) {
       return Optional.of(CheckMessages.textHasNoUse(text.span()));
     } else if (expr instanceof Expr.Call call
@@ -105,7 +103,7 @@ public final class Availability {
 
     @Override
     public String motion(Statement.Motion motion) {
-      return "motion";
+      return "";
     }
 
     @Override

@@ -1,7 +1,10 @@
 package whorl.check;
 
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import whorl.syntax.Expr;
+import whorl.syntax.MotionLine;
 import whorl.units.Unit;
 
 /** A checked statement. */
@@ -14,6 +17,33 @@ public sealed interface Checked {
 
   /** A function; its inputs are what its body reads from the sheet. */
   record Function(Basis basis, Meaning.Function meaning, String kind) implements Checked {}
+
+  /**
+   * A motion.
+   *
+   * @param name what the sheet calls it
+   */
+  record Motion(Basis basis, String name, MotionPlan plan) implements Checked {
+    /** What its name stands for. */
+    public Meaning.Motion meaning() {
+      var columns = new LinkedHashMap<String, Meaning.Quantity>();
+      plan.columns().forEach(column -> columns.put(column.name(), column.quantity()));
+      return new Meaning.Motion(name, columns);
+    }
+
+    /** Whether an equation names a state on its left side. */
+    public static boolean names(MotionLine.Equation equation, String state) {
+      var found = new ArrayList<Expr>();
+      Expressions.walk(
+          equation.rate(),
+          part -> {
+            if (part instanceof Expr.Name name && name.name().equals(state)) {
+              found.add(part);
+            }
+          });
+      return !found.isEmpty();
+    }
+  }
 
   /** A check or an assumption. */
   record Condition(Basis basis, Clause clause) implements Checked {}

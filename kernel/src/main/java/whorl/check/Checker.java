@@ -94,6 +94,8 @@ public final class Checker {
       return condition(assumption.condition());
     } else if (statement instanceof Statement.Reproduction reproduction) {
       return reproduction(reproduction);
+    } else if (statement instanceof Statement.Motion motion) {
+      return new MotionChecker(scope, motion).checked();
     }
     throw new IllegalStateException(
         statement instanceof Statement.Published
@@ -111,7 +113,7 @@ public final class Checker {
                 checker,
                 definition.value(),
                 Declaration.of(definition.name(), definition.bracket()));
-    return new Checked.Value(checker.basis(), formula);
+    return value(checker, formula);
   }
 
   private Checked show(Statement.Show show) {
@@ -121,7 +123,7 @@ public final class Checker {
         show.bracket() == null
             ? undeclared(checker, show.value())
             : declared(checker, show.value(), Declaration.of(null, show.bracket()));
-    return new Checked.Value(checker.basis(), formula);
+    return value(checker, formula);
   }
 
   private Checked function(Statement.Function function) {
@@ -133,6 +135,10 @@ public final class Checker {
             ? undeclared(checker, function.body())
             : declared(
                 checker, function.body(), Declaration.of(function.name(), function.bracket()));
+    String over = checker.over();
+    if (over != null) {
+      throw MotionMessages.courseInFunction(function.name(), function.body(), over);
+    }
     return function(function.name(), parameters, formula, checker.basis());
   }
 
@@ -148,7 +154,7 @@ public final class Checker {
         new Operation.RoutineCall(
             head.span(), new RoutineInUnits(routine, parameters, declaration.unit()), arguments);
     Formula formula = declaration.formula(Typed.of(call, declaration.usualReadings()), call);
-    var basis = new Basis(List.of(), new FrameSize(parameters.size(), 0), List.of());
+    var basis = new Basis(List.of(), List.of(), new FrameSize(parameters.size(), 0), List.of());
     return function(head.name(), parameters, formula, basis);
   }
 
@@ -180,6 +186,7 @@ public final class Checker {
     var frame = new Frame(0);
     var checker = new ExpressionChecker(scope, List.of(), frame);
     Checked.Clause clause = clause(checker, condition);
+    refuseCourse(checker, condition);
     return new Checked.Condition(checker.basis(), clause);
   }
 
@@ -209,6 +216,7 @@ public final class Checker {
     var checker = new ExpressionChecker(scope, List.of(), frame);
     Typed value = checker.number(reproduction.value(), WrittenUnits.Reach.SIDE);
     Typed stated = checker.number(reproduction.stated(), WrittenUnits.Reach.SIDE);
+    refuseCourse(checker, reproduction.value());
     Typed met =
         Kinds.meet(
             Kinds.Together.COMPARED, value, reproduction.value(), stated, reproduction.stated());
@@ -227,12 +235,35 @@ public final class Checker {
         relative);
   }
 
-  private Formula undeclared(ExpressionChecker checker, Expr value) {
+  /** A course has a value for every instant of a motion, so its formula is one of courses too. */
+  private static Checked value(ExpressionChecker checker, Formula formula) {
+    String over = checker.over();
+    return new Checked.Value(
+        checker.basis(),
+        over == null
+            ? formula
+            : new Formula(
+                formula.operation(),
+                new Type.Course(formula.type(), over),
+                formula.unit(),
+                formula.chosen(),
+                formula.kind(),
+                formula.operation()));
+  }
+
+  private static void refuseCourse(ExpressionChecker checker, Expr condition) {
+    String over = checker.over();
+    if (over != null) {
+      throw MotionMessages.courseInCondition(condition, over);
+    }
+  }
+
+  static Formula undeclared(ExpressionChecker checker, Expr value) {
     Typed typed = checker.check(value);
     return formula(typed, checker.seen(typed), checker.writtenUnit(value));
   }
 
-  private static Formula declared(ExpressionChecker checker, Expr value, Declaration declaration) {
+  static Formula declared(ExpressionChecker checker, Expr value, Declaration declaration) {
     Unit unit = declaration.unit();
     if (Expressions.isBare(value)) {
       Typed bare = checker.check(value);

@@ -22,9 +22,11 @@ import whorl.units.kind.Readings;
 final class ExpressionChecker implements Expr.Cases<Typed> {
   private final Scope scope;
   private final List<Meaning.Parameter> parameters;
+  private final Locals locals;
   private final Frame frame;
   private final boolean direct;
   private final List<Diagnostic> remarks = new ArrayList<>();
+  private final List<Operation.Truth> choices = new ArrayList<>();
 
   /**
    * A checker for a formula of the sheet or the body of a function.
@@ -33,20 +35,21 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
    *     first of the frame
    */
   ExpressionChecker(Scope scope, List<Meaning.Parameter> parameters, Frame frame) {
-    this(scope, parameters, frame, true);
+    this(scope, parameters, Locals.NONE, frame, true);
   }
 
   private ExpressionChecker(
-      Scope scope, List<Meaning.Parameter> parameters, Frame frame, boolean direct) {
+      Scope scope, List<Meaning.Parameter> parameters, Locals locals, Frame frame, boolean direct) {
     this.scope = scope;
     this.parameters = parameters;
+    this.locals = locals;
     this.frame = frame;
     this.direct = direct;
   }
 
   /** A checker over the same frame for what another statement writes and this one rests on. */
   ExpressionChecker outside() {
-    return new ExpressionChecker(scope, List.of(), frame, false);
+    return new ExpressionChecker(scope, List.of(), Locals.NONE, frame, false);
   }
 
   /** Whether an expression names a parameter, so that its value differs from call to call. */
@@ -55,16 +58,36 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     Expressions.walk(
         expr,
         part -> {
-          if (part instanceof Expr.Name name && parameter(name.name()) >= 0) {
+          if (part instanceof Expr.Name name && isLocal(name)) {
             found.add(part);
           }
         });
     return !found.isEmpty();
   }
 
+  /** A checker for a part of a statement in which further names have a meaning of their own. */
+  ExpressionChecker(Scope scope, Locals locals, Frame frame) {
+    this(scope, List.of(), locals, frame, true);
+  }
+
+  /** A checker for a part of the formula that has a frame of its own. */
+  ExpressionChecker inside(Frame inner, Locals captured) {
+    return new ExpressionChecker(scope, List.of(), captured, inner, direct);
+  }
+
   /** What has been read so far, and what looked odd. */
   Basis basis() {
-    return new Basis(frame.inputs(), frame.size(), remarks);
+    return new Basis(frame.inputs(), frame.courses(), frame.size(), remarks);
+  }
+
+  /** The motion whose courses are read, or null. */
+  @Nullable String over() {
+    return frame.over();
+  }
+
+  /** The conditions by which what was checked so far chooses. */
+  List<Operation.Truth> choices() {
+    return choices;
   }
 
   /** Notes something that looks odd, though it is sound. */
@@ -211,9 +234,9 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed name(Expr.Name name) {
-    int slot = parameter(name.name());
-    if (slot >= 0) {
-      return Typed.of(new Operation.Input(name.span(), slot), parameters.get(slot).readings());
+    Optional<Typed> local = local(name);
+    if (local.isPresent()) {
+      return local.get();
     }
     Optional<ConstantAtHand> constant = ConstantAtHand.named(name.name());
     if (constant.isPresent()) {
@@ -228,9 +251,48 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     }
     if (meaning.get() instanceof Meaning.Quantity quantity) {
       Meaning.Input input = frame.input(name.name(), quantity.type(), direct);
+      if (quantity.type() instanceof Type.Course course) {
+        return courses().name(name, input, course);
+      }
       return new Typed(read(name.span(), input), named(quantity.type(), name), null);
     }
+    if (meaning.get() instanceof Meaning.Motion motion) {
+      throw MotionMessages.motionForNumber(name, motion);
+    }
     throw CheckMessages.functionWithoutArguments(name);
+  }
+
+  /** What a name means here, whatever it means in the sheet: a parameter, a state. */
+  Optional<Typed> local(Expr.Name name) {
+    int slot = parameter(name.name());
+    return slot >= 0
+        ? Optional.of(
+            Typed.of(new Operation.Input(name.span(), slot), parameters.get(slot).readings()))
+        : locals.value(name);
+  }
+
+  boolean isLocal(Expr.Name name) {
+    return local(name).isPresent();
+  }
+
+  /** The unit that the author chose for a local name, if any. */
+  Optional<Unit> localUnit(String name) {
+    int slot = parameter(name);
+    return slot >= 0 ? Optional.of(parameters.get(slot).unit()) : locals.unit(name);
+  }
+
+  private Courses courses() {
+    return new Courses(scope, this, frame);
+  }
+
+  /** One value of a course. */
+  static Typed sample(Span span, CourseInput course) {
+    return new Typed(read(span, course.sample(), course.slot()), course.sample(), null);
+  }
+
+  /** A value in a slot, of the type of another. */
+  static Typed stored(Span span, Typed like, int slot) {
+    return new Typed(read(span, like.type(), slot), like.type(), null);
   }
 
   /** The type of what a name stands for: a thing is known by its name from here on. */
@@ -261,13 +323,18 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     } else if (expr instanceof Expr.Magnitude magnitude) {
       return writtenUnit(magnitude.operand());
     } else if (expr instanceof Expr.Part part) {
-      return writtenUnit(part.of());
+      return courses().unit(part).or(() -> writtenUnit(part.of()));
     } else if (expr instanceof Expr.Name name) {
-      int slot = parameter(name.name());
-      return slot >= 0
-          ? Optional.of(parameters.get(slot).unit())
+      return isLocal(name)
+          ? localUnit(name.name())
           : scope.meaning(name.name()).flatMap(ExpressionChecker::chosenUnit);
     } else if (expr instanceof Expr.Call call) {
+      Optional<CourseFunction> function = courseFunction(call);
+      if (function.isPresent() && !call.arguments().isEmpty()) {
+        return function.get() == CourseFunction.WHEN
+            ? Optional.empty()
+            : writtenUnit(call.arguments().get(0).value());
+      }
       return scope.meaning(call.function().name()).flatMap(ExpressionChecker::chosenUnit);
     }
     return Optional.empty();
@@ -281,26 +348,38 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     if (meaning instanceof Meaning.Quantity quantity) {
       return quantity.chosen() ? Optional.of(quantity.unit()) : Optional.empty();
     }
-    var function = (Meaning.Function) meaning;
-    return function.chosen() ? Optional.of(function.unit()) : Optional.empty();
+    return meaning instanceof Meaning.Function function && function.chosen()
+        ? Optional.of(function.unit())
+        : Optional.empty();
   }
 
-  private static Operation read(Span span, Meaning.Input input) {
-    if (input.type() instanceof Type.Real) {
-      return new Operation.Input(span, input.slot());
+  /** Reads what a name of the sheet stands for. */
+  static Operation read(Span span, Meaning.Input input) {
+    return read(span, input.type(), input.slot());
+  }
+
+  private static Operation read(Span span, Type type, int slot) {
+    if (type instanceof Type.Real) {
+      return new Operation.Input(span, slot);
     }
-    if (input.type() instanceof Type.Vector) {
-      return new Operation.VectorInput(span, input.slot());
-    } else if (input.type() instanceof Type.Thing thing) {
-      return new Operation.ThingInput(span, thing.sort(), input.slot());
+    if (type instanceof Type.Vector) {
+      return new Operation.VectorInput(span, slot);
+    } else if (type instanceof Type.Thing thing) {
+      return new Operation.ThingInput(span, thing.sort(), slot);
+    } else if (type instanceof Type.Course) {
+      return new Operation.ThingInput(span, ThingSort.COURSE, slot);
     }
-    return input.type() instanceof Type.Tensor
-        ? new Operation.ThingInput(span, ThingSort.INERTIA, input.slot())
-        : new Operation.TruthInput(span, input.slot());
+    return type instanceof Type.Tensor
+        ? new Operation.ThingInput(span, ThingSort.INERTIA, slot)
+        : new Operation.TruthInput(span, slot);
   }
 
   @Override
   public Typed part(Expr.Part part) {
+    Optional<Typed> column = courses().part(part);
+    if (column.isPresent()) {
+      return column.get();
+    }
     Typed whole = check(part.of());
     if (form(whole) == Form.THING) {
       return new Space(this).part(part, whole);
@@ -322,7 +401,11 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed rate(Expr.Rate rate) {
-    throw unavailable(rate);
+    Typed of = check(rate.of());
+    if (of.type() instanceof Type.Real || of.type() instanceof Type.Vector) {
+      return Kinds.rate(rate, of);
+    }
+    throw MotionMessages.rateOf(rate, of);
   }
 
   @Override
@@ -523,6 +606,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   @Override
   public Typed choice(Expr.Choice choice) {
     Operation.Truth condition = condition(choice.condition());
+    choices.add(condition);
     Typed then = check(choice.then(), WrittenUnits.Reach.TERM);
     Typed otherwise = check(choice.otherwise(), WrittenUnits.Reach.TERM);
     if (form(then) != form(otherwise)) {
@@ -574,7 +658,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   @Override
   public Typed call(Expr.Call call) {
     String name = call.function().name();
-    if (parameter(name) >= 0) {
+    if (isLocal(call.function())) {
       throw CheckMessages.notAFunction(call);
     }
     Optional<Meaning> meaning = scope.meaning(name);
@@ -588,10 +672,21 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     if (!laws.isEmpty()) {
       return new LawCall(this, call, laws).typed();
     }
+    Optional<CourseFunction> ofCourse = CourseFunction.named(name);
+    if (ofCourse.isPresent()) {
+      return courses().call(call, ofCourse.get());
+    }
     FunctionAtHand atHand =
         FunctionAtHand.named(name)
             .orElseThrow(() -> new IllegalStateException("no meaning for " + name));
     return new CallAtHand(this, call, atHand).typed();
+  }
+
+  /** The function of courses that a call means, if the sheet does not hide it. */
+  private Optional<CourseFunction> courseFunction(Expr.Call call) {
+    return scope.meaning(call.function().name()).isPresent()
+        ? Optional.empty()
+        : CourseFunction.named(call.function().name());
   }
 
   private Typed call(Expr.Call call, Meaning.Function function) {

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.function.Consumer;
 import java.util.stream.Stream;
 import whorl.syntax.Expr;
+import whorl.syntax.MotionLine;
 import whorl.syntax.Statement;
 
 /** Walks over expressions that ask the same of every form. */
@@ -46,8 +47,56 @@ final class Expressions {
     } else if (statement instanceof Statement.Assumption assumption) {
       return List.of(assumption.condition());
     }
-    return List.of();
+    return statement instanceof Statement.Motion motion
+        ? motion.lines().stream().flatMap(line -> line.match(LINES)).toList()
+        : List.of();
   }
+
+  private static final MotionLine.Cases<Stream<Expr>> LINES =
+      new MotionLine.Cases<>() {
+        @Override
+        public Stream<Expr> start(MotionLine.Start start) {
+          return Stream.of(start.value());
+        }
+
+        @Override
+        public Stream<Expr> attitude(MotionLine.Attitude attitude) {
+          MotionLine.Turn turn = attitude.turn();
+          return Stream.concat(
+              Stream.ofNullable(attitude.spin()),
+              turn == null ? Stream.of() : Stream.of(turn.angle(), turn.about()));
+        }
+
+        @Override
+        public Stream<Expr> equation(MotionLine.Equation equation) {
+          return Stream.of(equation.rate(), equation.value());
+        }
+
+        @Override
+        public Stream<Expr> local(MotionLine.Local local) {
+          return Stream.of(local.value());
+        }
+
+        @Override
+        public Stream<Expr> stop(MotionLine.Stop stop) {
+          return Stream.of(stop.condition());
+        }
+
+        @Override
+        public Stream<Expr> limit(MotionLine.Limit limit) {
+          return Stream.of(limit.time());
+        }
+
+        @Override
+        public Stream<Expr> body(MotionLine.Body body) {
+          return Stream.of(body.name(), body.about());
+        }
+
+        @Override
+        public Stream<Expr> load(MotionLine.Load load) {
+          return Stream.of(load.value());
+        }
+      };
 
   /**
    * Whether an expression is made only of bare numbers, so that it takes the declared unit: numbers

@@ -3,6 +3,7 @@ package whorl.check;
 import java.util.LinkedHashSet;
 import java.util.Set;
 import whorl.syntax.Expr;
+import whorl.syntax.MotionLine;
 import whorl.syntax.Statement;
 
 /**
@@ -20,6 +21,30 @@ public final class FreeNames {
     }
     if (statement instanceof Statement.Function function) {
       function.parameters().forEach(parameter -> names.remove(parameter.name().name()));
+    }
+    if (statement instanceof Statement.Motion motion) {
+      names.removeAll(ownNames(motion));
+    }
+    return names;
+  }
+
+  /** The names that mean something in a motion only: its states and its locals. */
+  private static Set<String> ownNames(Statement.Motion motion) {
+    var names = new LinkedHashSet<String>();
+    for (MotionLine line : motion.lines()) {
+      if (line instanceof MotionLine.Start start) {
+        names.add(start.state().name());
+      } else if (line instanceof MotionLine.Local local) {
+        names.add(local.name().name());
+      } else if (line instanceof MotionLine.Equation equation) {
+        Expressions.walk(
+            equation.rate(),
+            part -> {
+              if (part instanceof Expr.Rate rate && rate.of() instanceof Expr.Name name) {
+                names.add(name.name());
+              }
+            });
+      }
     }
     return names;
   }

@@ -72,6 +72,12 @@ final class KindMessages {
     String problem =
         switch (together) {
           case COMPARED -> explanation.problem();
+          case EQUATED ->
+              "The left side of the equation is "
+                  + left.typed().operand().readings().withArticle()
+                  + ", its right side "
+                  + right.typed().operand().readings().withArticle()
+                  + ".";
           case PARTS -> "The parts of a vector must be of one kind; here stand " + both + ".";
           case BRANCHES -> "Both choices must be of one kind; here stand " + both + ".";
         };

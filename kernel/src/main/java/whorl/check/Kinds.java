@@ -68,6 +68,7 @@ final class Kinds {
   /** Why two quantities must be alike. */
   enum Together {
     COMPARED,
+    EQUATED,
     PARTS,
     BRANCHES
   }
@@ -116,6 +117,21 @@ final class Kinds {
           .ifPresent(remarks);
     }
     return typed(operation, accepted(judgement, product, factors)).madeOf(factors);
+  }
+
+  /** The rate of a quantity: its kind is that of the quantity over a time. */
+  static Typed rate(Expr.Rate rate, Typed of) {
+    var factors = new KindFactors();
+    factors.add(rate.of(), of, Rational.ONE);
+    var time = Typed.of(new Operation.Constant(rate.span(), 1), Readings.of(Kind.named("time")));
+    factors.add(new Expr.Text(rate.span(), "time"), time, Rational.of(-1));
+    Operand operand = accepted(KindAlgebra.product(factors.list()), rate, factors.list());
+    return typed(of.operation(), operand).madeOf(factors.list());
+  }
+
+  /** The two sides of an equation of motion. */
+  static void equated(Typed rate, Expr rateText, Typed value, Expr valueText) {
+    meet(Together.EQUATED, rate, rateText, value, valueText);
   }
 
   static Typed power(Expr.Power power, Typed base, Rational exponent, Operation.Real operation) {

@@ -1,6 +1,9 @@
 package whorl.check;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import whorl.units.Unit;
 import whorl.units.kind.Readings;
 
@@ -37,6 +40,19 @@ public sealed interface Meaning {
     public Function {
       parameters = List.copyOf(parameters);
       captures = List.copyOf(captures);
+    }
+  }
+
+  /**
+   * A motion.
+   *
+   * @param columns its courses by name, each with what one value of it is, in the order in which
+   *     they are shown
+   */
+  record Motion(String name, Map<String, Quantity> columns) implements Meaning {
+    /** Copies the columns. */
+    public Motion {
+      columns = Collections.unmodifiableMap(new LinkedHashMap<>(columns));
     }
   }
 

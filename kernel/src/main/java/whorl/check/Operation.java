@@ -1,9 +1,11 @@
 package whorl.check;
 
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
 import whorl.laws.Rule;
 import whorl.laws.ThingSort;
+import whorl.units.Unit;
 
 /**
  * A checked tree: operations on plain numbers in coherent SI units, every conversion factor folded
@@ -85,6 +87,8 @@ public sealed interface Operation {
     R routineCall(RoutineCall call);
 
     R use(RealUse use);
+
+    R reduced(Reduced reduced);
   }
 
   /**
@@ -112,6 +116,8 @@ public sealed interface Operation {
     R call(VectorCall call);
 
     R use(VectorUse use);
+
+    R reduced(VectorReduced reduced);
   }
 
   /**
@@ -356,6 +362,66 @@ public sealed interface Operation {
     @Override
     public <R> R match(RealCases<R> cases) {
       return cases.routineCall(this);
+    }
+  }
+
+  /** What becomes of a course. */
+  enum Reducer {
+    FIRST,
+    LAST,
+    PEAK,
+    LEAST,
+    MEAN,
+    RMS,
+    /** The value at a time. */
+    AT,
+    /** The time at which a value is first reached. */
+    WHEN
+  }
+
+  /**
+   * What a course is worked out from: one value of it at a time, in a frame of its own.
+   *
+   * @param body what is worked out for every instant
+   * @param captures what stays the same during the motion
+   * @param courses what has a value for every instant
+   */
+  record Sampled(Body body, List<Capture> captures, List<CourseInput> courses) {
+    /** Copies the lists. */
+    public Sampled {
+      captures = List.copyOf(captures);
+      courses = List.copyOf(courses);
+    }
+  }
+
+  /**
+   * A value of the frame around a course that its own frame takes over.
+   *
+   * @param slot first slot of it in the frame of the course
+   */
+  record Capture(Operation value, int slot) {}
+
+  /**
+   * What a course comes to as a number.
+   *
+   * @param argument the time for {@link Reducer#AT}, the value for {@link Reducer#WHEN}; else null
+   * @param unit in which a message shows values of the course
+   */
+  record Reduced(Span span, Reducer reducer, Sampled course, @Nullable Real argument, Unit unit)
+      implements Real {
+    @Override
+    public <R> R match(RealCases<R> cases) {
+      return cases.reduced(this);
+    }
+  }
+
+  /** What a course of vectors comes to: the first, the last, or the one at a time. */
+  record VectorReduced(
+      Span span, Reducer reducer, Sampled course, @Nullable Real argument, Unit unit)
+      implements Vector {
+    @Override
+    public <R> R match(VectorCases<R> cases) {
+      return cases.reduced(this);
     }
   }
 

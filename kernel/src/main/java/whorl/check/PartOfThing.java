@@ -67,6 +67,8 @@ public record PartOfThing(ThingSort of, String name, Sort gives, String meaning,
           case BODY -> ofBody();
           case FORCE -> ofForce();
           case INERTIA -> ofTensor();
+          // Which parts a motion has, its own block says.
+          case MOTION, COURSE -> List.of();
         };
     var named = new LinkedHashMap<String, PartOfThing>();
     parts.forEach(part -> named.put(part.name(), part));

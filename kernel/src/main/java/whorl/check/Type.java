@@ -65,9 +65,17 @@ public sealed interface Type {
    */
   record Tensor(@Nullable Reference reference, @Nullable Anchor frame) implements Type {}
 
+  /**
+   * A quantity that has a value for every instant of a motion.
+   *
+   * @param sample type of one value
+   * @param over the motion
+   */
+  record Course(Type sample, String over) implements Type {}
+
   /** What a value of this type takes in a frame. */
   default FrameSize slots() {
-    if (this instanceof Thing || this instanceof Tensor) {
+    if (this instanceof Thing || this instanceof Tensor || this instanceof Course) {
       return new FrameSize(0, 1);
     }
     return new FrameSize(this instanceof Vector ? 3 : 1, 0);

@@ -8,14 +8,15 @@ import whorl.laws.Laws;
 /** Words of the language that are no names of a sheet. */
 public final class Vocabulary {
   /** Functions of the language that this version does not work out. */
-  private static final Set<String> LATER =
-      Set.of("mesh", "at", "when", "peak", "least", "first", "last", "mean", "rms", "sum");
+  private static final Set<String> LATER = Set.of("mesh", "sum");
 
   private Vocabulary() {}
 
   /** Whether a name is a function at hand or a law, which a definition may hide. */
   public static boolean isFunction(String name) {
-    return FunctionAtHand.named(name).isPresent() || !Laws.named(name).isEmpty();
+    return FunctionAtHand.named(name).isPresent()
+        || CourseFunction.named(name).isPresent()
+        || !Laws.named(name).isEmpty();
   }
 
   /** Whether a name is a function of the language that this version does not work out. */
@@ -29,7 +30,9 @@ public final class Vocabulary {
             ConstantAtHand.all().stream().map(ConstantAtHand::symbol),
             Stream.concat(
                 Stream.of(FunctionAtHand.values()).map(FunctionAtHand::word),
-                Laws.names().stream()))
+                Stream.concat(
+                    Stream.of(CourseFunction.values()).map(CourseFunction::word),
+                    Laws.names().stream())))
         .sorted()
         .toList();
   }

@@ -26,7 +26,18 @@ final class Activation {
 
   /** A formula at work: the first of the procedures. */
   static Activation of(Procedure[] procedures, double[] frame, Object[] things, Meter meter) {
-    return entered(procedures[0], new Activation(frame, things, procedures, meter, 0));
+    return of(procedures, 0, frame, things, meter);
+  }
+
+  /** One of several formulas at work. */
+  static Activation of(
+      Procedure[] procedures, int formula, double[] frame, Object[] things, Meter meter) {
+    return entered(procedures[formula], new Activation(frame, things, procedures, meter, 0));
+  }
+
+  /** Counts operations that are about to be worked out once more. */
+  void count(int operations) {
+    meter.count(operations);
   }
 
   /** The body of a function at work with its own frame, called from a level of this body. */

@@ -23,14 +23,21 @@ final class CodeWriter {
   private final List<Body> bodies = new ArrayList<>();
 
   private String inFunction = "";
+  private int formulas;
   private int operations;
   private int level;
   private int deepest;
 
   /** Writes a formula as procedure 0 and behind it the bodies of all functions it leads to. */
   Procedure[] write(Operation formula) {
+    return write(List.of(formula));
+  }
+
+  /** The same for several formulas, which are the first procedures in their order. */
+  Procedure[] write(List<? extends Operation> roots) {
+    formulas = roots.size();
     List<Procedure> procedures = new ArrayList<>();
-    procedures.add(procedure("", formula));
+    roots.forEach(formula -> procedures.add(procedure("", formula)));
     for (int i = 0; i < bodies.size(); i++) {
       procedures.add(procedure(bodies.get(i).name(), bodies.get(i).body()));
     }
@@ -50,7 +57,7 @@ final class CodeWriter {
         body,
         added -> {
           bodies.add(added);
-          return bodies.size();
+          return formulas + bodies.size() - 1;
         });
   }
 

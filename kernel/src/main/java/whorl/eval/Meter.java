@@ -34,7 +34,8 @@ final class Meter {
     }
   }
 
-  private void look() {
+  /** Looks whether the evaluation is to end. */
+  void look() {
     if (done > allowed) {
       throw formula.noValue(Reason.TOO_LONG, (double) done);
     }

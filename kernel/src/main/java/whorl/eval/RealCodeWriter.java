@@ -18,6 +18,7 @@ import whorl.check.Operation.Product;
 import whorl.check.Operation.Real;
 import whorl.check.Operation.RealCases;
 import whorl.check.Operation.RealUse;
+import whorl.check.Operation.Reduced;
 import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Unary;
@@ -166,6 +167,18 @@ final class RealCodeWriter implements RealCases<Code.Real> {
           VectorArithmetic.direction(a, whole, firstSite),
           VectorArithmetic.direction(b, whole, secondSite));
     };
+  }
+
+  @Override
+  public Code.Real reduced(Reduced reduced) {
+    Code.Real argument = reduced.argument() == null ? null : writer.real(reduced.argument());
+    return new ReducedCode(
+            writer.site(reduced.span()),
+            reduced.reducer(),
+            SampledCode.of(reduced.course(), writer),
+            argument,
+            reduced.unit())
+        ::real;
   }
 
   @Override

@@ -16,6 +16,7 @@ import whorl.check.Operation.Power;
 import whorl.check.Operation.Product;
 import whorl.check.Operation.RealCases;
 import whorl.check.Operation.RealUse;
+import whorl.check.Operation.Reduced;
 import whorl.check.Operation.RoutineCall;
 import whorl.check.Operation.Sum;
 import whorl.check.Operation.Term;
@@ -201,6 +202,12 @@ final class RealNodes implements RealCases<Integer> {
   /** Laws are worked out row by row, so that each row is judged by where they hold. */
   @Override
   public Integer use(RealUse use) {
+    throw new RowGraphWriter.RowByRow();
+  }
+
+  /** Courses are followed row by row: a row that does not need one must not. */
+  @Override
+  public Integer reduced(Reduced reduced) {
     throw new RowGraphWriter.RowByRow();
   }
 }

@@ -9,6 +9,7 @@ import whorl.check.Operation.VectorCases;
 import whorl.check.Operation.VectorChoice;
 import whorl.check.Operation.VectorInput;
 import whorl.check.Operation.VectorNegation;
+import whorl.check.Operation.VectorReduced;
 import whorl.check.Operation.VectorSum;
 import whorl.check.Operation.VectorTerm;
 import whorl.check.Operation.VectorUse;
@@ -114,6 +115,18 @@ final class VectorCodeWriter implements VectorCases<Code.Vector> {
     Code.Vector then = writer.vector(choice.then());
     Code.Vector otherwise = writer.vector(choice.otherwise());
     return in -> condition.in(in) ? then.in(in) : otherwise.in(in);
+  }
+
+  @Override
+  public Code.Vector reduced(VectorReduced reduced) {
+    Code.Real argument = reduced.argument() == null ? null : writer.real(reduced.argument());
+    return new ReducedCode(
+            writer.site(reduced.span()),
+            reduced.reducer(),
+            SampledCode.of(reduced.course(), writer),
+            argument,
+            reduced.unit())
+        ::vector;
   }
 
   @Override

@@ -11,6 +11,7 @@ import whorl.check.Operation.VectorCases;
 import whorl.check.Operation.VectorChoice;
 import whorl.check.Operation.VectorInput;
 import whorl.check.Operation.VectorNegation;
+import whorl.check.Operation.VectorReduced;
 import whorl.check.Operation.VectorSum;
 import whorl.check.Operation.VectorTerm;
 import whorl.check.Operation.VectorUse;
@@ -115,6 +116,12 @@ final class VectorNodes implements VectorCases<VectorNode> {
   /** Laws are worked out row by row, so that each row is judged by where they hold. */
   @Override
   public VectorNode use(VectorUse use) {
+    throw new RowGraphWriter.RowByRow();
+  }
+
+  /** Courses are followed row by row: a row that does not need one must not. */
+  @Override
+  public VectorNode reduced(VectorReduced reduced) {
     throw new RowGraphWriter.RowByRow();
   }
 }

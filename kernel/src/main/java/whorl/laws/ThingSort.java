@@ -1,13 +1,18 @@
 package whorl.laws;
 
-/** The sorts of thing in space that a formula can work with besides numbers and vectors. */
+/**
+ * The sorts of thing that a formula can work with besides numbers and vectors: things in space, a
+ * motion that was followed, and a course, which has a value for every instant of one.
+ */
 public enum ThingSort {
   POINT("point", "a point"),
   AXIS("axis", "an axis"),
   FRAME("frame", "a frame"),
   BODY("body", "a body"),
   FORCE("bound force", "a bound force"),
-  INERTIA("inertia tensor", "an inertia tensor");
+  INERTIA("inertia tensor", "an inertia tensor"),
+  MOTION("motion", "a motion"),
+  COURSE("course", "a course");
 
   private final String words;
   private final String withArticle;

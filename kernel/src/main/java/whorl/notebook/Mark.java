@@ -62,6 +62,11 @@ public enum Mark {
           }
 
           @Override
+          public Mark followed(Step.Ran ran) {
+            return RESULT;
+          }
+
+          @Override
           public Mark waiting(Step.Waiting waiting) {
             return NONE;
           }

@@ -5,6 +5,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import whorl.eval.Course;
 import whorl.eval.Value;
 import whorl.sheet.Quantity;
 import whorl.sheet.Setting;
@@ -33,11 +34,31 @@ final class Amounts {
     if (quantity.value() instanceof Value.Vector vector) {
       return vector(quantity, vector);
     }
+    if (quantity.value() instanceof Value.Thing thing && thing.content() instanceof Course course) {
+      return course(quantity, course);
+    }
     if (quantity.value() instanceof Value.Thing thing) {
       return ThingAmounts.of(thing, quantity.setting());
     }
     boolean holds = quantity.value() instanceof Value.Truth truth && truth.holds();
     return new Amount(true, holds ? "holds" : "does not hold", "", "", List.of());
+  }
+
+  /** A course by where it lies: its least and its largest value. */
+  private static Amount course(Quantity quantity, Course course) {
+    if (course.width() > 1) {
+      return new Amount(true, "a course of vectors", "", "", List.of());
+    }
+    double least = course.least().value();
+    double peak = course.peak().value();
+    Unit unit = shownIn(quantity, Math.max(Math.abs(least), Math.abs(peak)));
+    List<Figure> ends = Figures.together(List.of(unit.fromSi(least), unit.fromSi(peak)));
+    return new Amount(
+        ends.stream().allMatch(Figure::exact),
+        ends.get(0).significand() + " to " + ends.get(1).significand(),
+        ends.get(0).power(),
+        UnitSigns.of(unit),
+        List.of("during the motion"));
   }
 
   /**

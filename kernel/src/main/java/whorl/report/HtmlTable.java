@@ -26,6 +26,9 @@ final class HtmlTable implements Piece.Cases<Html> {
       if (row.card() != null) {
         body.add(card(row, row.card(), source));
       }
+      if (row.grid() != null) {
+        body.add(grid(row, row.grid()));
+      }
     }
     return Html.styled(
         "div",
@@ -70,6 +73,39 @@ final class HtmlTable implements Piece.Cases<Html> {
     return row.kind().isEmpty()
         ? Html.styled("td", style, content)
         : Html.styled("td", style, "title", row.kind(), content);
+  }
+
+  private static Html grid(Row row, Grid grid) {
+    var heads = new ArrayList<Html>();
+    for (Grid.Head head : grid.heads()) {
+      Html unit =
+          head.unit().isEmpty()
+              ? Html.text("")
+              : Html.styled("span", Look.QUIET, Html.text(" in " + head.unit()));
+      heads.add(
+          Html.styled("th", Look.GRID_HEAD, "scope", "col", FormulaHtml.of(head.symbol()), unit));
+    }
+    var rows = new ArrayList<Html>();
+    rows.add(Html.styled("tr", Look.HEAD_ROW, Html.all(heads)));
+    for (List<String> numbers : grid.rows()) {
+      rows.add(
+          Html.styled(
+              "tr",
+              Look.PLAIN_ROW,
+              Html.all(
+                  numbers.stream()
+                      .map(number -> Html.styled("td", Look.GRID_NUMBER, math(number)))
+                      .toList())));
+    }
+    return Html.styled(
+        "tr",
+        Look.ROW_BELOW,
+        Html.styled(
+            "td",
+            Look.CARD + ";" + Look.rail(row.tone()),
+            "colspan",
+            Integer.toString(COLUMNS),
+            Html.styled("table", Look.SNUG_TABLE, Html.element("tbody", Html.all(rows)))));
   }
 
   private static Html card(Row row, Diagnostic diagnostic, Source source) {

@@ -45,6 +45,11 @@ final class Look {
   static final String PLAIN_ROW = "background:transparent";
   static final String SNUG = CELL + "padding:1px 18px 1px 0";
 
+  static final String GRID_HEAD =
+      "text-align:right;vertical-align:baseline;line-height:1.4;font-weight:normal;"
+          + "padding:1px 0 1px 22px;white-space:nowrap";
+  static final String GRID_NUMBER = GRID_HEAD + ";" + MATH;
+
   static final String LINE = "display:block";
   static final String NOTE = "margin:4px 0 0 0;font-size:92%";
   static final String HEADING = "margin:6px 0 2px 0;font-size:92%;letter-spacing:0.04em";

@@ -10,8 +10,12 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
+import whorl.eval.Course;
 import whorl.eval.Value;
+import whorl.laws.ThingSort;
+import whorl.mechanics.motion.Ending;
 import whorl.sheet.Comparison;
+import whorl.sheet.Followed;
 import whorl.sheet.Lapse;
 import whorl.sheet.Quantity;
 import whorl.sheet.Setting;
@@ -32,6 +36,7 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
 
   private final JsonObject definitions = new JsonObject();
   private final JsonObject published = new JsonObject();
+  private final JsonObject motions = new JsonObject();
   private final JsonArray checks = new JsonArray();
   private final JsonArray assumptions = new JsonArray();
   private final JsonArray errors = new JsonArray();
@@ -58,6 +63,9 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     object.add("definitions", record.definitions);
     if (!record.published.isEmpty()) {
       object.add("published", record.published);
+    }
+    if (!record.motions.isEmpty()) {
+      object.add("motions", record.motions);
     }
     object.add("checks", record.checks);
     object.add("assumptions", record.assumptions);
@@ -87,7 +95,7 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
 
   /** The unit of the numbers; those of a thing in space are in coherent units. */
   private static String unit(Quantity quantity) {
-    return quantity.value() instanceof Value.Thing thing
+    return quantity.value() instanceof Value.Thing thing && thing.sort() != ThingSort.COURSE
         ? ThingRecord.unit(thing.sort())
         : quantity.unit().symbol();
   }
@@ -125,10 +133,60 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
       parts.add(unit.fromSi(vector.z()));
       return parts;
     }
+    if (value instanceof Value.Thing thing && thing.content() instanceof Course course) {
+      return course(course, unit);
+    }
     if (value instanceof Value.Thing thing) {
       return ThingRecord.of(thing);
     }
     return new JsonPrimitive(unit.fromSi(((Value.Real) value).value()));
+  }
+
+  @Override
+  public NoteRecord followed(Step.Ran ran) {
+    Followed followed = ran.followed();
+    var motion = new JsonObject();
+    motion.addProperty("duration", ((Value.Real) followed.duration().value()).value());
+    motion.addProperty("stopped", followed.ending() == Ending.STOPPED);
+    motion.addProperty("steps", followed.steps());
+    var courses = new JsonObject();
+    for (Followed.Column column : followed.columns()) {
+      var course = new JsonObject();
+      course.addProperty("kind", column.kind());
+      course.addProperty("unit", column.unit().symbol());
+      course.add("value", course(column.course(), column.unit()));
+      course.add("si", course(column.course(), column.unit().coherent()));
+      courses.add(column.name(), course);
+    }
+    motion.add("courses", courses);
+    var kept = new JsonObject();
+    followed.kept().forEach(one -> kept.addProperty(one.name(), one.relative()));
+    motion.add("kept", kept);
+    motions.add(ran.statement().name().name(), motion);
+    return this;
+  }
+
+  /** Where a course starts and ends, and for numbers between what it lies. */
+  private static JsonObject course(Course course, Unit unit) {
+    var object = new JsonObject();
+    object.add("first", value(course.at(0), unit));
+    object.add("last", value(course.at(course.run().duration()), unit));
+    if (course.width() == 1) {
+      object.addProperty("least", unit.fromSi(course.least().value()));
+      object.addProperty("peak", unit.fromSi(course.peak().value()));
+    }
+    return object;
+  }
+
+  private static JsonElement value(double[] si, Unit unit) {
+    if (si.length == 1) {
+      return new JsonPrimitive(unit.fromSi(si[0]));
+    }
+    var parts = new JsonArray();
+    for (double part : si) {
+      parts.add(unit.fromSi(part));
+    }
+    return parts;
   }
 
   @Override

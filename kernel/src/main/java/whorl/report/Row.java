@@ -17,6 +17,7 @@ import whorl.diagnostic.Diagnostic;
  * @param further what stands under the result, or in its place
  * @param why remark and reservations
  * @param card what is wrong, set under the row over its whole width; null where nothing is
+ * @param grid numbers set under the row over its whole width; null where there are none
  */
 record Row(
     Tone tone,
@@ -27,7 +28,22 @@ record Row(
     List<Amount> gives,
     List<Line> further,
     List<Line> why,
-    @Nullable Diagnostic card) {
+    @Nullable Diagnostic card,
+    @Nullable Grid grid) {
+  /** A row with no grid of numbers. */
+  Row(
+      Tone tone,
+      Line quantity,
+      String kind,
+      List<Line> rule,
+      List<Line> with,
+      List<Amount> gives,
+      List<Line> further,
+      List<Line> why,
+      @Nullable Diagnostic card) {
+    this(tone, quantity, kind, rule, with, gives, further, why, card, null);
+  }
+
   /** The heads of the five columns. */
   static final List<String> HEADS = List.of("quantity", "rule", "with", "gives", "why");
 

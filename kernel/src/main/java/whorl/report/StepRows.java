@@ -329,6 +329,24 @@ final class StepRows implements Step.Cases<Row> {
   }
 
   @Override
+  public Row followed(Step.Ran ran) {
+    var row = new MotionRow(ran);
+    var why = new ArrayList<>(why(ran));
+    why.addAll(row.why());
+    return new Row(
+        tone(ran),
+        symbol(ran.statement().name().name(), false),
+        "motion",
+        row.rule(),
+        givens(ran.with().stream()),
+        List.of(Amounts.of(ran.followed().duration())),
+        row.gives(),
+        why,
+        null,
+        row.grid());
+  }
+
+  @Override
   public Row waiting(Step.Waiting waiting) {
     var gives = new ArrayList<Line>();
     gives.add(

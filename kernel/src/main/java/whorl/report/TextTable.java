@@ -47,9 +47,38 @@ final class TextTable implements Piece.Cases<String> {
         text.add(DiagnosticText.render(card, source).indent(4).stripTrailing());
         text.add("");
       }
+      Grid grid = rows.get(i).grid();
+      if (grid != null) {
+        text.add("");
+        text.addAll(grid(grid));
+        text.add("");
+      }
     }
     text.add(rule);
     return TextWrap.plain(String.join("\n", text));
+  }
+
+  private static List<String> grid(Grid grid) {
+    List<List<String>> rows = new ArrayList<>();
+    rows.add(
+        grid.heads().stream()
+            .map(
+                head ->
+                    FormulaText.breakable(head.symbol())
+                        + (head.unit().isEmpty() ? "" : " in " + head.unit()))
+            .toList());
+    rows.addAll(grid.rows());
+    var lines = new ArrayList<String>();
+    for (List<String> row : rows) {
+      var line = new StringBuilder("  ");
+      for (int i = 0; i < row.size(); i++) {
+        int column = i;
+        int width = rows.stream().mapToInt(one -> TextWidth.of(one.get(column))).max().orElse(0);
+        line.append("  ").append(TextWidth.padded(width, row.get(i)));
+      }
+      lines.add(line.toString().stripTrailing());
+    }
+    return lines;
   }
 
   private List<List<String>> cells(Row row, int numberWidth) {

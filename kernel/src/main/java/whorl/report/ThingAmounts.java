@@ -37,6 +37,7 @@ final class ThingAmounts {
       case BODY -> body((Body) content);
       case FORCE -> force((BoundForce) content);
       case INERTIA -> tensor((InertiaTensor) content, setting);
+      case MOTION, COURSE -> new Amount(true, thing.sort().withArticle(), "", "", List.of());
     };
   }
 

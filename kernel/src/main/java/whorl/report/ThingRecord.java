@@ -3,6 +3,7 @@ package whorl.report;
 import com.google.gson.JsonArray;
 import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
+import com.google.gson.JsonPrimitive;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import whorl.eval.Value;
 import whorl.laws.ThingSort;
@@ -27,7 +28,7 @@ final class ThingRecord {
     return switch (sort) {
       case POINT -> "m";
       case INERTIA -> "kg·m²";
-      case AXIS, FRAME, BODY, FORCE -> "";
+      case AXIS, FRAME, BODY, FORCE, MOTION, COURSE -> "";
     };
   }
 
@@ -40,6 +41,7 @@ final class ThingRecord {
       case BODY -> body((Body) content);
       case FORCE -> force((BoundForce) content);
       case INERTIA -> tensor((InertiaTensor) content);
+      case MOTION, COURSE -> new JsonPrimitive(thing.sort().words());
     };
   }
 

@@ -50,6 +50,11 @@ final class Calculator {
     if (was instanceof Result.Waiting) {
       return was;
     }
+    if (was instanceof Result.Ran ran
+        && new Checker(results).check(node.statement()) instanceof Checker.Result.Passed passed
+        && passed.checked() instanceof Checked.Motion motion) {
+      return new Result.Ran(motion, ran.run(), ran.lapses());
+    }
     if (was instanceof Result.Valued valued
         && new Checker(results).check(node.statement()) instanceof Checker.Result.Passed passed
         && passed.checked() instanceof Checked.Value value) {

@@ -1,6 +1,8 @@
 package whorl.sheet;
 
 import java.util.Optional;
+import whorl.eval.Value;
+import whorl.laws.ThingSort;
 
 /** Tells what a recalculation changed. */
 final class Change {
@@ -11,7 +13,8 @@ final class Change {
       Node node, Optional<Result> before, Optional<Result> now) {
     if (node.defines().isPresent()
         && before.orElse(null) instanceof Result.Valued was
-        && now.orElse(null) instanceof Result.Valued is) {
+        && now.orElse(null) instanceof Result.Valued is
+        && !isCourse(is.value())) {
       Quantity old = Quantities.of(node, was);
       Quantity fresh = Quantities.of(node, is);
       return old.equals(fresh)
@@ -19,6 +22,11 @@ final class Change {
           : Optional.of(new CellOutcome.Change(node.defines().get(), old, fresh));
     }
     return Optional.empty();
+  }
+
+  /** A course is no single value that could be told before and after. */
+  private static boolean isCourse(Value value) {
+    return value instanceof Value.Thing thing && thing.sort() == ThingSort.COURSE;
   }
 
   /** A check or assumption that turned. */

@@ -6,13 +6,18 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
 import whorl.check.Checked;
+import whorl.check.CourseInput;
 import whorl.check.Formula;
 import whorl.check.FrameSize;
 import whorl.check.Meaning;
 import whorl.check.Operation;
+import whorl.check.Type;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Interruption;
 import whorl.eval.Breach;
+import whorl.eval.CourseEvaluator;
+import whorl.eval.MotionEvaluator;
+import whorl.eval.MotionOutcome;
 import whorl.eval.NumericFailure;
 import whorl.eval.Outcome;
 import whorl.eval.ScalarEvaluator;
@@ -44,7 +49,9 @@ final class Evaluation {
     }
     fill();
     try {
-      if (checked instanceof Checked.Value value) {
+      if (checked instanceof Checked.Motion motion) {
+        return followed(motion);
+      } else if (checked instanceof Checked.Value value) {
         return valued(value);
       } else if (checked instanceof Checked.Condition condition) {
         Verdict verdict = verdict(condition);
@@ -64,7 +71,7 @@ final class Evaluation {
   private void fill() {
     for (Meaning.Input input : checked.basis().inputs()) {
       int slot = input.slot();
-      Value value = ((Result.Valued) results.of(input.name()).orElseThrow()).value();
+      Value value = results.value(input.name());
       if (value instanceof Value.Real real) {
         frame[slot] = real.value();
       } else if (value instanceof Value.Vector vector) {
@@ -81,17 +88,43 @@ final class Evaluation {
 
   private Result valued(Checked.Value checkedValue) throws NoResult {
     Formula formula = checkedValue.formula();
+    if (formula.type() instanceof Type.Course) {
+      List<CourseInput> courses = checked.basis().courses();
+      Value course = value(CourseEvaluator.evaluate(formula.operation(), courses, frame, things));
+      return new Result.Valued(checkedValue, course, course, lapses());
+    }
     Value value = value(formula.operation());
     Value seen = formula.seen() == formula.operation() ? value : value(formula.seen());
     return new Result.Valued(checkedValue, value, seen, lapses());
   }
 
+  private Result followed(Checked.Motion motion) throws NoResult {
+    MotionOutcome outcome = MotionEvaluator.evaluate(motion.plan(), frame, things);
+    if (outcome instanceof MotionOutcome.Ran ran) {
+      note(ran.breaches());
+      return new Result.Ran(motion, ran.run(), lapses());
+    }
+    var failed = (MotionOutcome.Failed) outcome;
+    NumericFailure failure = failed.failure();
+    if (failure != null && failure.reason() == NumericFailure.Reason.INTERRUPTED) {
+      throw new Interruption();
+    }
+    throw new NoResult(RunMessages.of(failed, motion, node, results));
+  }
+
+  private void note(List<Breach> breaches) {
+    for (Breach breach : breaches) {
+      lapses.add(new Lapse(breach.law(), breach.condition(), breach.inFunction()));
+    }
+  }
+
   private Value value(Operation operation) throws NoResult {
-    Outcome outcome = ScalarEvaluator.of(operation, things).evaluate(frame);
+    return value(ScalarEvaluator.of(operation, things).evaluate(frame));
+  }
+
+  private Value value(Outcome outcome) throws NoResult {
     if (outcome instanceof Outcome.Done done) {
-      for (Breach breach : done.breaches()) {
-        lapses.add(new Lapse(breach.law(), breach.condition(), breach.inFunction()));
-      }
+      note(done.breaches());
       return done.value();
     }
     NumericFailure failure = ((Outcome.Failed) outcome).failure();

@@ -70,7 +70,9 @@ final class Node {
     } else if (statement instanceof Statement.Published published) {
       return Optional.of(published.name().name());
     }
-    return Optional.empty();
+    return statement instanceof Statement.Motion motion
+        ? Optional.of(motion.name().name())
+        : Optional.empty();
   }
 
   /**

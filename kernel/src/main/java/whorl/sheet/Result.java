@@ -4,6 +4,7 @@ import java.util.List;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Checked;
 import whorl.diagnostic.Diagnostic;
+import whorl.eval.Run;
 import whorl.eval.Value;
 
 /** What a statement came to. */
@@ -45,6 +46,14 @@ sealed interface Result {
 
   /** A function, ready to be called. */
   record Callable(Checked.Function checked) implements Sound {}
+
+  /** A motion that was followed. */
+  record Ran(Checked.Motion checked, Run run, List<Lapse> lapses) implements Sound {
+    /** Copies the list. */
+    public Ran {
+      lapses = List.copyOf(lapses);
+    }
+  }
 
   /** A condition that was judged. */
   record Judged(Checked.Condition checked, Verdict verdict, List<Lapse> lapses) implements Sound {

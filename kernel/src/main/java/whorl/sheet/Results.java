@@ -10,6 +10,8 @@ import java.util.Set;
 import whorl.check.Checked;
 import whorl.check.Meaning;
 import whorl.check.Scope;
+import whorl.eval.Value;
+import whorl.laws.ThingSort;
 
 /** What the statements of a sheet came to, with the names that stand because of it. */
 final class Results implements Scope {
@@ -75,7 +77,19 @@ final class Results implements Scope {
     return graph
         .definition(name)
         .flatMap(this::of)
-        .filter(result -> result instanceof Result.Valued || result instanceof Result.Callable);
+        .filter(
+            result ->
+                result instanceof Result.Valued
+                    || result instanceof Result.Callable
+                    || result instanceof Result.Ran);
+  }
+
+  /** The value that a formula reads under a name which has one. */
+  Value value(String name) {
+    Result result = of(name).orElseThrow();
+    return result instanceof Result.Ran ran
+        ? new Value.Thing(ThingSort.MOTION, ran.run())
+        : ((Result.Valued) result).value();
   }
 
   /** The statement that defines a name. */
@@ -107,6 +121,9 @@ final class Results implements Scope {
   private static Meaning meaning(Result result) {
     if (result instanceof Result.Callable callable) {
       return callable.checked().meaning();
+    }
+    if (result instanceof Result.Ran ran) {
+      return ran.checked().meaning();
     }
     Checked.Value checked = ((Result.Valued) result).checked();
     return new Meaning.Quantity(

@@ -225,8 +225,11 @@ final class SheetMessages {
     if (statement instanceof Statement.Definition definition) {
       return definition.name().span();
     }
-    return statement instanceof Statement.Published published
-        ? published.name().span()
+    if (statement instanceof Statement.Published published) {
+      return published.name().span();
+    }
+    return statement instanceof Statement.Motion motion
+        ? motion.name().span()
         : ((Statement.Function) statement).name().span();
   }
 }

@@ -48,6 +48,8 @@ public sealed interface Step {
 
     R assumed(Assumed assumed);
 
+    R followed(Ran ran);
+
     R waiting(Waiting waiting);
 
     R broken(Broken broken);
@@ -197,6 +199,25 @@ public sealed interface Step {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.assumed(this);
+    }
+  }
+
+  /** A motion that was followed. */
+  record Ran(
+      Place place,
+      Statement.Motion statement,
+      List<Given> with,
+      Followed followed,
+      Standing standing)
+      implements Step {
+    /** Copies the list. */
+    public Ran {
+      with = List.copyOf(with);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.followed(this);
     }
   }
 

@@ -2,11 +2,21 @@ package whorl.sheet;
 
 import java.util.HashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
+import java.util.stream.Stream;
 import whorl.check.Checked;
 import whorl.check.InputForm;
+import whorl.check.Meaning;
+import whorl.check.MotionPlan;
+import whorl.eval.Value;
+import whorl.mechanics.motion.MotionRun;
 import whorl.syntax.Expr;
+import whorl.syntax.MotionLine;
 import whorl.syntax.Statement;
+import whorl.units.Unit;
+import whorl.units.UnitCatalogue;
+import whorl.units.kind.Kind;
 
 /** Makes the step of a statement from what it came to. */
 final class StepMaker {
@@ -73,6 +83,11 @@ final class StepMaker {
           : new Step.Assumed(
               place, (Statement.Assumption) statement, given, judged.verdict(), standing);
     }
+    if (result instanceof Result.Ran ran) {
+      var motion = (Statement.Motion) statement;
+      return new Step.Ran(
+          place, motion, given(statement, ran.checked()), followed(motion, ran), standing);
+    }
     var valued = (Result.Valued) result;
     Quantity gives = Quantities.of(node, valued);
     List<Given> given = given(statement, valued.checked());
@@ -83,6 +98,47 @@ final class StepMaker {
     var show = (Statement.Show) statement;
     boolean name = show.value() instanceof Expr.Name;
     return new Step.Shown(place, show, name ? List.of() : given, gives, standing);
+  }
+
+  private Followed followed(Statement.Motion statement, Result.Ran ran) {
+    MotionPlan plan = ran.checked().plan();
+    MotionRun run = ran.run().motion();
+    Unit second = UnitCatalogue.standard().usual(Kind.named("time"));
+    return new Followed(
+        new Quantity(new Value.Real(run.duration()), second, false, "time", null),
+        run.ending(),
+        run.steps(),
+        plan.columns().stream().map(column -> column(column, ran)).toList(),
+        plan.columns().stream()
+            .map(MotionPlan.Column::name)
+            .filter(name -> results.definingNode(name).isPresent())
+            .toList(),
+        statement.lines().stream().flatMap(line -> balance(line, plan)).toList(),
+        run.kept());
+  }
+
+  private static Followed.Column column(MotionPlan.Column column, Result.Ran ran) {
+    Meaning.Quantity quantity = column.quantity();
+    return new Followed.Column(
+        column.name(),
+        Objects.requireNonNull(ran.run().columns().get(column.name())),
+        quantity.unit(),
+        quantity.chosen(),
+        column.kind());
+  }
+
+  private static Stream<Followed.Balance> balance(MotionLine line, MotionPlan plan) {
+    if (!(line instanceof MotionLine.Equation equation)) {
+      return Stream.empty();
+    }
+    return plan.states().stream()
+        .filter(
+            state ->
+                state.balance() != MotionPlan.Balance.NONE
+                    && state.rate().span().equals(equation.value().span()))
+        .map(
+            state ->
+                new Followed.Balance(equation, state.balance() == MotionPlan.Balance.SAME_MATTER));
   }
 
   private List<Given> given(Statement statement, Checked checked) {

@@ -120,6 +120,27 @@ class InterruptTest {
   }
 
   @Test
+  void aMotionIsInterruptedBetweenItsSteps() {
+    publish(
+        x -> {
+          if (x[0] > 5) {
+            Thread.currentThread().interrupt();
+          }
+          return 1;
+        });
+    CellOutcome outcome =
+        run(
+            "1",
+            """
+            motion drift
+                x starts 0
+                x' = f(x) * 1 s^-1
+                within 10 s
+            """);
+    assertInterrupted("Interrupted while drift was worked out.", outcome);
+  }
+
+  @Test
   void theInterruptOfACheckShowsItsText() {
     publish(x -> x[0]);
     good(run("1", "n = 1\ncheck f(n) < 10"));

@@ -34,8 +34,8 @@ public record ChangingInertia(double before, double after, double speed) {
   }
 
   /**
-   * The kinetic energy gained where no matter leaves, {@code ½ L² (1/I₂ − 1/I₁)}, in J: the work done
-   * to draw it in; negative where energy is lost or taken out.
+   * The kinetic energy gained where no matter leaves, {@code ½ L² (1/I₂ − 1/I₁)}, in J: the work
+   * done to draw it in; negative where energy is lost or taken out.
    */
   public double workOnSameMatter() {
     double momentum = before * speed;

@@ -3,8 +3,8 @@ package whorl.mechanics.gyro;
 import whorl.mechanics.Given;
 
 /**
- * A spinning wheel in two gimbals at right angles, which a steady moment about the one begins to act
- * on at rest. The other one then turns steadily, with a small nod of both.
+ * A spinning wheel in two gimbals at right angles, which a steady moment about the one begins to
+ * act on at rest. The other one then turns steadily, with a small nod of both.
  *
  * <p>Small angles: {@code I₁ α" + h β' = M} and {@code I₂ β" − h α' = 0}, with α about the axis of
  * the moment and β about the other. Valid while the axis of the wheel stays within some 10 deg of a
@@ -38,8 +38,8 @@ public record GimballedWheel(double momentum, double aboutMoment, double aboutOt
   }
 
   /**
-   * How far the axis of the moment gives way, {@code α = (M I₂/h²)(1 − cos Λt)}, in rad: it nods, and
-   * does not run away.
+   * How far the axis of the moment gives way, {@code α = (M I₂/h²)(1 − cos Λt)}, in rad: it nods,
+   * and does not run away.
    */
   public double yielding(double moment, double time) {
     double sine = Math.sin(nutationRate() * time / 2);

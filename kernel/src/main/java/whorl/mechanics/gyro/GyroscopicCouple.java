@@ -14,8 +14,8 @@ import whorl.mechanics.reference.Point;
  * Ω} on the bearings: the <em>gyroscopic couple</em> that a frame, a hull or an airframe feels.
  *
  * <p>Valid for a steady Ω and an L that turns with it unchanged, as that of a balanced symmetric
- * body about its axis does. The part of L that the turning itself gives across the axis is left out;
- * it is small where the spin is fast against Ω.
+ * body about its axis does. The part of L that the turning itself gives across the axis is left
+ * out; it is small where the spin is fast against Ω.
  *
  * <p>Source: the rate of a vector that turns, any textbook of dynamics (common practice).
  *
@@ -41,9 +41,9 @@ public record GyroscopicCouple(Vector3D angularMomentum, Vector3D turning) {
 
   /**
    * The forces that the couple makes the body exert on two bearings: equal and opposite, across the
-   * line from one to the other, {@code F_B = d × (Ω × L)/d²} with {@code d = B − A} on bearing B and
-   * its reverse on A. Those of the bearings on the body are the reverse. Weight and other loads come
-   * on top.
+   * line from one to the other, {@code F_B = d × (Ω × L)/d²} with {@code d = B − A} on bearing B
+   * and its reverse on A. Those of the bearings on the body are the reverse. Weight and other loads
+   * come on top.
    *
    * @param a bearing A
    * @param b bearing B
@@ -79,8 +79,9 @@ public record GyroscopicCouple(Vector3D angularMomentum, Vector3D turning) {
   public record Bearings(BoundForce onA, BoundForce onB) {}
 
   /**
-   * The least turning of the axis that a moment on the body gives, {@code Ω = L × M/L²}: across both,
-   * at the rate M/L where they are at right angles. What M has along L changes the spin instead.
+   * The least turning of the axis that a moment on the body gives, {@code Ω = L × M/L²}: across
+   * both, at the rate M/L where they are at right angles. What M has along L changes the spin
+   * instead.
    *
    * <p>Valid for fast spin; what turning itself adds to L is left out.
    *
@@ -94,9 +95,9 @@ public record GyroscopicCouple(Vector3D angularMomentum, Vector3D turning) {
   }
 
   /**
-   * The rate at which a moment turns the angular momentum about a given axis, {@code Ω = M · n / |u ×
-   * L|} with u along the axis and n along {@code u × L}, in rad/s: a top's weight about the vertical,
-   * the Sun's pull about the pole of the ecliptic.
+   * The rate at which a moment turns the angular momentum about a given axis, {@code Ω = M · n / |u
+   * × L|} with u along the axis and n along {@code u × L}, in rad/s: a top's weight about the
+   * vertical, the Sun's pull about the pole of the ecliptic.
    *
    * @param angularMomentum L, in N·m·s
    * @param moment M on the body, in N·m

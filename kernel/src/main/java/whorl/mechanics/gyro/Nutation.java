@@ -2,7 +2,6 @@ package whorl.mechanics.gyro;
 
 import java.util.Arrays;
 
-
 /**
  * How the axis of a top nods between two angles while it goes round.
  *
@@ -46,8 +45,7 @@ public record Nutation(double highest, double lowest, double period, double prec
     for (int i = 0; i < POINTS; i++) {
       double sine = Math.sin(Math.PI / 2 * (i + 0.5) / POINTS);
       double u = low + (high - low) * sine * sine;
-      round +=
-          (vertical - axial * u) / (inertia * (1 - u * u)) * 2 * time / Math.sqrt(beyond - u);
+      round += (vertical - axial * u) / (inertia * (1 - u * u)) * 2 * time / Math.sqrt(beyond - u);
     }
     return new Nutation(
         Math.acos(Math.min(1, high)),
@@ -57,8 +55,8 @@ public record Nutation(double highest, double lowest, double period, double prec
   }
 
   /**
-   * The heights where the axis turns, and the third root. They are the roots of {@code (1 − u²)(2 T +
-   * 2 m g l (h − u)) A − (p − L u)² = 0}, all of them real.
+   * The heights where the axis turns, and the third root. They are the roots of {@code (1 − u²)(2 T
+   * + 2 m g l (h − u)) A − (p − L u)² = 0}, all of them real.
    */
   private static double[] heights(
       SymmetricTop top, double axial, double vertical, double kinetic, double height) {

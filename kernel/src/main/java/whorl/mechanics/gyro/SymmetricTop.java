@@ -14,13 +14,13 @@ import whorl.mechanics.Refusal;
  *
  * <p>Valid for a rigid body, a pivot without friction, and a uniform field of weight.
  *
- * <p>Source: the first integrals of Lagrange's top, as in H. Goldstein, Classical Mechanics, section
- * 5.7 (from memory; held by tests against a full motion).
+ * <p>Source: the first integrals of Lagrange's top, as in H. Goldstein, Classical Mechanics,
+ * section 5.7 (from memory; held by tests against a full motion).
  *
  * @param axial C, moment of inertia about the axis, in kg·m²; positive
  * @param atPivot A, moment of inertia about an axis across it through the pivot, in kg·m²; positive
- * @param weightMoment m g l, weight times the distance from the pivot to the centre of mass, in N·m;
- *     positive
+ * @param weightMoment m g l, weight times the distance from the pivot to the centre of mass, in
+ *     N·m; positive
  */
 public record SymmetricTop(double axial, double atPivot, double weightMoment) {
   /** Refuses what is not positive. */
@@ -49,7 +49,7 @@ public record SymmetricTop(double axial, double atPivot, double weightMoment) {
   public SteadyPrecession steadyPrecession(double spin, double lean) {
     double momentum = axial * Given.finite("spin", spin, "rad/s");
     double square = momentum * momentum - 4 * atPivot * weightMoment * cosine(lean);
-    if (square < 0 || momentum == 0 && Math.cos(lean) >= 0) {
+    if (square < 0 || (momentum == 0 && Math.cos(lean) >= 0)) {
       throw new Refusal(
           "spin",
           "At "
@@ -70,7 +70,9 @@ public record SymmetricTop(double axial, double atPivot, double weightMoment) {
     double slow = 2 * weightMoment / sum;
     double level = 1e-15 * atPivot;
     double fast =
-        Math.abs(a) <= level ? Math.copySign(Double.POSITIVE_INFINITY, b * Math.signum(a)) : sum / (2 * a);
+        Math.abs(a) <= level
+            ? Math.copySign(Double.POSITIVE_INFINITY, b * Math.signum(a))
+            : sum / (2 * a);
     return new SteadyPrecession(slow, fast);
   }
 
@@ -86,7 +88,7 @@ public record SymmetricTop(double axial, double atPivot, double weightMoment) {
     double momentum = axial * Given.finite("spin", relativeSpin, "rad/s");
     double a = (atPivot - axial) * cosine(lean);
     double square = momentum * momentum - 4 * a * weightMoment;
-    if (square < 0 || momentum == 0 && a >= 0) {
+    if (square < 0 || (momentum == 0 && a >= 0)) {
       throw new Refusal(
           "spin",
           "At "
@@ -99,7 +101,9 @@ public record SymmetricTop(double axial, double atPivot, double weightMoment) {
     return roots(a, momentum, square);
   }
 
-  /** The spin ω₃ with a spin ψ' relative to the precessing frame, {@code ψ' + Ω cos θ}, in rad/s. */
+  /**
+   * The spin ω₃ with a spin ψ' relative to the precessing frame, {@code ψ' + Ω cos θ}, in rad/s.
+   */
   public static double spinOfRelative(double relativeSpin, double precession, double lean) {
     return relativeSpin + precession * Math.cos(lean);
   }
@@ -136,8 +140,8 @@ public record SymmetricTop(double axial, double atPivot, double weightMoment) {
   }
 
   /**
-   * The least spin with which a top precesses steadily: {@code ω₃ = 2 √(A m g l cos θ)/C}, in rad/s;
-   * 0 with the axis level or below.
+   * The least spin with which a top precesses steadily: {@code ω₃ = 2 √(A m g l cos θ)/C}, in
+   * rad/s; 0 with the axis level or below.
    */
   public double leastSpin(double lean) {
     return 2 * Math.sqrt(atPivot * weightMoment * Math.max(0, cosine(lean))) / axial;

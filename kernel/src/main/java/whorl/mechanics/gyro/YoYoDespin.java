@@ -6,9 +6,9 @@ import whorl.mechanics.Given;
  * A turning body that is slowed by weights on cords, which unwind from its rim and are let go along
  * the tangent.
  *
- * <p>Angular momentum and energy of body and weights are kept while they unwind: with {@code c = I/m
- * + a²}, a cord unwound to the length l leaves {@code ω = ω₀ (c − l²)/(c + l²)}. Valid for cords
- * without mass, wound on evenly on opposite sides.
+ * <p>Angular momentum and energy of body and weights are kept while they unwind: with {@code c =
+ * I/m + a²}, a cord unwound to the length l leaves {@code ω = ω₀ (c − l²)/(c + l²)}. Valid for
+ * cords without mass, wound on evenly on opposite sides.
  *
  * <p>Source: momentum and energy integrals; J. V. Fedor, NASA TN D-708, 1961 (from memory).
  *

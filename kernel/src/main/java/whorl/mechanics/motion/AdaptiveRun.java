@@ -28,6 +28,11 @@ final class AdaptiveRun {
   /** A second jump this many shortest steps behind another is none. */
   private static final int CROSSING = 1000;
 
+  /** A jump is quick that comes within this part of the longest step behind another. */
+  private static final double QUICK = 1e-6;
+
+  private static final int MOST_QUICK_JUMPS = 50;
+
   private final Motion motion;
   private final Stepper stepper;
   private final double longest;
@@ -37,6 +42,7 @@ final class AdaptiveRun {
   private double[] state;
   private double first;
   private double retreat = Double.POSITIVE_INFINITY;
+  private int quickJumps;
   private boolean atJump;
   private double crossed = Double.NEGATIVE_INFINITY;
 
@@ -245,6 +251,7 @@ final class AdaptiveRun {
       OptionalDouble jump = jumpOn(until);
       if (jump.isPresent() && jump.getAsDouble() < until.end()) {
         take(until.until(jump.getAsDouble()));
+        countJump(piece.start());
         first = Math.max(first * FIRST_STEP, (piece.end() - piece.start()) * FIRST_STEP);
         throw new EndOfStretch(false);
       }
@@ -257,6 +264,14 @@ final class AdaptiveRun {
       if (retreat < longest && stepsOfStretch >= SHORT_STEPS && !isLast) {
         retreat = Double.POSITIVE_INFINITY;
         throw new EndOfStretch(false);
+      }
+    }
+
+    /** Many jumps one right behind another are a motion that is held between them. */
+    private void countJump(double before) {
+      quickJumps = time - before < QUICK * longest ? quickJumps + 1 : 0;
+      if (quickJumps > MOST_QUICK_JUMPS) {
+        throw new MotionFailure(MotionFailure.Reason.TO_AND_FRO, time, state, -1, null);
       }
     }
 

@@ -84,7 +84,8 @@ public final class Motion {
     }
     int[] groups = new int[start.length];
     Arrays.fill(groups, 1);
-    return new Motion(rates, start, groups, limit, null, List.of(), List.of(), USUAL_STEPS, () -> {});
+    return new Motion(
+        rates, start, groups, limit, null, List.of(), List.of(), USUAL_STEPS, () -> {});
   }
 
   /**

@@ -12,6 +12,8 @@ public final class MotionFailure extends RuntimeException {
     NO_RATE,
     /** A rate grows without bound, so that no step is short enough. */
     RUNAWAY,
+    /** The rates jump to and fro: either side of a jump drives the motion back to the other. */
+    TO_AND_FRO,
     /** The run took more steps than are allowed. */
     TOO_MANY_STEPS
   }

@@ -76,6 +76,22 @@ public final class MotionRun {
     return low;
   }
 
+  /** Looks at the states of a run. */
+  @FunctionalInterface
+  public interface Visitor {
+    /** Looks at the states at a time, which must be left as they are. */
+    void visit(double time, double[] state);
+  }
+
+  /** Shows the states at all points from which those between are worked out, in order of time. */
+  public void visit(Visitor visitor) {
+    for (Piece piece : pieces) {
+      for (int i = 0; i < Piece.POINTS; i++) {
+        visitor.visit(piece.time(i), piece.state(i));
+      }
+    }
+  }
+
   /** A function of the states at a time from 0 to the duration, in s. */
   public double value(StateFunction function, double time) {
     return function.at(time, state(time));
@@ -212,7 +228,7 @@ public final class MotionRun {
       }
       UnivariateFunction inTime = time -> value(function, time);
       UnivariatePointValuePair top =
-          new BrentOptimizer(1e-10, 1e-300)
+          new BrentOptimizer(1e-12, 1e-9 * (to - from))
               .optimize(
                   new MaxEval(200),
                   new UnivariateObjectiveFunction(inTime),

@@ -37,8 +37,7 @@ record Principal(double first, double second, double third, Quaternion inBody) {
     int first = (last + 1) % 3;
     int second = (last + 2) % 3;
     var turned = new Rotation(Vector3D.PLUS_I, Vector3D.PLUS_K, axes[first], axes[last]);
-    return new Principal(
-        moments[first], moments[second], moments[last], Quaternion.of(turned));
+    return new Principal(moments[first], moments[second], moments[last], Quaternion.of(turned));
   }
 
   /** How far the two moments apart from one are from each other. */
@@ -57,8 +56,7 @@ record Principal(double first, double second, double third, Quaternion inBody) {
 
   /** The angular velocity with an angular momentum, both along the principal axes. */
   Vector3D rate(Vector3D momentum) {
-    return new Vector3D(
-        momentum.getX() / first, momentum.getY() / second, momentum.getZ() / third);
+    return new Vector3D(momentum.getX() / first, momentum.getY() / second, momentum.getZ() / third);
   }
 
   /** The angular momentum with an angular velocity, both along the principal axes. */

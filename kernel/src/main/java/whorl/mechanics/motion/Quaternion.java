@@ -56,22 +56,14 @@ final class Quaternion {
   void turnAboutThird(double angle) {
     double sine = Math.sin(angle / 2);
     double cosine = Math.cos(angle / 2);
-    set(
-        w * cosine - z * sine,
-        x * cosine + y * sine,
-        y * cosine - x * sine,
-        z * cosine + w * sine);
+    set(w * cosine - z * sine, x * cosine + y * sine, y * cosine - x * sine, z * cosine + w * sine);
   }
 
   /** Turns on about the body's own second axis, by an angle in rad. */
   void turnAboutSecond(double angle) {
     double sine = Math.sin(angle / 2);
     double cosine = Math.cos(angle / 2);
-    set(
-        w * cosine - y * sine,
-        x * cosine - z * sine,
-        y * cosine + w * sine,
-        z * cosine + x * sine);
+    set(w * cosine - y * sine, x * cosine - z * sine, y * cosine + w * sine, z * cosine + x * sine);
   }
 
   /** Takes it from four places of a state. */

@@ -14,12 +14,12 @@ import whorl.mechanics.reference.InertiaTensor;
  * A rigid body with a state to start from, ready to be followed. Immutable.
  *
  * <p>The equations are {@code L' = M} and {@code q' = ω q/2} with the angular momentum L and the
- * moment M about the pivot or the centre of mass, along the axes of the world, and a unit quaternion
- * q for the attitude; a free body's centre of mass has {@code m v' = F}.
+ * moment M about the pivot or the centre of mass, along the axes of the world, and a unit
+ * quaternion q for the attitude; a free body's centre of mass has {@code m v' = F}.
  *
  * <p>Where nothing but weights and forces fixed in space act, the body is followed by {@link
- * SplitRun a scheme that keeps the structure} of the motion, so that energy and angular momentum
- * do not drift; otherwise as any {@link Motion}.
+ * SplitRun a scheme that keeps the structure} of the motion, so that energy and angular momentum do
+ * not drift; otherwise as any {@link Motion}.
  */
 public final class RigidMotion {
   static final int MOMENTUM = 0;
@@ -59,8 +59,7 @@ public final class RigidMotion {
         support instanceof Support.Pivot pivot
             ? body.frame().fromWorld(body.centre().minus(pivot.pivot()))
             : Vector3D.ZERO;
-    InertiaTensor tensor =
-        body.ownInertia().plus(InertiaTensor.ofPoint(body.mass(), fromPivot));
+    InertiaTensor tensor = body.ownInertia().plus(InertiaTensor.ofPoint(body.mass(), fromPivot));
     this.principal = Principal.of(tensor);
     demandSolid(principal);
     this.arm = principal.inBody().fromWorld(fromPivot);
@@ -88,14 +87,14 @@ public final class RigidMotion {
    */
   public static RigidMotion of(
       Body body, Support support, Vector3D rate, List<Load> loads, double limit) {
-    return new RigidMotion(
-        body, support, rate, Vector3D.ZERO, loads, limit, null, () -> {});
+    return new RigidMotion(body, support, rate, Vector3D.ZERO, loads, limit, null, () -> {});
   }
 
   /** The same free body, whose centre of mass starts with a velocity, in m/s. */
   public RigidMotion moving(Vector3D start) {
     if (!(support instanceof Support.Free)) {
-      throw new IllegalArgumentException("the centre of mass of a held body starts at its own rate");
+      throw new IllegalArgumentException(
+          "the centre of mass of a held body starts at its own rate");
     }
     return new RigidMotion(body, support, rate, start, loads, limit, stop, poll);
   }
@@ -129,8 +128,7 @@ public final class RigidMotion {
 
   /** Whether all loads have a potential. */
   public boolean isConservative() {
-    return loads.stream()
-        .allMatch(load -> load instanceof Load.Weight || isFixedInSpace(load));
+    return loads.stream().allMatch(load -> load instanceof Load.Weight || isFixedInSpace(load));
   }
 
   private static boolean isFixedInSpace(Load load) {
@@ -364,9 +362,10 @@ public final class RigidMotion {
               isVertical
                   ? "angular momentum about the vertical"
                   : "angular momentum about the direction of the force",
-              (time, state) -> Math.signum(along.getZ()) < 0
-                  ? -momentum(state).dotProduct(along)
-                  : momentum(state).dotProduct(along),
+              (time, state) ->
+                  Math.signum(along.getZ()) < 0
+                      ? -momentum(state).dotProduct(along)
+                      : momentum(state).dotProduct(along),
               size));
     }
     if (onlySpaceForces && keepsSpin()) {

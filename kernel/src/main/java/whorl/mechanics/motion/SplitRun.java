@@ -22,15 +22,15 @@ import java.util.OptionalDouble;
 final class SplitRun {
   /** Lengths of the steps of order 2, the first half and the middle one. */
   private static final double[] LENGTHS = {
-    0.13020248308889008087881763,
-    0.56116298177510838456196441,
-    -0.38947496264484728640807860,
-    0.15884190655515560089621075,
-    -0.39590389413323757733623154,
-    0.18453964097831570709183254,
-    0.25837438768632204729397911,
-    0.29501172360931029887096624,
-    -0.60550853383003451169892108
+    0.13020248308889007,
+    0.5611629817751084,
+    -0.38947496264484727,
+    0.1588419065551556,
+    -0.39590389413323757,
+    0.1845396409783157,
+    0.25837438768632204,
+    0.2950117236093103,
+    -0.6055085338300346
   };
 
   /** The angle in rad by which the body turns in a piece. */
@@ -83,8 +83,7 @@ final class SplitRun {
       double start = motion.limit() * (i / count);
       double end = motion.limit() * ((i + 1) / count);
       Piece piece = Piece.of(start, end, new Advance(start)::to);
-      OptionalDouble turn =
-          stop == null ? OptionalDouble.empty() : Turn.on(piece, stop, false);
+      OptionalDouble turn = stop == null ? OptionalDouble.empty() : Turn.on(piece, stop, false);
       if (turn.isPresent()) {
         pieces.add(piece.until(turn.getAsDouble()));
         return new MotionRun(Ending.STOPPED, pieces, motion.conserved());

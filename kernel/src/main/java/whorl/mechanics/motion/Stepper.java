@@ -67,8 +67,7 @@ final class Stepper extends DormandPrince853Integrator {
         size = Math.max(size, Math.max(largest[i], here));
       }
       // The least number keeps a state that is 0 throughout from being judged by 0.
-      Arrays.fill(
-          vecAbsoluteTolerance, first, end, Math.max(TOLERANCE * size, Double.MIN_NORMAL));
+      Arrays.fill(vecAbsoluteTolerance, first, end, Math.max(TOLERANCE * size, Double.MIN_NORMAL));
       first = end;
     }
     double error = super.estimateError(rates, before, after, step);

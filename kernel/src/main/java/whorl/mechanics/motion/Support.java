@@ -3,8 +3,10 @@ package whorl.mechanics.motion;
 import whorl.mechanics.Refusal;
 import whorl.mechanics.reference.Point;
 
-/** How a rigid body is held. Angular momentum and moments are taken about
- * the pivot, or about the centre of mass. */
+/**
+ * How a rigid body is held. Angular momentum and moments are taken about the pivot, or about the
+ * centre of mass.
+ */
 public sealed interface Support {
   /**
    * On a point that stays where it is; the body turns about it freely.

@@ -65,7 +65,7 @@ final class Turn {
 
   private double nearest(double from, double to) {
     UnivariateFunction away = time -> away(time, piece.state(time));
-    return new BrentOptimizer(1e-8, 1e-300)
+    return new BrentOptimizer(1e-12, 1e-9 * (to - from))
         .optimize(
             new MaxEval(200),
             new UnivariateObjectiveFunction(away),

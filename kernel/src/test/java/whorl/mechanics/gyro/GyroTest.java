@@ -4,8 +4,8 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import java.util.SplittableRandom;
 import java.util.List;
+import java.util.SplittableRandom;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -46,8 +46,7 @@ class GyroTest {
     Vector3D turning = new Vector3D(0, 0, known.given("n_precession"));
     var couple = new GyroscopicCouple(spin, turning);
     var span = new Vector3D(0, known.given("span"), 0);
-    GyroscopicCouple.Bearings bearings =
-        couple.bearings(Point.ORIGIN, Point.fixed(span));
+    GyroscopicCouple.Bearings bearings = couple.bearings(Point.ORIGIN, Point.fixed(span));
     double half = known.given("m") * known.given("g") / 2;
     double onA = bearings.onA().force().getZ() - half;
     double onB = bearings.onB().force().getZ() - half;
@@ -188,7 +187,9 @@ class GyroTest {
     Body body =
         Body.of(
                 new MassProperties(
-                    1, new Vector3D(0, 0, arm), InertiaTensor.diagonal(across, across, top.axial())))
+                    1,
+                    new Vector3D(0, 0, arm),
+                    InertiaTensor.diagonal(across, across, top.axial())))
             .turned(new Axis(Point.ORIGIN, X), lean);
     Vector3D axis = new Vector3D(0, -Math.sin(lean), Math.cos(lean));
     Vector3D relative = axis.scalarMultiply(spin - precession * Math.cos(lean));
@@ -225,8 +226,7 @@ class GyroTest {
             known.given("m") * Load.STANDARD_GRAVITY * known.given("l"));
     var refusal =
         assertThrows(
-            Refusal.class,
-            () -> top.steadyPrecession(known.given("omega3"), known.given("theta")));
+            Refusal.class, () -> top.steadyPrecession(known.given("omega3"), known.given("theta")));
     assertEquals("spin", refusal.subject());
     assertEquals(
         "At 60 rad/s the top does not precess steadily with a lean of 25 deg; that takes at least"
@@ -282,9 +282,9 @@ class GyroTest {
       Vector3D start = motion.axis(run.state(0));
       Vector3D after = motion.axis(run.state(nutation.period()));
       assertEquals(start.getZ(), after.getZ(), 1e-8);
-      double round = Math.atan2(after.getY(), after.getX()) - Math.atan2(start.getY(), start.getX());
-      assertEquals(
-          0, Math.sin((round - nutation.precessionPerPeriod()) / 2), 1e-7, "lean " + lean);
+      double round =
+          Math.atan2(after.getY(), after.getX()) - Math.atan2(start.getY(), start.getX());
+      assertEquals(0, Math.sin((round - nutation.precessionPerPeriod()) / 2), 1e-7, "lean " + lean);
     }
   }
 

@@ -28,8 +28,7 @@ class RigidMotionTest {
 
   private static Body body(double mass, double first, double second, double third) {
     return Body.of(
-        new MassProperties(
-            mass, Vector3D.ZERO, InertiaTensor.diagonal(first, second, third)));
+        new MassProperties(mass, Vector3D.ZERO, InertiaTensor.diagonal(first, second, third)));
   }
 
   private static RigidMotion torqueFree(Body body, Vector3D rate, double limit) {
@@ -41,20 +40,16 @@ class RigidMotionTest {
   }
 
   /** A top of symmetric inertia on a pivot at the origin, leaning over by an angle about x. */
-  private static Body top(
-      double mass, double arm, double axial, double atPivot, double lean) {
+  private static Body top(double mass, double arm, double axial, double atPivot, double lean) {
     double atCentre = atPivot - mass * arm * arm;
     return Body.of(
             new MassProperties(
-                mass,
-                new Vector3D(0, 0, arm),
-                InertiaTensor.diagonal(atCentre, atCentre, axial)))
+                mass, new Vector3D(0, 0, arm), InertiaTensor.diagonal(atCentre, atCentre, axial)))
         .turned(new Axis(Point.ORIGIN, X), lean);
   }
 
   private static RigidMotion onPivot(Body body, Vector3D rate, double limit) {
-    return RigidMotion.of(
-        body, new Support.Pivot(Point.ORIGIN), rate, List.of(WEIGHT), limit);
+    return RigidMotion.of(body, new Support.Pivot(Point.ORIGIN), rate, List.of(WEIGHT), limit);
   }
 
   @ParameterizedTest
@@ -62,8 +57,7 @@ class RigidMotionTest {
   void anAsymmetricBodyFollowsTheEllipticFunctions(String id) {
     var known = CheckCases.named(id);
     Body body = body(1, known.given("I1"), known.given("I2"), known.given("I3"));
-    Vector3D rate =
-        new Vector3D(known.given("w1_0"), known.given("w2_0"), known.given("w3_0"));
+    Vector3D rate = new Vector3D(known.given("w1_0"), known.given("w2_0"), known.given("w3_0"));
     RigidMotion motion = torqueFree(body, rate, 10);
     MotionRun run = motion.run();
     known.holds("L", motion.momentum(run.state(0)).getNorm());
@@ -96,8 +90,7 @@ class RigidMotionTest {
       double twice = i1 * w1 * w1 + i3 * w3 * w3;
       double tau = Math.sqrt((i3 - i2) * (square - twice * i1) / (i1 * i2 * i3));
       double m = (i2 - i1) * (twice * i3 - square) / ((i3 - i2) * (square - twice * i1));
-      RigidMotion motion =
-          torqueFree(body(1, i1, i2, i3), new Vector3D(w1, 0, w3), 30);
+      RigidMotion motion = torqueFree(body(1, i1, i2, i3), new Vector3D(w1, 0, w3), 30);
       MotionRun run = motion.run();
       double w2 = Math.sqrt((twice * i3 - square) / (i2 * (i3 - i2)));
       for (double t : new double[] {0.7, 5, 17.3, 30}) {
@@ -113,8 +106,7 @@ class RigidMotionTest {
   void theSeparatrixIsFollowedForAShortTime() {
     var known = CheckCases.named("T11");
     Body body = body(1, known.given("I1"), known.given("I2"), known.given("I3"));
-    Vector3D rate =
-        new Vector3D(known.given("w1_0"), known.given("w2_0"), known.given("w3_0"));
+    Vector3D rate = new Vector3D(known.given("w1_0"), known.given("w2_0"), known.given("w3_0"));
     RigidMotion motion = torqueFree(body, rate, 1);
     MotionRun run = motion.run();
     known.holds("w1_at_0.3s", run.value(bodyRate(motion, X), 0.3));
@@ -146,7 +138,8 @@ class RigidMotionTest {
     Body body = body(1, known.given("I1"), known.given("I2"), known.given("I3"));
     double about3 = quarterPeriod(torqueFree(body, new Vector3D(1e-4, 0, speed), 1), X);
     known.holds("about_I3", Math.PI / 2 / about3, 1e-8);
-    double about1 = quarterPeriod(torqueFree(body, new Vector3D(speed, 1e-4, 0), 1), Vector3D.PLUS_J);
+    double about1 =
+        quarterPeriod(torqueFree(body, new Vector3D(speed, 1e-4, 0), 1), Vector3D.PLUS_J);
     known.holds("about_I1", Math.PI / 2 / about1, 1e-8);
   }
 
@@ -192,8 +185,7 @@ class RigidMotionTest {
     double angle = Math.toRadians(20);
     double precession = 2 * Math.PI / known.expected("T_precession_20deg");
     Vector3D rate =
-        new Vector3D(
-            precession * Math.sin(angle), 0, precession * Math.cos(angle) - Math.PI / 2);
+        new Vector3D(precession * Math.sin(angle), 0, precession * Math.cos(angle) - Math.PI / 2);
     RigidMotion motion = torqueFree(station, rate, 3);
     MotionRun run = motion.run();
     Vector3D momentum = motion.momentum(run.state(0));
@@ -209,7 +201,12 @@ class RigidMotionTest {
     var known = CheckCases.named(id);
     double lean = known.given("theta0");
     Body top =
-        top(known.given("m"), known.given("l"), known.given("C_axial"), known.given("A_pivot"), lean);
+        top(
+            known.given("m"),
+            known.given("l"),
+            known.given("C_axial"),
+            known.given("A_pivot"),
+            lean);
     Vector3D axis = new Vector3D(0, -Math.sin(lean), Math.cos(lean));
     RigidMotion motion = onPivot(top, axis.scalarMultiply(known.given("omega3")), 2);
     MotionRun run = motion.run();
@@ -224,8 +221,7 @@ class RigidMotionTest {
   private static double period(MotionRun run, RigidMotion motion) {
     StateFunction sinking = (t, y) -> motion.axis(y).dotProduct(Z);
     double low = run.firstTime(sinking, run.least(sinking).value() + 1e-9).orElseThrow();
-    double quarter =
-        run.firstTime((t, y) -> t < low ? 1 : rise(motion, y), 0).orElseThrow();
+    double quarter = run.firstTime((t, y) -> t < low ? 1 : rise(motion, y), 0).orElseThrow();
     return 2 * quarter;
   }
 
@@ -332,14 +328,16 @@ class RigidMotionTest {
         run.value(bodyRate(motion, Vector3D.PLUS_J), 1),
         1e-9);
     assertEquals(2, run.kept().size(), run.kept().toString());
-    assertTrue(run.kept().stream().allMatch(kept -> kept.relative() < 1e-12), run.kept().toString());
+    assertTrue(
+        run.kept().stream().allMatch(kept -> kept.relative() < 1e-12), run.kept().toString());
   }
 
   @Test
   void loadsFixedInTheBodyTurnWithItAndThoseFixedInSpaceDoNot() {
     Body body = body(1, 2, 2, 2);
     var inBody = new Load.Couple(new Vector3D(0, 0, 3), true);
-    RigidMotion about = RigidMotion.of(body, new Support.AtCentre(), Vector3D.ZERO, List.of(inBody), 4);
+    RigidMotion about =
+        RigidMotion.of(body, new Support.AtCentre(), Vector3D.ZERO, List.of(inBody), 4);
     assertEquals(6, about.rate(about.run().state(4)).getZ(), 1e-10);
     // A thrust along the body's own x: turning at 1 rad/s it drives the centre round a circle.
     var thrust = new Load.Force(new Vector3D(1, 0, 0), Vector3D.ZERO, true);
