@@ -9,7 +9,13 @@ import java.util.stream.Stream;
 /** The catalogue of laws. */
 public final class Laws {
   private static final List<Law> ALL =
-      Stream.of(ReferenceLaws.all(), ShapeLaws.all(), BodyLaws.all(), MomentumLaws.all())
+      Stream.of(
+              ReferenceLaws.all(),
+              ShapeLaws.all(),
+              BodyLaws.all(),
+              MomentumLaws.all(),
+              ChangingInertiaLaws.all(),
+              GyroLaws.all())
           .flatMap(List::stream)
           .toList();
 

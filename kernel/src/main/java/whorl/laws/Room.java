@@ -4,7 +4,8 @@ package whorl.laws;
 public enum Room {
   REFERENCE("reference", "Points, axes, frames, and what quantities are about"),
   BODIES("bodies", "Bodies"),
-  MOMENTUM("momentum", "Inertia, momentum and energy");
+  MOMENTUM("momentum", "Inertia, momentum and energy"),
+  GYROSCOPES("gyroscopes", "Gyroscopes");
 
   private final String word;
   private final String title;
