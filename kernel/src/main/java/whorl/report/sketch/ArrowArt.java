@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import org.apache.commons.math3.geometry.euclidean.twod.Vector2D;
+import org.jspecify.annotations.Nullable;
 
 /**
  * How a vector is drawn: a shaft, a head, and for an axial vector a second head and an arc round
@@ -14,10 +15,10 @@ final class ArrowArt {
   private static final double RING = 15;
   private static final int RING_STEPS = 44;
 
-  /** Where along the shaft the arc is; a second arrow along the same line has it further back. */
-  private static final double RING_AT = 0.7;
-
-  private static final double RING_APART = 0.22;
+  /**
+   * Where along the shaft the arc may be, in shares of its length; the first that is seen is taken.
+   */
+  private static final double[] RING_AT = {0.72, 0.8, 0.64, 0.56, 0.48, 0.4, 0.32, 0.24, 0.16};
 
   /** How far arrows that lie on each other are moved apart. */
   private static final double APART = 9;
@@ -27,6 +28,7 @@ final class ArrowArt {
   private final Vector3D to;
   private final Vector2D along;
   private final List<Stroke> shaft;
+  private @Nullable Vector3D ringCentre;
   private final List<Vector2D> ringBehind = new ArrayList<>();
   private final List<Vector2D> ringBefore = new ArrayList<>();
 
@@ -59,7 +61,7 @@ final class ArrowArt {
     Vector3D stop = end.subtract(plain.setBack(), end.subtract(start));
     ArrowArt art = new ArrowArt(sense, start, end, tracing.free(start, stop));
     if (sense.axial() && segment.along().getNormSq() > 0) {
-      art.ring(stage.view(), segment.along().normalize(), RING_AT - RING_APART * beside);
+      art.ring(stage.view(), segment.along().normalize(), art.ringShare(tracing, before));
     }
     return art;
   }
@@ -76,9 +78,27 @@ final class ArrowArt {
     return Math.abs(along.dotProduct(other.along)) > 0.995 && off < 2 * APART;
   }
 
+  /** A place for the arc that nothing hides, clear of the heads and of the arcs of others. */
+  private double ringShare(Tracing tracing, List<ArrowArt> before) {
+    double length = Stage.flat(to.subtract(from)).getNorm();
+    for (double share : RING_AT) {
+      Vector3D at = from.add(share, to.subtract(from));
+      boolean clear = (1 - share) * length > 2 * HEAD;
+      boolean apart =
+          before.stream()
+              .filter(other -> other.ringCentre != null)
+              .allMatch(other -> Stage.flat(at.subtract(other.ringCentre)).getNorm() > RING);
+      if (clear && apart && !tracing.hides(at)) {
+        return share;
+      }
+    }
+    return RING_AT[0];
+  }
+
   /** An arc of five sixths of a turn, right-handed about the shaft, with its head in front. */
   private void ring(View view, Vector3D unit, double share) {
     Vector3D centre = from.add(share, to.subtract(from));
+    ringCentre = centre;
     Vector3D front = view.eye().subtract(unit.dotProduct(view.eye()), unit);
     Vector3D first =
         front.getNorm() < 1e-6 ? view.up().crossProduct(unit).normalize() : front.normalize();
