@@ -5,6 +5,7 @@ import java.util.OptionalDouble;
 import java.util.function.Supplier;
 import org.apache.commons.math3.geometry.euclidean.threed.Rotation;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
+import org.jspecify.annotations.Nullable;
 import whorl.mechanics.Given;
 import whorl.mechanics.Refusal;
 import whorl.mechanics.reference.AngularMomentum;
@@ -85,21 +86,25 @@ public final class Body {
   /**
    * What is left of this body when others are taken out of it, such as a bore or a keyway.
    *
-   * @param removed bodies of the material that is taken out, each within this body
-   * @throws Refusal where a removed body moves differently or reaches outside this one, or where
+   * @param removed bodies of the material that is taken out, each within this body and apart from
+   *     the others; they may touch
+   * @throws Refusal where a removed body moves differently or takes what is not there, or where
    *     nothing sound is left
    */
   public Body without(Body... removed) {
     MassProperties rest = inWorld;
     double volume = volumeOrNaN();
+    Outline left = outline();
     for (Body part : removed) {
       demandMovesWith(part);
       rest = rest.minus(part.inWorld);
       volume -= part.volumeOrNaN();
+      Outline out = part.outline();
+      Enclosure.demandWithin(left, out);
+      left = left.without(out);
     }
-    List<Body> out = List.of(removed);
-    Enclosure.demandWithin(outline(), outline(out));
-    return joined(shape.name(), rest, volume, () -> outline().without(outline(out)));
+    Outline rough = left;
+    return joined(shape.name(), rest, volume, () -> rough);
   }
 
   private double volumeOrNaN() {
@@ -319,6 +324,22 @@ public final class Body {
     return (mass * Given.finite("velocity", velocity).getNormSq()
             + spin.dotProduct(spinAngularMomentum(spin)))
         / 2;
+  }
+
+  /** Whether another body has the same mass, inertia, volume and place. */
+  @Override
+  public boolean equals(@Nullable Object other) {
+    return other instanceof Body body
+        && shape.name().equals(body.shape.name())
+        && shape.volume().equals(body.shape.volume())
+        && ownInertia().equals(body.ownInertia())
+        && mass == body.mass
+        && frame.equals(body.frame);
+  }
+
+  @Override
+  public int hashCode() {
+    return inWorld.hashCode();
   }
 
   private static Frame at(Vector3D origin) {

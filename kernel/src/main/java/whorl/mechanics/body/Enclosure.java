@@ -1,20 +1,25 @@
 package whorl.mechanics.body;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import whorl.mechanics.Given;
 import whorl.mechanics.Refusal;
 
-/** Whether one body lies within another, judged by their faceted surfaces. */
+/** Whether one body lies within another, judged by points all over its faceted surface. */
 final class Enclosure {
-  private static final int SAMPLES = 64;
-  private static final double OFF_THE_EDGE = 0.02;
+  /** About so many triangles of a surface are looked at. */
+  private static final int TRIANGLES = 64;
+
+  /** Distance between points, as a share of the size of the surface. */
+  private static final double SPACING = 0.06;
 
   private Enclosure() {}
 
   /**
-   * Refuses to take out of a body what reaches outside it: that would count material that is not
-   * there. Bodies without closed surfaces are not judged.
+   * Refuses to take out of a body what reaches outside it, or what is out already: that would count
+   * material that is not there. Bodies without closed surfaces are not judged.
    */
   static void demandWithin(Outline body, Outline removed) {
     if (body.solids().isEmpty()) {
@@ -26,37 +31,30 @@ final class Enclosure {
   }
 
   private static void demandWithin(Outline body, Facets skin) {
-    double inward = inward(skin);
-    int every = Math.max(1, skin.triangles() / SAMPLES);
-    for (int t = 0; t < skin.triangles(); t += every) {
-      Vector3D a = skin.vertex(skin.corner(t, 0));
-      Vector3D b = skin.vertex(skin.corner(t, 1));
-      Vector3D c = skin.vertex(skin.corner(t, 2));
-      Vector3D normal = b.subtract(a).crossProduct(c.subtract(a));
-      if (normal.getNormSq() == 0) {
-        continue;
-      }
-      Vector3D middle = a.add(b).add(c).scalarMultiply(1 / 3.0);
-      Vector3D step = normal.normalize().scalarMultiply(-inward);
-      for (Vector3D corner : new Vector3D[] {a, b, c}) {
-        Vector3D inside = corner.add(OFF_THE_EDGE, middle.subtract(corner)).add(step);
-        if (body.solids().stream().noneMatch(solid -> contains(solid, inside))) {
+    double[] extent = extent(skin);
+    // Surfaces may touch: further in than the facets of a round surface cut off, less than a wall.
+    double inward = Math.min(0.003 * extent[2], 0.3 * extent[0]);
+    Facets within = skin.inset(inward);
+    int every = Math.max(1, skin.triangles() / TRIANGLES);
+    for (int t = 0; t < within.triangles(); t += every) {
+      Vector3D a = within.vertex(within.corner(t, 0));
+      Vector3D b = within.vertex(within.corner(t, 1));
+      Vector3D c = within.vertex(within.corner(t, 2));
+      for (Vector3D at : points(a, b, c, SPACING * extent[2])) {
+        if (body.solids().stream().noneMatch(solid -> contains(solid, at))) {
           throw new Refusal(
               "removed body",
-              "What is taken out reaches outside the body near "
-                  + Given.text(corner, "m")
-                  + ", where there is no material to take.",
-              "Make it end where the body ends, or check where it is placed.");
+              "What is taken out reaches outside the body, or into what is taken out already, near "
+                  + Given.text(at, "m")
+                  + ": there is no material to take.",
+              "Make it end where the material ends, or check where it is placed.");
         }
       }
     }
   }
 
-  /**
-   * How far the corners of a surface are moved inside before they are judged, since surfaces may
-   * touch: further than the facets of a round surface cut off, less than a wall is thick.
-   */
-  private static double inward(Facets skin) {
+  /** The sides of the box around a surface, shortest first. */
+  private static double[] extent(Facets skin) {
     double[] least = {Double.MAX_VALUE, Double.MAX_VALUE, Double.MAX_VALUE};
     double[] most = {-Double.MAX_VALUE, -Double.MAX_VALUE, -Double.MAX_VALUE};
     for (int i = 0; i < skin.vertices(); i++) {
@@ -68,34 +66,38 @@ final class Enclosure {
     }
     double[] extent = {most[0] - least[0], most[1] - least[1], most[2] - least[2]};
     Arrays.sort(extent);
-    return Math.min(0.003 * extent[2], 0.3 * extent[0]);
+    return extent;
+  }
+
+  /** Points all over a triangle: rows beside its longest side, no further apart than a distance. */
+  private static List<Vector3D> points(Vector3D a, Vector3D b, Vector3D c, double apart) {
+    double ab = a.distance(b);
+    double bc = b.distance(c);
+    double ca = c.distance(a);
+    if (bc > ab && bc >= ca) {
+      return points(b, c, a, apart);
+    } else if (ca > ab) {
+      return points(c, a, b, apart);
+    } else if (ab == 0) {
+      return List.of(a);
+    }
+    double height = b.subtract(a).crossProduct(c.subtract(a)).getNorm() / ab;
+    int rows = 1 + (int) (height / apart);
+    List<Vector3D> points = new ArrayList<>();
+    for (int row = 0; row <= rows; row++) {
+      double up = (double) row / rows;
+      int columns = 1 + (int) ((1 - up) * ab / apart);
+      for (int column = 0; column <= columns; column++) {
+        double along = (double) column / columns;
+        points.add(new Vector3D((1 - up) * (1 - along), a, (1 - up) * along, b, up, c));
+      }
+    }
+    return points;
   }
 
   /** Whether a point is in the material of a solid. */
   static boolean contains(Outline.Solid solid, Vector3D point) {
-    return surrounds(solid.skin(), point)
+    return solid.skin().surrounds(point)
         && solid.removed().stream().noneMatch(removed -> contains(removed, point));
-  }
-
-  /**
-   * Whether a closed surface goes round a point: the solid angle under which it is seen from there
-   * is that of the whole sphere. Unlike counting how often a ray meets the surface, this has no
-   * rays that run along an edge.
-   */
-  private static boolean surrounds(Facets skin, Vector3D point) {
-    double angle = 0;
-    for (int t = 0; t < skin.triangles(); t++) {
-      Vector3D a = skin.vertex(skin.corner(t, 0)).subtract(point);
-      Vector3D b = skin.vertex(skin.corner(t, 1)).subtract(point);
-      Vector3D c = skin.vertex(skin.corner(t, 2)).subtract(point);
-      double la = a.getNorm();
-      double lb = b.getNorm();
-      double lc = c.getNorm();
-      double triple = a.dotProduct(b.crossProduct(c));
-      double below =
-          la * lb * lc + a.dotProduct(b) * lc + b.dotProduct(c) * la + c.dotProduct(a) * lb;
-      angle += 2 * Math.atan2(triple, below);
-    }
-    return angle > 2 * Math.PI;
   }
 }

@@ -13,6 +13,10 @@ import org.apache.commons.math3.geometry.euclidean.twod.Vector2D;
 public final class Facets {
   private static final int ROUND = 72;
 
+  private static final double RAY_X = 0.3782931;
+  private static final double RAY_Y = 0.5217443;
+  private static final double RAY_Z = 0.7646547;
+
   private final double[] coordinates;
   private final int[] corners;
 
@@ -46,6 +50,80 @@ public final class Facets {
   /** The vertex at a corner of a triangle. */
   public int corner(int triangle, int corner) {
     return corners[3 * triangle + corner];
+  }
+
+  /**
+   * Whether this closed surface goes round a point: a ray from it leaves the surface once more often
+   * than it enters. The ray has a direction in which no edge of a shape is likely to run.
+   */
+  boolean surrounds(Vector3D point) {
+    int leaving = 0;
+    for (int t = 0; t < corners.length; t += 3) {
+      leaving += crossing(3 * corners[t], 3 * corners[t + 1], 3 * corners[t + 2], point);
+    }
+    return leaving > 0;
+  }
+
+  /** One where the ray leaves through a triangle, minus one where it enters, else zero. */
+  private int crossing(int a, int b, int c, Vector3D point) {
+    double x = coordinates[a] - point.getX();
+    double y = coordinates[a + 1] - point.getY();
+    double z = coordinates[a + 2] - point.getZ();
+    double bx = coordinates[b] - coordinates[a];
+    double by = coordinates[b + 1] - coordinates[a + 1];
+    double bz = coordinates[b + 2] - coordinates[a + 2];
+    double cx = coordinates[c] - coordinates[a];
+    double cy = coordinates[c + 1] - coordinates[a + 1];
+    double cz = coordinates[c + 2] - coordinates[a + 2];
+    double nx = by * cz - bz * cy;
+    double ny = bz * cx - bx * cz;
+    double nz = bx * cy - by * cx;
+    double through = nx * RAY_X + ny * RAY_Y + nz * RAY_Z;
+    if (through == 0 || (nx * x + ny * y + nz * z) / through <= 0) {
+      return 0;
+    }
+    // Shares of the two sides at which the line of the ray meets the plane of the triangle.
+    double qx = y * RAY_Z - z * RAY_Y;
+    double qy = z * RAY_X - x * RAY_Z;
+    double qz = x * RAY_Y - y * RAY_X;
+    double u = (cx * qx + cy * qy + cz * qz) / through;
+    double v = -(bx * qx + by * qy + bz * qz) / through;
+    return u >= 0 && v >= 0 && u + v < 1 ? (through > 0 ? 1 : -1) : 0;
+  }
+
+  /** The surface with each vertex moved inwards, by at least a distance from each of its triangles. */
+  Facets inset(double distance) {
+    Vector3D[] normals = new Vector3D[triangles()];
+    Vector3D[] sums = new Vector3D[vertices()];
+    Arrays.fill(sums, Vector3D.ZERO);
+    for (int t = 0; t < normals.length; t++) {
+      Vector3D a = vertex(corner(t, 0));
+      Vector3D normal =
+          vertex(corner(t, 1)).subtract(a).crossProduct(vertex(corner(t, 2)).subtract(a));
+      double size = normal.getNorm();
+      normals[t] = size == 0 ? Vector3D.ZERO : normal.scalarMultiply(1 / size);
+      for (int k = 0; k < 3; k++) {
+        sums[corner(t, k)] = sums[corner(t, k)].add(normals[t]);
+      }
+    }
+    double[] least = new double[sums.length];
+    Arrays.fill(least, Double.MAX_VALUE);
+    for (int t = 0; t < normals.length; t++) {
+      for (int k = 0; k < 3 && normals[t].getNormSq() > 0; k++) {
+        int vertex = corner(t, k);
+        least[vertex] = Math.min(least[vertex], normals[t].dotProduct(sums[vertex]));
+      }
+    }
+    double[] moved = coordinates.clone();
+    for (int v = 0; v < sums.length; v++) {
+      // At a saddle no direction leads inwards from all triangles; the mean one is as good as any.
+      double size = sums[v].getNorm();
+      double scale = Math.max(least[v], 0.2 * size);
+      if (size > 0) {
+        put(moved, v, vertex(v).subtract(distance / scale, sums[v]));
+      }
+    }
+    return new Facets(moved, corners);
   }
 
   /** The surface whose vertices are elsewhere. */

@@ -1,5 +1,6 @@
 package whorl.mechanics.reference;
 
+import java.util.Objects;
 import org.apache.commons.math3.geometry.euclidean.threed.Rotation;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import org.jspecify.annotations.Nullable;
@@ -178,5 +179,28 @@ public final class Frame {
                 + Given.text(Math.toDegrees(Math.acos(cosine)), "deg")
                 + ", not 90 deg.",
         "Give axes at right angles.");
+  }
+
+  /** Whether another frame is given in the same way in an equal frame. */
+  @Override
+  public boolean equals(@Nullable Object other) {
+    return other instanceof Frame frame
+        && Objects.equals(parent, frame.parent)
+        && shift.equals(frame.shift)
+        && sameAs(frame.turned)
+        && turning.equals(frame.turning)
+        && moving.equals(frame.moving);
+  }
+
+  private boolean sameAs(Rotation other) {
+    return turned.getQ0() == other.getQ0()
+        && turned.getQ1() == other.getQ1()
+        && turned.getQ2() == other.getQ2()
+        && turned.getQ3() == other.getQ3();
+  }
+
+  @Override
+  public int hashCode() {
+    return origin.hashCode();
   }
 }

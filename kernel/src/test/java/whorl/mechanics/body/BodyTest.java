@@ -1,6 +1,7 @@
 package whorl.mechanics.body;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 import static whorl.mechanics.Near.assertNear;
 import static whorl.mechanics.Near.assertRefused;
@@ -146,6 +147,34 @@ class BodyTest {
     Body ball = Shapes.hollowSphere(0.4, 0.2).ofDensity(density);
     Body inHollow = Shapes.solidSphere(0.1).ofDensity(density);
     assertRefused("removed body", "reaches outside", () -> ball.without(inHollow));
+  }
+
+  @Test
+  void materialIsNotTakenOutTwice() {
+    Body block = Shapes.box(0.2, 0.2, 0.2).ofDensity(1000);
+    Body bore = Shapes.solidCylinder(0.05, 0.2).ofDensity(1000);
+    Body counterbore =
+        Shapes.solidCylinder(0.08, 0.05)
+            .ofDensity(1000)
+            .placed(Frame.WORLD, new Vector3D(0, 0, 0.075), Vector3D.PLUS_K);
+    Body across = bore.placed(Frame.WORLD, Vector3D.ZERO, Vector3D.PLUS_I);
+    assertRefused("removed body", "taken out already", () -> block.without(bore, counterbore));
+    assertRefused("removed body", "taken out already", () -> block.without(bore).without(across));
+    Body step =
+        Shapes.hollowCylinder(0.08, 0.05, 0.05)
+            .ofDensity(1000)
+            .placed(Frame.WORLD, new Vector3D(0, 0, 0.075), Vector3D.PLUS_K);
+    double left = 8 - 1000 * Math.PI / 4 * (0.05 * 0.05 * 0.15 + 0.08 * 0.08 * 0.05);
+    assertEquals(left, block.without(bore, step).mass(), TINY);
+  }
+
+  @Test
+  void equalBodiesAreEqual() {
+    Body same = Shapes.solidCylinder(0.4, 0.1).ofMass(10);
+    assertEquals(DISC, same);
+    assertEquals(DISC.hashCode(), same.hashCode());
+    assertNotEquals(DISC, Shapes.solidCylinder(0.4, 0.1).ofMass(11));
+    assertNotEquals(DISC, same.placed(Frame.WORLD, Vector3D.PLUS_I, Vector3D.PLUS_K));
   }
 
   @Test

@@ -124,4 +124,34 @@ class InertiaTest {
     assertRefused("moment of inertia", "different axes", () -> here.plus(there));
     assertEquals(2, here.plus(here).value());
   }
+
+  // Slips of the trade, each by the named law at chosen inputs: what a careless sum gives, and what
+  // is right.
+
+  @Test
+  void inertiasAreJoinedAboutOneAxisOnly() {
+    // A disc of 0.045 kg·m² about itself, 10 kg, 0.3 m off a shaft of 0.002 kg·m²: 0.947, not 0.047.
+    Axis own = new Axis(Point.fixed(0.3, 0, 0), Vector3D.PLUS_K);
+    AxialInertia disc = new AxialInertia(0.045, own);
+    AxialInertia shaft = new AxialInertia(0.002, Z);
+    assertRefused("moment of inertia", "different axes", () -> disc.plus(shaft));
+    assertEquals(0.947, disc.moved(Z, 10, own.through()).plus(shaft).value(), 1e-12);
+  }
+
+  @Test
+  void goingToTheCentreTakesOffWhatLeavingItAdds() {
+    // A rod of 2 kg and 1.2 m with 0.96 kg·m² about its end: 0.24 about its centre, not 1.68.
+    Axis end = new Axis(Point.fixed(0.6, 0, 0), Vector3D.PLUS_K);
+    assertEquals(0.24, new AxialInertia(0.96, end).moved(Z, 2, Point.ORIGIN).value(), 1e-12);
+  }
+
+  @Test
+  void theSignOfAProductOfInertiaTurnsThePrincipalAxes() {
+    // Moments 2 and 3 kg·m², product +0.5 kg·m²: the first axis at 22.5 deg from x, not at −22.5 or
+    // 67.5.
+    InertiaTensor tensor = InertiaTensor.fromProducts(2, 3, 4, 0.5, 0, 0);
+    Vector3D first = tensor.principalAxes().get(0);
+    double angle = Math.toDegrees(Math.atan(first.getY() / first.getX()));
+    assertEquals(22.5, angle, 1e-9);
+  }
 }
