@@ -60,6 +60,13 @@ record Keyword(String word, At place, String gist, String paragraph, String exam
                   + " largest value.",
               "motion run_up\n    ω [rpm] starts 0\n    ω' = 1 rad/s^2\n    within 10 s"),
           new Keyword(
+              "sketch",
+              At.LINE,
+              "draws things in space",
+              "Draws bodies, points, axes, frames, forces and vectors by their names, what is hidden dashed."
+                  + " A vector that turns has two heads and an arc that shows which way.",
+              "sketch axis(through = point(0, 0, 0), along = (0, 0, 1))"),
+          new Keyword(
               "nominal",
               At.CHECK,
               "checks values without their tolerances",

@@ -3,6 +3,7 @@ package whorl.check;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
+import org.jspecify.annotations.Nullable;
 import whorl.syntax.Expr;
 import whorl.syntax.MotionLine;
 import whorl.units.Unit;
@@ -56,6 +57,22 @@ public sealed interface Checked {
    */
   record Reproduction(Basis basis, Formula value, Formula stated, Formula within, boolean relative)
       implements Checked {}
+
+  /** Things to be drawn. */
+  record Sketch(Basis basis, List<Drawn> things) implements Checked {
+    /** Copies the list. */
+    public Sketch {
+      things = List.copyOf(things);
+    }
+  }
+
+  /**
+   * Something to be drawn: a thing in space, or a vector.
+   *
+   * @param text what the author wrote for it
+   * @param at what works out the point or axis that a vector is about; null for a free vector
+   */
+  record Drawn(Expr text, Formula formula, Operation.@Nullable Thing at) {}
 
   /** A condition taken apart into its comparisons, so that each can be shown with its numbers. */
   sealed interface Clause {

@@ -1,5 +1,6 @@
 package whorl.check;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -96,6 +97,8 @@ public final class Checker {
       return reproduction(reproduction);
     } else if (statement instanceof Statement.Motion motion) {
       return new MotionChecker(scope, motion).checked();
+    } else if (statement instanceof Statement.Sketch sketch) {
+      return sketch(sketch);
     }
     throw new IllegalStateException(
         statement instanceof Statement.Published
@@ -233,6 +236,23 @@ public final class Checker {
         formula(stated.read(met.operand()), statedUnit.or(() -> valueUnit)),
         formula(within, checker.writtenUnit(reproduction.within())),
         relative);
+  }
+
+  private Checked sketch(Statement.Sketch sketch) {
+    var checker = new ExpressionChecker(scope, List.of(), new Frame(0));
+    var things = new ArrayList<Checked.Drawn>();
+    for (Expr text : sketch.things()) {
+      Typed typed = checker.check(text);
+      String over = checker.over();
+      if (over != null) {
+        throw MotionMessages.courseInSketch(text, over);
+      } else if (!(typed.type() instanceof Type.Thing) && !(typed.type() instanceof Type.Vector)) {
+        throw SpaceMessages.cannotBeDrawn(text, typed.type());
+      }
+      Formula formula = formula(typed, checker.writtenUnit(text));
+      things.add(new Checked.Drawn(text, formula, checker.about(typed)));
+    }
+    return new Checked.Sketch(checker.basis(), things);
   }
 
   /** A course has a value for every instant of a motion, so its formula is one of courses too. */

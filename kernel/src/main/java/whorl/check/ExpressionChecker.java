@@ -120,6 +120,14 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     return new Space(this).seen(typed).operation();
   }
 
+  /** What works out the point or axis that a quantity is about; null where it is about none. */
+  Operation.@Nullable Thing about(Typed typed) {
+    Reference reference = typed.type().about();
+    return reference == null
+        ? null
+        : (Operation.Thing) new Space(this).at(reference.about()).operation();
+  }
+
   /** Checks an expression that must be a number. */
   Typed number(Expr expr, WrittenUnits.Reach reach) {
     Typed typed = check(expr, reach);

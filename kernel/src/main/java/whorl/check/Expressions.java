@@ -46,6 +46,8 @@ final class Expressions {
       return List.of(reproduction.value(), reproduction.stated(), reproduction.within());
     } else if (statement instanceof Statement.Assumption assumption) {
       return List.of(assumption.condition());
+    } else if (statement instanceof Statement.Sketch sketch) {
+      return sketch.things();
     }
     return statement instanceof Statement.Motion motion
         ? motion.lines().stream().flatMap(line -> line.match(LINES)).toList()

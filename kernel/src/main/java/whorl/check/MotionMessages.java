@@ -154,6 +154,15 @@ final class MotionMessages {
         "Say which value is meant: peak(…), least(…), last(…), at(…, 3 s).");
   }
 
+  static CheckFailure courseInSketch(Expr thing, String over) {
+    return failure(
+        "course-in-sketch",
+        "A sketch shows one instant, but this has a value for every instant of " + over + ".",
+        thing.span(),
+        "",
+        "Say which one is meant: first(…), last(…), at(…, 3 s).");
+  }
+
   static CheckFailure courseInMotion(Expr.Name motion, String over) {
     return failure(
         "course-in-motion",

@@ -26,6 +26,27 @@ final class SpaceMessages {
         : ThingSort.INERTIA.withArticle();
   }
 
+  static CheckFailure cannotBeDrawn(Expr expr, Type found) {
+    String what = "a number";
+    String fix =
+        "If it is the size of a vector, write that vector out, such as (0, 0, "
+            + Printer.expression(expr)
+            + ").";
+    if (found instanceof Type.Tensor) {
+      what = ThingSort.INERTIA.withArticle();
+      fix = "Sketch the body that has it.";
+    } else if (found instanceof Type.Truth) {
+      what = "a condition";
+      fix = "";
+    }
+    return failure(
+        "not-drawable",
+        what.replaceFirst("^a", "A") + " cannot be drawn.",
+        expr.span(),
+        "A sketch shows bodies, points, axes, frames, forces and vectors.",
+        fix);
+  }
+
   static CheckFailure thingForNumber(Expr expr, Type found) {
     return thingForNumber(expr.span(), found);
   }

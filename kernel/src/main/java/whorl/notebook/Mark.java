@@ -67,6 +67,11 @@ public enum Mark {
           }
 
           @Override
+          public Mark sketched(Step.Sketched sketched) {
+            return NONE;
+          }
+
+          @Override
           public Mark waiting(Step.Waiting waiting) {
             return NONE;
           }

@@ -1,6 +1,9 @@
 package whorl.report;
 
+import java.util.List;
 import java.util.Map;
+import whorl.report.sketch.Drawn;
+import whorl.report.sketch.Sketch;
 
 /**
  * A piece of HTML that is well formed by construction: text goes in escaped, elements close
@@ -91,6 +94,11 @@ final class Html {
   /** A bar that shows how far something has come. */
   static Html progress(int done, int total) {
     return new Html("<progress value=\"" + done + "\" max=\"" + total + "\"></progress>");
+  }
+
+  /** A drawing, which escapes by itself what it has from users. */
+  static Html drawing(List<Drawn> things) {
+    return new Html(Sketch.svg(things));
   }
 
   /** Several pieces, one behind another. */

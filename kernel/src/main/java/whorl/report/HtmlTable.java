@@ -3,7 +3,6 @@ package whorl.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
-import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Source;
 
 /** Sets rows as a ruled table in HTML that reads the same trusted or not, light or dark. */
@@ -24,10 +23,13 @@ final class HtmlTable implements Piece.Cases<Html> {
     for (Row row : rows) {
       body.add(table.row(row));
       if (row.card() != null) {
-        body.add(card(row, row.card(), source));
+        body.add(below(row, ErrorCard.html(row.card(), source)));
+      }
+      if (row.drawing() != null) {
+        body.add(below(row, row.drawing()));
       }
       if (row.grid() != null) {
-        body.add(grid(row, row.grid()));
+        body.add(below(row, grid(row.grid())));
       }
     }
     return Html.styled(
@@ -75,7 +77,7 @@ final class HtmlTable implements Piece.Cases<Html> {
         : Html.styled("td", style, "title", row.kind(), content);
   }
 
-  private static Html grid(Row row, Grid grid) {
+  private static Html grid(Grid grid) {
     var heads = new ArrayList<Html>();
     for (Grid.Head head : grid.heads()) {
       Html unit =
@@ -97,18 +99,11 @@ final class HtmlTable implements Piece.Cases<Html> {
                       .map(number -> Html.styled("td", Look.GRID_NUMBER, math(number)))
                       .toList())));
     }
-    return Html.styled(
-        "tr",
-        Look.ROW_BELOW,
-        Html.styled(
-            "td",
-            Look.CARD + ";" + Look.rail(row.tone()),
-            "colspan",
-            Integer.toString(COLUMNS),
-            Html.styled("table", Look.SNUG_TABLE, Html.element("tbody", Html.all(rows)))));
+    return Html.styled("table", Look.SNUG_TABLE, Html.element("tbody", Html.all(rows)));
   }
 
-  private static Html card(Row row, Diagnostic diagnostic, Source source) {
+  /** Something over the whole width under a row. */
+  private static Html below(Row row, Html content) {
     return Html.styled(
         "tr",
         Look.ROW_BELOW,
@@ -117,7 +112,7 @@ final class HtmlTable implements Piece.Cases<Html> {
             Look.CARD + ";" + Look.rail(row.tone()),
             "colspan",
             Integer.toString(COLUMNS),
-            ErrorCard.html(diagnostic, source)));
+            content));
   }
 
   private Html lines(List<Line> lines) {

@@ -14,7 +14,9 @@ import whorl.eval.Course;
 import whorl.eval.Value;
 import whorl.laws.ThingSort;
 import whorl.mechanics.motion.Ending;
+import whorl.report.sketch.Sketch;
 import whorl.sheet.Comparison;
+import whorl.sheet.Depicted;
 import whorl.sheet.Followed;
 import whorl.sheet.Lapse;
 import whorl.sheet.Quantity;
@@ -27,8 +29,8 @@ import whorl.units.Unit;
 
 /**
  * The results of a note for tools, as {@value #MEDIA_TYPE}: definitions by name, functions
- * published from Java if there are any, checks, assumptions and errors, in the order of the note,
- * at full double precision.
+ * published from Java and sketches if there are any, checks, assumptions and errors, in the order
+ * of the note, at full double precision.
  */
 public final class NoteRecord implements Step.Cases<NoteRecord> {
   /** Media type of the record. */
@@ -39,6 +41,7 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
   private final JsonObject motions = new JsonObject();
   private final JsonArray checks = new JsonArray();
   private final JsonArray assumptions = new JsonArray();
+  private final JsonArray sketches = new JsonArray();
   private final JsonArray errors = new JsonArray();
 
   private NoteRecord() {}
@@ -69,6 +72,9 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
     }
     object.add("checks", record.checks);
     object.add("assumptions", record.assumptions);
+    if (!record.sketches.isEmpty()) {
+      object.add("sketches", record.sketches);
+    }
     object.add("errors", record.errors);
     return object;
   }
@@ -261,6 +267,24 @@ public final class NoteRecord implements Step.Cases<NoteRecord> {
 
   @Override
   public NoteRecord shown(Step.Shown shown) {
+    return this;
+  }
+
+  @Override
+  public NoteRecord sketched(Step.Sketched sketched) {
+    var sketch = new JsonObject();
+    var things = new JsonArray();
+    for (Depicted thing : sketched.things()) {
+      var object = new JsonObject();
+      object.addProperty("name", thing.name());
+      object.addProperty("kind", thing.quantity().kind());
+      object.add("si", inUnit(thing.quantity().value(), thing.quantity().unit().coherent()));
+      things.add(object);
+    }
+    sketch.addProperty("text", Printer.unremarked(sketched.statement()));
+    sketch.add("things", things);
+    sketch.addProperty("svg", Sketch.svg(Depictions.of(sketched.things())));
+    sketches.add(sketch);
     return this;
   }
 

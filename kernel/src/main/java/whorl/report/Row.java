@@ -18,6 +18,7 @@ import whorl.diagnostic.Diagnostic;
  * @param why remark and reservations
  * @param card what is wrong, set under the row over its whole width; null where nothing is
  * @param grid numbers set under the row over its whole width; null where there are none
+ * @param drawing a drawing, set under the row where the medium has any; null where there is none
  */
 record Row(
     Tone tone,
@@ -29,8 +30,12 @@ record Row(
     List<Line> further,
     List<Line> why,
     @Nullable Diagnostic card,
-    @Nullable Grid grid) {
-  /** A row with no grid of numbers. */
+    @Nullable Grid grid,
+    @Nullable Html drawing) {
+  /** The heads of the five columns. */
+  static final List<String> HEADS = List.of("quantity", "rule", "with", "gives", "why");
+
+  /** A row with nothing under it but what is wrong. */
   Row(
       Tone tone,
       Line quantity,
@@ -41,11 +46,8 @@ record Row(
       List<Line> further,
       List<Line> why,
       @Nullable Diagnostic card) {
-    this(tone, quantity, kind, rule, with, gives, further, why, card, null);
+    this(tone, quantity, kind, rule, with, gives, further, why, card, null, null);
   }
-
-  /** The heads of the five columns. */
-  static final List<String> HEADS = List.of("quantity", "rule", "with", "gives", "why");
 
   /** Copies the lists. */
   Row {

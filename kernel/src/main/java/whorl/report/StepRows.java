@@ -5,10 +5,12 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import whorl.eval.Value;
 import whorl.sheet.Comparison;
+import whorl.sheet.Depicted;
 import whorl.sheet.Given;
 import whorl.sheet.Lapse;
 import whorl.sheet.Quantity;
@@ -329,6 +331,41 @@ final class StepRows implements Step.Cases<Row> {
   }
 
   @Override
+  public Row sketched(Step.Sketched sketched) {
+    var gives = new ArrayList<Line>();
+    for (Depicted thing : sketched.things()) {
+      Quantity quantity = thing.quantity();
+      boolean vector = quantity.value() instanceof Value.Vector;
+      Piece name =
+          thing.name().chars().allMatch(c -> Character.isLetterOrDigit(c) || c == '_')
+              ? new Piece.Formula(FormulaLayout.symbol(thing.name(), vector))
+              : Piece.words(thing.name());
+      String size = Depictions.size(quantity);
+      gives.add(
+          size.isEmpty()
+              ? Line.of(name, Piece.quiet(" " + quantity.kind()))
+              : Line.of(name, new Piece.Value(" " + size), Piece.quiet(" " + quantity.kind())));
+    }
+    return new Row(
+        sketched.standing().isFirm() ? Tone.PLAIN : Tone.DOUBTFUL,
+        Line.of(Piece.quiet("sketch")),
+        "",
+        List.of(
+            Line.of(
+                Piece.words(
+                    sketched.things().stream()
+                        .map(Depicted::name)
+                        .collect(Collectors.joining(", "))))),
+        List.of(),
+        List.of(),
+        gives,
+        why(sketched),
+        null,
+        null,
+        Html.drawing(Depictions.of(sketched.things())));
+  }
+
+  @Override
   public Row followed(Step.Ran ran) {
     var row = new MotionRow(ran);
     var why = new ArrayList<>(why(ran));
@@ -343,7 +380,8 @@ final class StepRows implements Step.Cases<Row> {
         row.gives(),
         why,
         null,
-        row.grid());
+        row.grid(),
+        null);
   }
 
   @Override

@@ -3,6 +3,7 @@ package whorl.sheet;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import whorl.check.Checked;
@@ -56,6 +57,8 @@ final class Evaluation {
       } else if (checked instanceof Checked.Condition condition) {
         Verdict verdict = verdict(condition);
         return new Result.Judged(condition, verdict, lapses());
+      } else if (checked instanceof Checked.Sketch sketch) {
+        return sketched(sketch);
       }
       return compared((Checked.Reproduction) checked);
     } catch (NoResult failure) {
@@ -228,6 +231,17 @@ final class Evaluation {
         (computed - stated) / stated,
         allowed,
         lapses());
+  }
+
+  private Result sketched(Checked.Sketch sketch) throws NoResult {
+    var values = new ArrayList<Value>();
+    var places = new ArrayList<Optional<Value.Thing>>();
+    for (Checked.Drawn thing : sketch.things()) {
+      values.add(value(thing.formula().operation()));
+      Operation at = thing.at();
+      places.add(at == null ? Optional.empty() : Optional.of((Value.Thing) value(at)));
+    }
+    return new Result.Sketched(sketch, values, places, lapses());
   }
 
   /** A part of a statement has no value. */

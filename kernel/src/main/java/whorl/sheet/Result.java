@@ -1,6 +1,7 @@
 package whorl.sheet;
 
 import java.util.List;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import whorl.check.Checked;
 import whorl.diagnostic.Diagnostic;
@@ -84,6 +85,26 @@ sealed interface Result {
 
     boolean holds() {
       return Math.abs(deviation) <= within;
+    }
+  }
+
+  /**
+   * Things to be drawn, worked out.
+   *
+   * @param values of the things in order, along the axes of the world
+   * @param at for each the point or axis that it is about; empty for one that is about none
+   */
+  record Sketched(
+      Checked.Sketch checked,
+      List<Value> values,
+      List<Optional<Value.Thing>> at,
+      List<Lapse> lapses)
+      implements Sound {
+    /** Copies the lists. */
+    public Sketched {
+      values = List.copyOf(values);
+      at = List.copyOf(at);
+      lapses = List.copyOf(lapses);
     }
   }
 

@@ -50,6 +50,8 @@ public sealed interface Step {
 
     R followed(Ran ran);
 
+    R sketched(Sketched sketched);
+
     R waiting(Waiting waiting);
 
     R broken(Broken broken);
@@ -218,6 +220,24 @@ public sealed interface Step {
     @Override
     public <R> R match(Cases<R> cases) {
       return cases.followed(this);
+    }
+  }
+
+  /**
+   * A drawing of things in space.
+   *
+   * @param things in the order in which they are named
+   */
+  record Sketched(Place place, Statement.Sketch statement, List<Depicted> things, Standing standing)
+      implements Step {
+    /** Copies the list. */
+    public Sketched {
+      things = List.copyOf(things);
+    }
+
+    @Override
+    public <R> R match(Cases<R> cases) {
+      return cases.sketched(this);
     }
   }
 

@@ -1,5 +1,6 @@
 package whorl.sheet;
 
+import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Objects;
@@ -13,6 +14,7 @@ import whorl.eval.Value;
 import whorl.mechanics.motion.MotionRun;
 import whorl.syntax.Expr;
 import whorl.syntax.MotionLine;
+import whorl.syntax.Printer;
 import whorl.syntax.Statement;
 import whorl.units.Unit;
 import whorl.units.UnitCatalogue;
@@ -87,6 +89,8 @@ final class StepMaker {
       var motion = (Statement.Motion) statement;
       return new Step.Ran(
           place, motion, given(statement, ran.checked()), followed(motion, ran), standing);
+    } else if (result instanceof Result.Sketched sketched) {
+      return new Step.Sketched(place, (Statement.Sketch) statement, depicted(sketched), standing);
     }
     var valued = (Result.Valued) result;
     Quantity gives = Quantities.of(node, valued);
@@ -139,6 +143,19 @@ final class StepMaker {
         .map(
             state ->
                 new Followed.Balance(equation, state.balance() == MotionPlan.Balance.SAME_MATTER));
+  }
+
+  private static List<Depicted> depicted(Result.Sketched sketched) {
+    var depicted = new ArrayList<Depicted>();
+    for (int i = 0; i < sketched.values().size(); i++) {
+      Checked.Drawn drawn = sketched.checked().things().get(i);
+      depicted.add(
+          new Depicted(
+              Printer.expression(drawn.text()),
+              Quantities.of(drawn.formula(), sketched.values().get(i)),
+              sketched.at().get(i)));
+    }
+    return depicted;
   }
 
   private List<Given> given(Statement statement, Checked checked) {

@@ -39,7 +39,6 @@ class CardTest {
           "solve n between 1 and 2 so that n = 1",
           "vary n from 1 to 2 by 1: n",
           "plot n against n from 1 to 2",
-          "sketch r",
           "spread n",
           "review");
 

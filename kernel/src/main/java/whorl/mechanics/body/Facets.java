@@ -53,8 +53,8 @@ public final class Facets {
   }
 
   /**
-   * Whether this closed surface goes round a point: a ray from it leaves the surface once more often
-   * than it enters. The ray has a direction in which no edge of a shape is likely to run.
+   * Whether this closed surface goes round a point: a ray from it leaves the surface once more
+   * often than it enters. The ray has a direction in which no edge of a shape is likely to run.
    */
   boolean surrounds(Vector3D point) {
     int leaving = 0;
@@ -91,7 +91,9 @@ public final class Facets {
     return u >= 0 && v >= 0 && u + v < 1 ? (through > 0 ? 1 : -1) : 0;
   }
 
-  /** The surface with each vertex moved inwards, by at least a distance from each of its triangles. */
+  /**
+   * The surface with each vertex moved inwards, by at least a distance from each of its triangles.
+   */
   Facets inset(double distance) {
     Vector3D[] normals = new Vector3D[triangles()];
     Vector3D[] sums = new Vector3D[vertices()];

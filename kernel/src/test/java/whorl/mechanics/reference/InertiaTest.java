@@ -130,7 +130,8 @@ class InertiaTest {
 
   @Test
   void inertiasAreJoinedAboutOneAxisOnly() {
-    // A disc of 0.045 kg·m² about itself, 10 kg, 0.3 m off a shaft of 0.002 kg·m²: 0.947, not 0.047.
+    // A disc of 0.045 kg·m² about itself, 10 kg, 0.3 m off a shaft of 0.002 kg·m²: 0.947, not
+    // 0.047.
     Axis own = new Axis(Point.fixed(0.3, 0, 0), Vector3D.PLUS_K);
     AxialInertia disc = new AxialInertia(0.045, own);
     AxialInertia shaft = new AxialInertia(0.002, Z);
