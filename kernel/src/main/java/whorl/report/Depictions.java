@@ -63,26 +63,35 @@ final class Depictions {
         : (Point) thing.content();
   }
 
-  /** The magnitude of a vector or a force with its unit; empty for another thing. */
+  /**
+   * The magnitude of a vector or a force with its unit, marked where it is rounded; empty for
+   * another thing.
+   */
   static String size(Quantity quantity) {
     if (quantity.value() instanceof Value.Vector v) {
-      double norm = vector(v).getNorm();
-      return Amounts.of(
-              new Quantity(
-                  new Value.Real(norm), quantity.unit(), quantity.chosen(), quantity.kind(), null))
-          .text();
+      return marked(
+          new Quantity(
+              new Value.Real(vector(v).getNorm()),
+              quantity.unit(),
+              quantity.chosen(),
+              quantity.kind(),
+              null));
     } else if (quantity.value() instanceof Value.Thing thing
         && thing.content() instanceof BoundForce force) {
-      return Amounts.of(
-              new Quantity(
-                  new Value.Real(force.force().getNorm()),
-                  UnitCatalogue.standard().usual(FORCE),
-                  false,
-                  FORCE.words(),
-                  null))
-          .text();
+      return marked(
+          new Quantity(
+              new Value.Real(force.force().getNorm()),
+              UnitCatalogue.standard().usual(FORCE),
+              false,
+              FORCE.words(),
+              null));
     }
     return "";
+  }
+
+  private static String marked(Quantity size) {
+    Amount amount = Amounts.of(size);
+    return amount.exact() ? amount.text() : amount.signed();
   }
 
   private static Vector3D vector(Value.Vector v) {
