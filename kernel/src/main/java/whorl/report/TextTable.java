@@ -14,7 +14,7 @@ final class TextTable implements Piece.Cases<String> {
   private static final int GAP = 2;
 
   /** What a column is never narrowed below, in the order of the heads. */
-  private static final int[] LEAST = {8, 22, 28, 22, 18};
+  private static final int[] LEAST = {8, 22, 28, 24, 18};
 
   private TextTable() {}
 

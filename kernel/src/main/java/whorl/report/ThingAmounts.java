@@ -143,7 +143,7 @@ final class ThingAmounts {
       rows.add(
           figures.subList(3 * i, 3 * i + 3).stream()
               .map(figure -> padded(figure.significand(), width))
-              .collect(Collectors.joining(DIGIT_SPACE + DIGIT_SPACE)));
+              .collect(Collectors.joining(DIGIT_SPACE)));
     }
     return rows;
   }
