@@ -1,5 +1,6 @@
 package whorl.assist;
 
+import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -116,6 +117,11 @@ final class DraftSheet implements Scope {
     return Optional.ofNullable(checked.get(name))
         .or(() -> Optional.ofNullable(standIns.get(name)))
         .or(() -> sheet.meaning(name));
+  }
+
+  @Override
+  public Path folder() {
+    return sheet.folder();
   }
 
   /** Messages are not worded here, so no names are needed to suggest. */

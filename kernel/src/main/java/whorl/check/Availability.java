@@ -43,8 +43,6 @@ public final class Availability {
       return Optional.of(CheckMessages.notAvailable("A tolerance with ±", tolerance.span()));
     } else if (expr instanceof Expr.Call call && call.over() != null) {
       return Optional.of(CheckMessages.notAvailable("“over” a case set", call.span()));
-    } else if (expr instanceof Expr.Text text) {
-      return Optional.of(CheckMessages.textHasNoUse(text.span()));
     } else if (expr instanceof Expr.Call call
         && Vocabulary.isLater(call.function().name())
         && !defined.test(call.function().name())) {

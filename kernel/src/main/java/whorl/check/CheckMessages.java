@@ -41,13 +41,27 @@ final class CheckMessages {
         "Take it out, or put # in front of the line to keep it as a remark.");
   }
 
-  static Diagnostic textHasNoUse(Span span) {
-    return Diagnostic.of(
+  static CheckFailure textHasNoUse(Expr.Text text) {
+    return failure(
         "text",
         "A text in quotes stands where a number is needed.",
-        span,
-        "No function at hand in this version takes a text.",
+        text.span(),
+        "A text is the name of a file, and only laws that read one take it.",
         "");
+  }
+
+  static CheckFailure noFileName(Expr.Text name) {
+    return failure(
+        "file-name", "This is not the name of a file.", name.span(), "", "Check its characters.");
+  }
+
+  static CheckFailure fileOutside(Expr.Text name) {
+    return failure(
+        "file-outside",
+        "The file “" + name.value() + "” does not lie below the folder of the note.",
+        name.span(),
+        "A note reads only files that travel with it.",
+        "Copy the file into the folder of the note, and name it from there.");
   }
 
   /** What looks odd in a formula that is sound. */

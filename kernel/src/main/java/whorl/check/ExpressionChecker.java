@@ -1,5 +1,6 @@
 package whorl.check;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -50,6 +51,11 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   /** A checker over the same frame for what another statement writes and this one rests on. */
   ExpressionChecker outside() {
     return new ExpressionChecker(scope, List.of(), Locals.NONE, frame, false);
+  }
+
+  /** The folder of the note. */
+  Path folder() {
+    return scope.folder();
   }
 
   /** Whether an expression names a parameter, so that its value differs from call to call. */
@@ -428,7 +434,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed text(Expr.Text text) {
-    throw unavailable(text);
+    throw CheckMessages.textHasNoUse(text);
   }
 
   private static IllegalStateException unavailable(Expr expr) {

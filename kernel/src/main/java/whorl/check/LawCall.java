@@ -35,11 +35,17 @@ final class LawCall {
   Typed typed() {
     LawArguments given = meant();
     var arguments = new ArrayList<Operation.Argument>();
+    var files = new ArrayList<Operation.FileArgument>();
     Law law = given.law();
     for (int i = 0; i < law.parameters().size(); i++) {
-      argument(given, i).ifPresent(arguments::add);
+      if (law.parameters().get(i).sort() instanceof Sort.File) {
+        files.add(file(given, i));
+      } else {
+        argument(given, i).ifPresent(arguments::add);
+      }
     }
-    Typed result = Space.used(call.span(), new Operation.Use(law, arguments), law.result().sort());
+    var use = new Operation.Use(law, arguments, files);
+    Typed result = Space.used(call.span(), use, law.result().sort());
     return result.about(reference(given));
   }
 
@@ -104,7 +110,8 @@ final class LawCall {
 
   private boolean fits(LawArguments given, int index) {
     Sort sort = given.law().parameters().get(index).sort();
-    return given.values(index).stream().allMatch(value -> fits(sort, typed(given, value)));
+    return sort instanceof Sort.File
+        || given.values(index).stream().allMatch(value -> fits(sort, typed(given, value)));
   }
 
   /** Whether what is given is a number, a vector or a thing as is wanted, of whatever kind. */
@@ -155,6 +162,17 @@ final class LawCall {
 
   private Typed check(LawArguments given, int index) {
     return typed(given, given.values(index).get(0));
+  }
+
+  /** A file, which must be given by its name and lie below the folder of the note. */
+  private Operation.FileArgument file(LawArguments given, int index) {
+    Expr value = given.values(index).get(0);
+    if (!(value instanceof Expr.Text text)) {
+      throw LawMessages.wrongCharacter(
+          value, typed(given, value), given.law().parameters().get(index), laws);
+    }
+    return new Operation.FileArgument(
+        text.span(), index, new NoteFiles(checker.folder()).named(text));
   }
 
   private Optional<Operation.Argument> argument(LawArguments given, int index) {

@@ -34,6 +34,14 @@ public final class Mentions {
                 : Optional.empty());
   }
 
+  /** Whether a text in quotes, such as the name of a file, stands in a statement. */
+  public static boolean ofText(Statement statement) {
+    return first(
+            statement,
+            expr -> expr instanceof Expr.Text text ? Optional.of(text.span()) : Optional.empty())
+        .isPresent();
+  }
+
   private static Optional<Span> first(Statement statement, Seeker seeker) {
     var found = new ArrayList<Span>();
     for (Expr root : Expressions.of(statement)) {

@@ -1,5 +1,6 @@
 package whorl.check;
 
+import java.nio.file.Path;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
@@ -618,13 +619,23 @@ public sealed interface Operation {
    *
    * @param rule whose work gives what the operation around it gives
    * @param arguments in the order in which they are worked out; what is not given is left out
+   * @param files what is given by the names of files
    */
-  record Use(Rule rule, List<Argument> arguments) {
+  record Use(Rule rule, List<Argument> arguments, List<FileArgument> files) {
     /** Copies the arguments. */
     public Use {
       arguments = List.copyOf(arguments);
+      files = List.copyOf(files);
+    }
+
+    /** A use without files. */
+    public Use(Rule rule, List<Argument> arguments) {
+      this(rule, arguments, List.of());
     }
   }
+
+  /** A file that goes into a use of a rule. */
+  record FileArgument(Span span, int parameter, Path file) {}
 
   /** A rule that gives a number. */
   record RealUse(Span span, Use use) implements Real {

@@ -162,6 +162,12 @@ public record PartOfThing(ThingSort of, String name, Sort gives, String meaning,
         thing(of, "centre", ThingSort.POINT, "its centre of mass", g -> body.apply(g).centre()),
         thing(
             of,
+            "datum",
+            ThingSort.POINT,
+            "origin of the coordinates that its shape is given in",
+            g -> body.apply(g).datum()),
+        thing(
+            of,
             "inertia",
             ThingSort.INERTIA,
             "its inertia tensor about its centre of mass",

@@ -1,7 +1,6 @@
 package whorl.check;
 
 import java.util.List;
-import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import whorl.diagnostic.Span;
 import whorl.laws.Rule;
@@ -172,8 +171,7 @@ final class Space {
     if (!servesAsFrame(where)) {
       throw SpaceMessages.notAFrame(inFrame, where);
     }
-    // Behind @ stands a name, and parameters are numbers: what serves as a frame depends on none.
-    Anchor anchor = Objects.requireNonNull(anchor(where, inFrame.frame()));
+    Anchor anchor = anchor(where, inFrame.frame());
     Operation frame = frame(where).operation();
     Span span = inFrame.span();
     if (what.type() instanceof Type.Vector) {

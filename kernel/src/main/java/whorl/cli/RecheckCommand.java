@@ -35,7 +35,7 @@ final class RecheckCommand implements Callable<Integer> {
   @Override
   public Integer call() throws NoteFileException {
     Note note = NoteFile.read(file);
-    NoteRun run = NoteRun.of(note, java ? JavaCells.RUN : JavaCells.REFUSED);
+    NoteRun run = NoteRun.of(note, java ? JavaCells.RUN : JavaCells.REFUSED, NoteFile.folder(file));
     var recheck = new Recheck(run);
     var out = spec.commandLine().getOut();
     recheck.differences().forEach(out::println);

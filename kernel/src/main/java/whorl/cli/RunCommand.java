@@ -69,7 +69,8 @@ final class RunCommand implements Callable<Integer> {
           "--out writes a notebook, so that its name must end in .ipynb: " + out);
     }
     Note note = set(NoteFile.read(file));
-    NoteRun run = NoteRun.of(note, noJava ? JavaCells.REFUSED : JavaCells.RUN);
+    NoteRun run =
+        NoteRun.of(note, noJava ? JavaCells.REFUSED : JavaCells.RUN, NoteFile.folder(file));
     String record = NoteRecord.text(run.record());
     PrintWriter printer = spec.commandLine().getOut();
     if (json != null && json.toString().equals(STANDARD_OUTPUT)) {

@@ -1,7 +1,9 @@
 package whorl.eval;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import whorl.check.Operation;
 import whorl.eval.NumericFailure.Reason;
@@ -18,8 +20,12 @@ import whorl.mechanics.Refusal;
  * @param site the use
  * @param rule the rule
  * @param arguments what goes in
+ * @param files files that go in
  */
-record UseCode(Site site, Rule rule, List<Argument> arguments) {
+record UseCode(Site site, Rule rule, List<Argument> arguments, List<File> files) {
+  /** A file that goes in for one parameter. */
+  record File(int parameter, Path path, Site site) {}
+
   /** What goes in for one parameter; several values for a parameter that takes a list. */
   record Argument(int parameter, List<Code> values, boolean list, Site site) {
     void give(Activation activation, Given given) {
@@ -49,7 +55,11 @@ record UseCode(Site site, Rule rule, List<Argument> arguments) {
                         argument.list(),
                         writer.site(argument.values().get(0).span())))
             .toList();
-    return new UseCode(site, use.rule(), arguments);
+    List<File> files =
+        use.files().stream()
+            .map(file -> new File(file.parameter(), file.file(), writer.site(file.span())))
+            .toList();
+    return new UseCode(site, use.rule(), arguments, files);
   }
 
   private static Vector3D vector3D(Value.Vector vector) {
@@ -100,6 +110,7 @@ record UseCode(Site site, Rule rule, List<Argument> arguments) {
     for (Argument argument : arguments) {
       argument.give(activation, given);
     }
+    files.forEach(file -> given.put(file.parameter(), file.path()));
     return given;
   }
 
@@ -115,9 +126,11 @@ record UseCode(Site site, Rule rule, List<Argument> arguments) {
   private NoValue refused(Refusal refusal) {
     int parameter = rule.parameterWords().indexOf(refusal.subject());
     Site place =
-        arguments.stream()
-            .filter(argument -> argument.parameter() == parameter)
-            .map(Argument::site)
+        Stream.concat(
+                arguments.stream()
+                    .filter(argument -> argument.parameter() == parameter)
+                    .map(Argument::site),
+                files.stream().filter(file -> file.parameter() == parameter).map(File::site))
             .findFirst()
             .orElse(site);
     return place.noValue(new NumericFailure.Refused(rule.name(), refusal.reason(), refusal.fix()));

@@ -1,5 +1,6 @@
 package whorl.laws;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -162,6 +163,12 @@ final class LawBuilder {
 
   Of<InertiaTensor> tensor(String word, String symbol, String explanation) {
     return thing(word, symbol, ThingSort.INERTIA, InertiaTensor.class, explanation);
+  }
+
+  /** A file below the folder of the note. */
+  Of<Path> file(String word, String explanation) {
+    int index = add(word, "", new Sort.File(), explanation, new Need.Required());
+    return given -> given.thing(index, Path.class);
   }
 
   /** As many bodies as are written. */

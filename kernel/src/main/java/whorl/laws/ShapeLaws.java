@@ -1,5 +1,8 @@
 package whorl.laws;
 
+import java.io.IOException;
+import java.nio.file.NoSuchFileException;
+import java.nio.file.Path;
 import java.util.List;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import org.apache.commons.math3.geometry.euclidean.twod.Vector2D;
@@ -10,6 +13,7 @@ import whorl.mechanics.body.Contour;
 import whorl.mechanics.body.Shape;
 import whorl.mechanics.body.Shapes;
 import whorl.mechanics.body.ThinShapes;
+import whorl.mechanics.body.mesh.Mesh;
 
 /** Shapes of the trade, each made into a body by its mass or its density. */
 final class ShapeLaws {
@@ -35,6 +39,7 @@ final class ShapeLaws {
         box(),
         ellipsoid(),
         torus(),
+        mesh(),
         prism(),
         revolved(),
         disc(),
@@ -211,6 +216,35 @@ final class ShapeLaws {
         "torus(diameter = 400 mm, section = 100 mm, mass = 8 kg).inertia.zz",
         "0.335 kg·m²",
         g -> Shapes.torus(diameter.in(g), section.in(g)));
+  }
+
+  private static Law mesh() {
+    var law = law("mesh", "body inside a closed mesh of triangles, from an STL or OBJ file");
+    var file = law.file("file", "the file, below the folder of the note");
+    var unit =
+        law.number(
+            "unit", "u", "length", "the unit of length of its numbers, as 1 mm; files state none");
+    return solid(
+        law.formula("V = ∫ dV, I = ρ ∫ (r² 1 − r rᵀ) dV, by the divergence theorem"),
+        "mesh(\"block.stl\", unit = 1 mm, density = 7850 kg/m³).inertia.zz",
+        "0.0021352 kg·m²",
+        g -> read(file.in(g), unit.in(g)));
+  }
+
+  private static Shape read(Path file, double unit) {
+    try {
+      return Mesh.read(file, unit).shape();
+    } catch (NoSuchFileException gone) {
+      throw new Refusal(
+          "file",
+          "There is no file “" + file.getFileName() + "” in its folder.",
+          "Check the name; the folder of the note and those below it are looked at.");
+    } catch (IOException unreadable) {
+      throw new Refusal(
+          "file",
+          "The file “" + file.getFileName() + "” cannot be read.",
+          "Check that it is a file and that it may be read.");
+    }
   }
 
   private static Law prism() {

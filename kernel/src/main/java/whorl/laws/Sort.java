@@ -51,6 +51,14 @@ public sealed interface Sort {
     }
   }
 
+  /** The name of a file below the folder of the note. */
+  record File() implements Sort {
+    @Override
+    public String withArticle() {
+      return "the name of a file in quotes";
+    }
+  }
+
   /** As many values of one sort as the author writes, at least one. */
   record Several(Sort of) implements Sort {
     @Override

@@ -75,4 +75,10 @@ public final class NoteFile {
     }
     return text;
   }
+
+  /** The folder in which a note lies. */
+  public static Path folder(Path file) {
+    Path parent = file.toAbsolutePath().getParent();
+    return parent == null ? file.toAbsolutePath() : parent;
+  }
 }

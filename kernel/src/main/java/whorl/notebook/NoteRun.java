@@ -1,6 +1,7 @@
 package whorl.notebook;
 
 import com.google.gson.JsonObject;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -22,9 +23,13 @@ public final class NoteRun {
     this.cells = List.copyOf(cells);
   }
 
-  /** Runs a note. */
-  public static NoteRun of(Note note, JavaCells java) {
-    try (var run = new Running(java)) {
+  /**
+   * Runs a note.
+   *
+   * @param folder in which the note lies: its statements read files below it
+   */
+  public static NoteRun of(Note note, JavaCells java, Path folder) {
+    try (var run = new Running(java, folder)) {
       note.cells().stream().filter(cell -> cell.kind().isCode()).forEach(run::run);
       return new NoteRun(run.cells());
     }

@@ -1,5 +1,6 @@
 package whorl.notebook;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
@@ -21,8 +22,8 @@ import whorl.sheet.Step;
 /** A note while it runs: its sheet, and Java beside it. */
 final class Running implements AutoCloseable {
   private final JavaCells allowed;
-  private final Sheet sheet = new Sheet();
-  private final JavaSide java = new JavaSide(SheetReading.of(sheet));
+  private final Sheet sheet;
+  private final JavaSide java;
   private final Printed printed = new Printed();
   private final Map<Cell, Ran> ran = new LinkedHashMap<>();
 
@@ -35,8 +36,10 @@ final class Running implements AutoCloseable {
     record Failed(Source source, List<Diagnostic> errors, String name) implements Ran {}
   }
 
-  Running(JavaCells allowed) {
+  Running(JavaCells allowed, Path folder) {
     this.allowed = allowed;
+    this.sheet = new Sheet(folder);
+    this.java = new JavaSide(SheetReading.of(sheet));
   }
 
   /** Runs a code cell. */

@@ -1,5 +1,6 @@
 package whorl.sheet;
 
+import java.nio.file.Path;
 import java.util.Collection;
 import java.util.Collections;
 import java.util.HashMap;
@@ -21,9 +22,18 @@ final class Contents {
   private final Map<CellId, CellContent> cells = new LinkedHashMap<>();
   private final Map<String, Set<CellId>> readAsUnit = new HashMap<>();
   private final Graph graph = new Graph();
-  private final Results results = Results.of(graph);
+  private final Results results;
   private Doubts doubts = Doubts.NONE;
   private SimilarNames near = new SimilarNames(graph.names());
+
+  /**
+   * Nothing yet.
+   *
+   * @param folder of the note, below which files are read
+   */
+  Contents(Path folder) {
+    results = Results.of(graph, folder);
+  }
 
   Graph graph() {
     return graph;

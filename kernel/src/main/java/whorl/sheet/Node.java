@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import whorl.check.FreeNames;
+import whorl.check.Mentions;
 import whorl.check.Routine;
 import whorl.diagnostic.Source;
 import whorl.diagnostic.Span;
@@ -80,12 +81,13 @@ final class Node {
    *
    * @param text its canonical text
    * @param routine what works out a published function
+   * @param files different for each statement that reads a file, which may have changed; else null
    */
-  record Said(String text, String remark, @Nullable Routine routine) {}
+  record Said(String text, String remark, @Nullable Routine routine, @Nullable Object files) {}
 
   /** What it says. */
   Said said() {
-    return new Said(text, statement.remark(), routine);
+    return new Said(text, statement.remark(), routine, Mentions.ofText(statement) ? this : null);
   }
 
   /** Whether it is a check or an assumption. */

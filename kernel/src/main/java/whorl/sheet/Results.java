@@ -1,5 +1,6 @@
 package whorl.sheet;
 
+import java.nio.file.Path;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.LinkedHashSet;
@@ -16,26 +17,28 @@ import whorl.laws.ThingSort;
 /** What the statements of a sheet came to, with the names that stand because of it. */
 final class Results implements Scope {
   private final Graph graph;
+  private final Path folder;
   private final Map<Node, Result> settled;
   private final Map<Node, Result> staged = new HashMap<>();
 
   /** The settled statements that use a law outside its validity: few, and asked for often. */
   private final Set<Node> settledLapsed;
 
-  private Results(Graph graph, Map<Node, Result> settled, Set<Node> settledLapsed) {
+  private Results(Graph graph, Path folder, Map<Node, Result> settled, Set<Node> settledLapsed) {
     this.graph = graph;
+    this.folder = folder;
     this.settled = settled;
     this.settledLapsed = settledLapsed;
   }
 
   /** No results yet. */
-  static Results of(Graph graph) {
-    return new Results(graph, new HashMap<>(), new LinkedHashSet<>());
+  static Results of(Graph graph, Path folder) {
+    return new Results(graph, folder, new HashMap<>(), new LinkedHashSet<>());
   }
 
   /** The same results, over which new ones can be staged without touching these. */
   Results staging() {
-    return new Results(graph, settled, settledLapsed);
+    return new Results(graph, folder, settled, settledLapsed);
   }
 
   void stage(Node node, Result result) {
@@ -111,6 +114,11 @@ final class Results implements Scope {
   @Override
   public Optional<Meaning> meaning(String name) {
     return of(name).map(Results::meaning);
+  }
+
+  @Override
+  public Path folder() {
+    return folder;
   }
 
   @Override

@@ -1,5 +1,6 @@
 package whorl.sheet;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -33,15 +34,24 @@ import whorl.syntax.Statement;
  * the thread's interrupt status cleared.
  */
 public final class Sheet {
-  private final Contents contents = new Contents();
-  private final Facts facts = new Facts(contents);
+  private final Contents contents;
+  private final Facts facts;
   private final LongSupplier clock;
   private Progress progress = Progress.UNWATCHED;
   private long evaluations;
 
-  /** An empty sheet. */
+  /** An empty sheet that reads files below the folder in which the program runs. */
   public Sheet() {
-    this(System::nanoTime);
+    this(Path.of(""));
+  }
+
+  /**
+   * An empty sheet.
+   *
+   * @param folder below which it reads files: that of its note
+   */
+  public Sheet(Path folder) {
+    this(folder, System::nanoTime);
   }
 
   /**
@@ -50,6 +60,12 @@ public final class Sheet {
    * @param clock gives nanoseconds
    */
   Sheet(LongSupplier clock) {
+    this(Path.of(""), clock);
+  }
+
+  private Sheet(Path folder, LongSupplier clock) {
+    this.contents = new Contents(folder);
+    this.facts = new Facts(contents);
     this.clock = clock;
   }
 

@@ -23,7 +23,7 @@ class DemoNotesTest {
   @ParameterizedTest
   @MethodSource("notes")
   void everythingInADemoNoteHoldsAndIsStored(Path file) throws NoteFileException {
-    NoteRun run = NoteRun.of(NoteFile.read(file), JavaCells.RUN);
+    NoteRun run = NoteRun.of(NoteFile.read(file), JavaCells.RUN, NoteFile.folder(file));
     Tally tally = Tally.of(run);
     assertFalse(tally.hasErrors() || tally.hasFailures(), tally::words);
     var recheck = new Recheck(run);

@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 
 import com.google.gson.JsonObject;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.StreamSupport;
 import org.junit.jupiter.api.Test;
@@ -58,7 +59,7 @@ class NoteRunTest {
 
   @Test
   void cellsInJavaAreErrorsWhereTheyAreRefused() throws NoteFileException {
-    NoteRun run = NoteRun.of(Notes.of("%%java\nint x;", "k = 1"), JavaCells.REFUSED);
+    NoteRun run = NoteRun.of(Notes.of("%%java\nint x;", "k = 1"), JavaCells.REFUSED, Path.of(""));
     assertEquals(
         List.of("Cells in Java are refused here."),
         run.cells().get(0).errors().stream().map(Diagnostic::problem).toList());

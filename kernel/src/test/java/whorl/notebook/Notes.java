@@ -1,6 +1,7 @@
 package whorl.notebook;
 
 import com.google.gson.JsonObject;
+import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.stream.Collectors;
 
@@ -30,6 +31,6 @@ final class Notes {
   }
 
   static NoteRun run(Note note) {
-    return NoteRun.of(note, JavaCells.RUN);
+    return NoteRun.of(note, JavaCells.RUN, Path.of(""));
   }
 }

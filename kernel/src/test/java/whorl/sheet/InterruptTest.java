@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -217,6 +218,11 @@ class InterruptTest {
             .get(0);
     Scope scope =
         new Scope() {
+          @Override
+          public Path folder() {
+            return Path.of("");
+          }
+
           @Override
           public Optional<Meaning> meaning(String name) {
             Thread.currentThread().interrupt();

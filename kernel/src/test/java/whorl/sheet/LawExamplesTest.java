@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -28,7 +29,7 @@ class LawExamplesTest {
         "check " + example.expression() + " = " + example.value() + " within " + example.within();
     String text =
         Stream.concat(example.lines().stream(), Stream.of(check)).collect(Collectors.joining("\n"));
-    var sheet = new Sheet();
+    var sheet = new Sheet(Path.of("src/test/resources/whorl/sheet/meshes"));
     CellOutcome outcome = sheet.run(new CellId("example"), "cell [1]", text);
     assertEquals(List.of(), outcome.errors(), text);
     Step last = outcome.steps().get(outcome.steps().size() - 1);
