@@ -50,7 +50,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   /** A checker over the same frame for what another statement writes and this one rests on. */
   ExpressionChecker outside() {
-    return new ExpressionChecker(scope, List.of(), Locals.NONE, frame, false);
+    return new ExpressionChecker(scope, List.of(), locals, frame, false);
   }
 
   /** The folder of the note. */
@@ -58,13 +58,14 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
     return scope.folder();
   }
 
-  /** Whether an expression names a parameter, so that its value differs from call to call. */
+  /** Whether an expression names a parameter or a state, so that its value is not always one. */
   boolean namesParameter(Expr expr) {
     var found = new ArrayList<Expr>();
     Expressions.walk(
         expr,
         part -> {
-          if (part instanceof Expr.Name name && isLocal(name)) {
+          if (part instanceof Expr.Name name
+              && local(name).filter(typed -> !(typed.type() instanceof Type.Thing)).isPresent()) {
             found.add(part);
           }
         });
@@ -390,7 +391,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed part(Expr.Part part) {
-    Optional<Typed> column = courses().part(part);
+    Optional<Typed> column = locals.part(part).or(() -> courses().part(part));
     if (column.isPresent()) {
       return column.get();
     }

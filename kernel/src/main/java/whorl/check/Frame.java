@@ -35,7 +35,7 @@ final class Frame {
 
   /** Room for a value that is no name of the sheet: a state or a local of a motion. */
   int reserve(Type type) {
-    int slot = size.numbers();
+    int slot = type.slots().things() > 0 ? size.things() : size.numbers();
     size = size.plus(type.slots());
     return slot;
   }

@@ -9,6 +9,11 @@ interface Locals {
   /** What a name stands for, or empty where it is no local one. */
   Optional<Typed> value(Expr.Name name);
 
+  /** A part of what a local name stands for that only it has, or empty. */
+  default Optional<Typed> part(Expr.Part part) {
+    return Optional.empty();
+  }
+
   /** The unit that the author chose for it, if any. */
   Optional<Unit> unit(String name);
 

@@ -28,14 +28,18 @@ final class MotionChecker implements Locals {
   private final Statement.Motion motion;
   private final Frame frame = new Frame(0);
   private final ExpressionChecker checker;
+  private final ExpressionChecker fromSheet;
   private final Map<String, State> states = new LinkedHashMap<>();
   private final Map<String, Local> locals = new LinkedHashMap<>();
   private final List<MotionPlan.Computed> computed = new ArrayList<>();
+  private final @Nullable RigidChecker rigid;
 
   MotionChecker(Scope scope, Statement.Motion motion) {
     this.scope = scope;
     this.motion = motion;
     this.checker = new ExpressionChecker(scope, this, frame);
+    this.fromSheet = new ExpressionChecker(scope, new NoLocals(), frame);
+    this.rigid = RigidChecker.of(scope, frame, fromSheet, motion).orElse(null);
   }
 
   /** A state, while its lines are brought together. */
@@ -98,13 +102,15 @@ final class MotionChecker implements Locals {
         state.integrated = frame.reserve(state.start.type());
       }
     }
-    if (states.isEmpty()) {
+    if (states.isEmpty() && rigid == null) {
       throw MotionMessages.empty(motion);
     }
     locals.values().forEach(this::settle);
     states.values().forEach(this::settle);
     List<MotionPlan.State> planned = states.values().stream().map(this::planned).toList();
-    var plan = new MotionPlan(planned, computed, stop(), limit(), checker.choices(), columns());
+    Operation.Truth stop = stop();
+    RigidPlan body = rigid == null ? null : rigid.plan(checker, motion.lines());
+    var plan = new MotionPlan(planned, computed, stop, limit(), checker.choices(), columns(), body);
     String over = checker.over();
     if (over != null) {
       throw MotionMessages.courseInMotion(motion.name(), over);
@@ -115,7 +121,6 @@ final class MotionChecker implements Locals {
   // Lines
 
   private void starts() {
-    var fromSheet = new ExpressionChecker(scope, new NoLocals(), frame);
     var names = new HashSet<String>();
     for (MotionLine line : motion.lines()) {
       Expr.Name name = named(line);
@@ -248,7 +253,6 @@ final class MotionChecker implements Locals {
 
   private Operation.Real limit() {
     Operation.Real limit = null;
-    var fromSheet = new ExpressionChecker(scope, new NoLocals(), frame);
     for (MotionLine line : motion.lines()) {
       if (line instanceof MotionLine.Limit within) {
         if (limit != null) {
@@ -433,6 +437,9 @@ final class MotionChecker implements Locals {
 
   private List<MotionPlan.Column> columns() {
     var columns = new ArrayList<MotionPlan.Column>();
+    if (rigid != null) {
+      columns.addAll(rigid.planColumns());
+    }
     for (MotionLine line : motion.lines()) {
       if (line instanceof MotionLine.Start start) {
         State state = states.get(start.state().name());
@@ -458,7 +465,15 @@ final class MotionChecker implements Locals {
   // Names of the motion
 
   @Override
+  public Optional<Typed> part(Expr.Part part) {
+    return rigid == null ? Optional.empty() : rigid.part(part);
+  }
+
+  @Override
   public Optional<Typed> value(Expr.Name name) {
+    if (rigid != null && name.name().equals(rigid.name())) {
+      return Optional.of(rigid.moving(name));
+    }
     State state = states.get(name.name());
     if (state != null) {
       settle(state);

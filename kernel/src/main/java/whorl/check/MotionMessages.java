@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.stream.Collectors;
 import whorl.diagnostic.Diagnostic;
 import whorl.diagnostic.Span;
+import whorl.laws.ThingSort;
 import whorl.syntax.Expr;
 import whorl.syntax.MotionLine;
 import whorl.syntax.Printer;
@@ -332,6 +333,113 @@ final class MotionMessages {
         start.value().span(),
         "",
         "");
+  }
+
+  // Rigid bodies.
+
+  static CheckFailure notABody(Expr.Name name) {
+    return failure(
+        "not-a-body",
+        "`" + name.name() + "` is no body.",
+        name.span(),
+        "A motion follows a body by its mass, its centre of mass and its inertia.",
+        "Make one, such as "
+            + name.name()
+            + " = solid_cylinder(diameter = …, length = …, mass = …)");
+  }
+
+  static CheckFailure notAPoint(Expr about, Typed found) {
+    boolean isAxis =
+        found.operation() instanceof Operation.Thing thing && thing.sort() == ThingSort.AXIS;
+    return failure(
+        "not-a-point",
+        isAxis
+            ? "A body is followed about a point, but `" + text(about) + "` is an axis."
+            : "A body is followed about a point, but `" + text(about) + "` is none.",
+        about.span(),
+        "",
+        isAxis
+            ? "About a fixed axis the motion has one angle: make it a state, with I * ω' = T and"
+                + " I = inertia(…, about = "
+                + text(about)
+                + ")."
+            : "Give the pivot, or the centre of mass of the body where it is free: wheel.centre.");
+  }
+
+  static CheckFailure noBody(MotionLine.Attitude attitude) {
+    String body = attitude.body().name();
+    return failure(
+        "no-body",
+        body + " starts with a spin or a turn, but this motion does not follow it as a body.",
+        attitude.span(),
+        "",
+        "Add a line such as: body " + body + " about " + body + ".centre");
+  }
+
+  static CheckFailure loadOnNothing(MotionLine.Load load) {
+    return failure(
+        "load-on-nothing",
+        "A load acts on a body, but this motion follows none.",
+        load.span(),
+        "",
+        "Add a line such as: body wheel about A");
+  }
+
+  static CheckFailure angleNeeded(Expr expr, Typed found) {
+    return failure(
+        "angle-needed",
+        "A body is turned by an angle, but `"
+            + text(expr)
+            + "` is "
+            + found.operand().readings().withArticle()
+            + ".",
+        expr.span(),
+        "",
+        "Write it with its unit, such as 60 deg.");
+  }
+
+  static CheckFailure axisNeeded(Expr expr) {
+    return failure(
+        "axis-needed",
+        "A body is turned about an axis or a direction, but `" + text(expr) + "` is neither.",
+        expr.span(),
+        "",
+        "Write a direction, such as (1, 0, 0).");
+  }
+
+  static CheckFailure spinNeeded(Expr expr, Typed found) {
+    boolean isNumber = found.type() instanceof Type.Real;
+    return failure(
+        "spin-needed",
+        "A body starts with the vector of its angular velocity, but `"
+            + text(expr)
+            + "` is "
+            + (isNumber ? "a number." : "none."),
+        expr.span(),
+        "",
+        isNumber
+            ? "Give its direction too, such as (0, 0, " + text(expr) + ") @ wheel."
+            : "Write it with its unit, such as (0, 0, 120) rad/s @ wheel.");
+  }
+
+  static CheckFailure forceWithoutPoint(Expr value) {
+    return failure(
+        "force-without-point",
+        "Nothing says where the force `" + text(value) + "` acts.",
+        value.span(),
+        "Its moment depends on that.",
+        "Write force(" + text(value) + ", at = …).");
+  }
+
+  static CheckFailure notALoad(Expr value) {
+    return failure(
+        "not-a-load",
+        "A load is a force with the point where it acts, or a moment; `"
+            + text(value)
+            + "` is neither.",
+        value.span(),
+        "",
+        "Such as weight(wheel), force(F, at = A), or the vector of a moment in N·m.");
   }
 
   static CheckFailure reservedColumn(Expr.Name name) {

@@ -14,6 +14,7 @@ import org.jspecify.annotations.Nullable;
  * @param limit longest time to follow it
  * @param jumps conditions at whose turning a rate may jump
  * @param columns its courses, in the order in which they are shown
+ * @param rigid the rigid body that it follows; null where there is none
  */
 public record MotionPlan(
     List<State> states,
@@ -21,7 +22,8 @@ public record MotionPlan(
     Operation.@Nullable Truth stop,
     Operation.Real limit,
     List<Operation.Truth> jumps,
-    List<Column> columns) {
+    List<Column> columns,
+    @Nullable RigidPlan rigid) {
   /** Copies the lists. */
   public MotionPlan {
     states = List.copyOf(states);

@@ -1,35 +1,35 @@
 package whorl.eval;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 import whorl.check.MotionPlan;
 import whorl.check.Operation;
+import whorl.check.RigidPlan;
 import whorl.check.Type;
 import whorl.mechanics.motion.Condition;
 import whorl.mechanics.motion.Motion;
 import whorl.mechanics.motion.MotionFailure;
 import whorl.mechanics.motion.MotionRun;
 import whorl.mechanics.motion.NoRate;
+import whorl.mechanics.motion.RigidMotion;
 
 /**
  * Follows a checked motion. All its formulas are made ready once and work over one frame of
- * numbers; nothing is allocated from step to step but what the integrator keeps.
+ * numbers.
  */
 public final class MotionEvaluator {
   /** Operations in functions of the sheet allowed in one run: about ten seconds of work. */
   private static final long MOST_OPERATIONS = 10 * ScalarEvaluator.MOST_OPERATIONS;
 
   private final MotionPlan plan;
-  private final double[] frame;
-  private final Object[] things;
+  private final MotionFrame frame;
   private final Meter meter;
-  private final Procedure[] procedures;
-  private final Activation[] activations;
-  private final List<Operation> formulas = new ArrayList<>();
 
   private final int[] starts;
   private final int[] computed;
@@ -38,57 +38,56 @@ public final class MotionEvaluator {
   private final int limit;
   private final @Nullable Truths stop;
   private final List<Truths> jumps;
+  private final @Nullable RigidPart rigid;
+
+  /** Numbers that the states take, without those of a rigid body behind them. */
   private final int size;
 
-  private MotionEvaluator(MotionPlan plan, double[] given, Object[] things, long mostOperations) {
+  private MotionEvaluator(MotionPlan plan, double[] numbers, Object[] things, long mostOperations) {
     this.plan = plan;
-    this.frame = given.clone();
-    this.things = things.clone();
+    this.frame = new MotionFrame(numbers, things);
     List<MotionPlan.State> states = plan.states();
-    starts = states.stream().mapToInt(state -> formula(state.start())).toArray();
-    computed = plan.computed().stream().mapToInt(one -> formula(one.value())).toArray();
-    rates = states.stream().mapToInt(state -> formula(state.rate())).toArray();
+    starts = states.stream().mapToInt(state -> frame.formula(state.start())).toArray();
+    computed = plan.computed().stream().mapToInt(one -> frame.formula(one.value())).toArray();
+    rates = states.stream().mapToInt(state -> frame.formula(state.rate())).toArray();
     weights =
         states.stream()
             .mapToInt(
                 state -> {
                   Operation.Real weight = state.weight();
-                  return weight == null ? -1 : formula(weight);
+                  return weight == null ? -1 : frame.formula(weight);
                 })
             .toArray();
-    limit = formula(plan.limit());
+    limit = frame.formula(plan.limit());
     Operation.Truth condition = plan.stop();
     stop = condition == null ? null : new Truths(condition);
     jumps = plan.jumps().stream().map(Truths::new).toList();
+    RigidPlan body = plan.rigid();
+    rigid = body == null ? null : new RigidPart(body, frame);
     size = states.stream().mapToInt(state -> width(state.type())).sum();
     meter = new Meter(new Site(plan.limit().span(), ""), mostOperations);
-    procedures = new CodeWriter().write(formulas);
-    activations = new Activation[formulas.size()];
-    for (int i = 0; i < activations.length; i++) {
-      activations[i] = Activation.of(procedures, i, frame, this.things, meter);
-    }
+    frame.ready(meter);
   }
 
   /**
    * Follows a motion.
    *
-   * @param frame what it reads from the sheet, by slot
+   * @param numbers what it reads from the sheet, by slot
    * @param things the things that it reads, by slot
    */
-  public static MotionOutcome evaluate(MotionPlan plan, double[] frame, Object... things) {
+  public static MotionOutcome evaluate(MotionPlan plan, double[] numbers, Object... things) {
     MotionEvaluator evaluator;
     try {
-      evaluator = new MotionEvaluator(plan, frame, things, MOST_OPERATIONS);
+      evaluator = new MotionEvaluator(plan, numbers, things, MOST_OPERATIONS);
     } catch (NoValue none) {
-      return new MotionOutcome.Failed(
-          MotionOutcome.Obstacle.NO_VALUE, 0, List.of(), -1, none.failure());
+      return withoutValue(none);
     }
     return evaluator.follow();
   }
 
-  private int formula(Operation operation) {
-    formulas.add(operation);
-    return formulas.size() - 1;
+  private static MotionOutcome withoutValue(NoValue none) {
+    return new MotionOutcome.Failed(
+        MotionOutcome.Obstacle.NO_VALUE, 0, List.of(), -1, none.failure());
   }
 
   private static int width(Type type) {
@@ -97,25 +96,45 @@ public final class MotionEvaluator {
 
   private MotionOutcome follow() {
     try {
-      double time = real(limit);
+      double time = frame.real(limit);
       if (!(time > 0)) {
-        return failed(MotionOutcome.Obstacle.LIMIT, 0, List.of(), -1, null);
+        return new MotionOutcome.Failed(MotionOutcome.Obstacle.LIMIT, 0, List.of(), -1, null);
       }
-      double[] start = start();
-      Motion motion =
-          Motion.of(this::rates, start, time)
-              .inGroups(plan.states().stream().mapToInt(state -> width(state.type())).toArray())
-              .jumpingAt(List.copyOf(jumps))
-              .polling(meter::look);
-      MotionRun run = (stop == null ? motion : motion.stopWhen(stop)).run();
-      var ran = new Run(run, columns(run));
-      run.visit((at, state) -> visible(state));
+      RigidMotion body = rigid == null ? null : rigid.begin(time);
+      MotionRun run =
+          body != null && plan.states().isEmpty() && jumps.isEmpty() && body.isConservative()
+              ? run(body)
+              : run(body, time);
+      var ran = new Run(run, columns(run, time));
+      run.visit((at, state) -> show(state));
       return new MotionOutcome.Ran(ran, meter.breaches());
     } catch (NoValue none) {
-      return failed(MotionOutcome.Obstacle.NO_VALUE, 0, List.of(), -1, none.failure());
+      return withoutValue(none);
     } catch (MotionFailure failure) {
       return failed(failure);
     }
+  }
+
+  private MotionRun run(RigidMotion body) {
+    RigidMotion polled = body.polling(meter::look);
+    return (stop == null ? polled : polled.stopWhen(stop)).run();
+  }
+
+  private MotionRun run(@Nullable RigidMotion body, double time) {
+    double[] start = start();
+    IntStream groups = plan.states().stream().mapToInt(state -> width(state.type()));
+    if (body != null) {
+      double[] ofBody = body.start();
+      start = Arrays.copyOf(start, size + ofBody.length);
+      System.arraycopy(ofBody, 0, start, size, ofBody.length);
+      groups = IntStream.concat(groups, Arrays.stream(body.groups()));
+    }
+    Motion motion =
+        Motion.of(this::rates, start, time)
+            .inGroups(groups.toArray())
+            .jumpingAt(List.copyOf(jumps))
+            .polling(meter::look);
+    return (stop == null ? motion : motion.stopWhen(stop)).run();
   }
 
   private MotionOutcome failed(MotionFailure failure) {
@@ -131,34 +150,26 @@ public final class MotionEvaluator {
       obstacle = MotionOutcome.Obstacle.RUNAWAY;
     }
     var states = new ArrayList<Value>();
-    double[] state = failure.state();
     try {
-      visible(state);
+      show(failure.state());
       for (MotionPlan.State one : plan.states()) {
         states.add(valueAt(one.slot(), one.type()));
       }
     } catch (NoValue none) {
       states.clear();
     }
-    return failed(obstacle, failure.time(), states, stateAt(failure.index()), cause);
-  }
-
-  private static MotionOutcome failed(
-      MotionOutcome.Obstacle obstacle,
-      double time,
-      List<Value> states,
-      int state,
-      @Nullable NumericFailure failure) {
-    return new MotionOutcome.Failed(obstacle, time, states, state, failure);
+    return new MotionOutcome.Failed(
+        obstacle, failure.time(), states, stateAt(failure.index()), cause);
   }
 
   private Value valueAt(int slot, Type type) {
+    double[] numbers = frame.numbers();
     return type instanceof Type.Vector
-        ? new Value.Vector(frame[slot], frame[slot + 1], frame[slot + 2])
-        : new Value.Real(frame[slot]);
+        ? new Value.Vector(numbers[slot], numbers[slot + 1], numbers[slot + 2])
+        : new Value.Real(numbers[slot]);
   }
 
-  /** The state that a place of what is integrated belongs to. */
+  /** The state that a place of what is integrated belongs to, or −1 for a rigid body. */
   private int stateAt(int index) {
     int end = 0;
     for (int i = 0; i < plan.states().size(); i++) {
@@ -170,87 +181,78 @@ public final class MotionEvaluator {
     return -1;
   }
 
-  /** What is integrated, at the start. */
+  /** What is integrated of the states, at the start. */
   private double[] start() {
     for (int i = 0; i < starts.length; i++) {
-      put(starts[i], plan.states().get(i).slot());
+      frame.store(starts[i], plan.states().get(i).slot());
     }
     for (int i = 0; i < computed.length; i++) {
       int slot = plan.computed().get(i).slot();
       Optional<MotionPlan.State> product =
           plan.states().stream().filter(one -> one.ofProduct() && one.slot() == slot).findFirst();
       if (product.isEmpty()) {
-        put(computed[i], slot);
+        frame.store(computed[i], slot);
       } else {
-        multiply(product.get(), real(weights[plan.states().indexOf(product.get())]));
+        multiply(product.get(), frame.real(weights[plan.states().indexOf(product.get())]));
       }
     }
     double[] start = new double[size];
     int place = 0;
     for (MotionPlan.State state : plan.states()) {
       int width = width(state.type());
-      System.arraycopy(frame, state.integrated(), start, place, width);
+      System.arraycopy(frame.numbers(), state.integrated(), start, place, width);
       place += width;
     }
     return start;
   }
 
   private void multiply(MotionPlan.State state, double weight) {
+    double[] numbers = frame.numbers();
     for (int k = 0; k < width(state.type()); k++) {
-      frame[state.integrated() + k] = weight * frame[state.slot() + k];
-    }
-  }
-
-  private double real(int formula) {
-    return ((Code.Real) procedures[formula].code()).in(activations[formula]);
-  }
-
-  private void put(int formula, int slot) {
-    Code code = procedures[formula].code();
-    Activation activation = activations[formula];
-    if (code instanceof Code.Real real) {
-      frame[slot] = real.in(activation);
-    } else if (code instanceof Code.Vector vector) {
-      Value.Vector value = vector.in(activation);
-      frame[slot] = value.x();
-      frame[slot + 1] = value.y();
-      frame[slot + 2] = value.z();
-    } else {
-      frame[slot] = ((Code.Truth) code).in(activation) ? 1 : 0;
+      numbers[state.integrated() + k] = weight * numbers[state.slot() + k];
     }
   }
 
   /** Puts the states and all that follows from them into the frame. */
-  private void visible(double[] state) {
+  private void show(double[] state) {
     int place = 0;
     for (MotionPlan.State one : plan.states()) {
       int width = width(one.type());
-      System.arraycopy(state, place, frame, one.integrated(), width);
+      System.arraycopy(state, place, frame.numbers(), one.integrated(), width);
       place += width;
     }
+    if (rigid != null) {
+      rigid.show(ofBody(state));
+    }
     for (int i = 0; i < computed.length; i++) {
-      put(computed[i], plan.computed().get(i).slot());
+      frame.store(computed[i], plan.computed().get(i).slot());
     }
   }
 
+  private double[] ofBody(double[] state) {
+    return size == 0 ? state : Arrays.copyOfRange(state, size, state.length);
+  }
+
   private void rates(double time, double[] state, double[] into) {
-    int at = 0;
     int place = 0;
     try {
-      visible(state);
-      for (; at < rates.length; at++) {
-        MotionPlan.State one = plan.states().get(at);
-        double weight = one.ofProduct() || weights[at] < 0 ? 1 : real(weights[at]);
-        Code code = procedures[rates[at]].code();
-        if (code instanceof Code.Vector vector) {
-          Value.Vector value = vector.in(activations[rates[at]]);
-          into[place] = value.x() / weight;
-          into[place + 1] = value.y() / weight;
-          into[place + 2] = value.z() / weight;
-        } else {
-          into[place] = real(rates[at]) / weight;
+      show(state);
+      for (int i = 0; i < rates.length; i++) {
+        MotionPlan.State one = plan.states().get(i);
+        int width = width(one.type());
+        frame.store(rates[i], into, place);
+        if (!one.ofProduct() && weights[i] >= 0) {
+          double weight = frame.real(weights[i]);
+          for (int k = 0; k < width; k++) {
+            into[place + k] /= weight;
+          }
         }
-        place += width(one.type());
+        place += width;
+      }
+      if (rigid != null) {
+        double[] ofBody = new double[state.length - size];
+        rigid.rates(time, ofBody(state), ofBody);
+        System.arraycopy(ofBody, 0, into, size, ofBody.length);
       }
     } catch (NoValue none) {
       throw noRate(none, place);
@@ -265,9 +267,12 @@ public final class MotionEvaluator {
     };
   }
 
-  private Map<String, Course> columns(MotionRun run) {
+  private Map<String, Course> columns(MotionRun run, double time) {
     // Courses are read long after the run, by any number of threads, one at a time.
-    var reader = new MotionEvaluator(plan, frame, things, Long.MAX_VALUE / 2);
+    var reader = new MotionEvaluator(plan, frame.numbers(), frame.things(), Long.MAX_VALUE / 2);
+    if (reader.rigid != null) {
+      reader.rigid.begin(time);
+    }
     var columns = new LinkedHashMap<String, Course>();
     for (MotionPlan.Column column : plan.columns()) {
       int width = width(column.quantity().type());
@@ -287,8 +292,8 @@ public final class MotionEvaluator {
     }
     return (time, state, into, slot) -> {
       synchronized (this) {
-        visible(state);
-        System.arraycopy(frame, column.slot(), into, slot, width);
+        show(state);
+        System.arraycopy(frame.numbers(), column.slot(), into, slot, width);
       }
     };
   }
@@ -299,14 +304,14 @@ public final class MotionEvaluator {
     private final Margin margin;
 
     Truths(Operation.Truth condition) {
-      this.whole = formula(condition);
+      this.whole = frame.formula(condition);
       this.margin = marginOf(condition);
     }
 
     @Override
     public double margin(double time, double[] state) {
       try {
-        visible(state);
+        show(state);
         return margin.now();
       } catch (NoValue none) {
         return holds(time, state) ? 1 : -1;
@@ -316,8 +321,8 @@ public final class MotionEvaluator {
     @Override
     public boolean holds(double time, double[] state) {
       try {
-        visible(state);
-        return ((Code.Truth) procedures[whole].code()).in(activations[whole]);
+        show(state);
+        return frame.truth(whole);
       } catch (NoValue none) {
         throw noRate(none, -1);
       }
@@ -332,14 +337,15 @@ public final class MotionEvaluator {
 
   private Margin marginOf(Operation.Truth condition) {
     if (condition instanceof Operation.Comparison comparison) {
-      int left = formula(comparison.left());
-      int right = formula(comparison.right());
+      int left = frame.formula(comparison.left());
+      int right = frame.formula(comparison.right());
       boolean upward =
           switch (comparison.relation()) {
             case LESS, AT_MOST -> false;
             case MORE, AT_LEAST -> true;
           };
-      return () -> upward ? real(left) - real(right) : real(right) - real(left);
+      return () ->
+          upward ? frame.real(left) - frame.real(right) : frame.real(right) - frame.real(left);
     } else if (condition instanceof Operation.AllOf all) {
       List<Margin> margins = all.conditions().stream().map(this::marginOf).toList();
       return () -> margins.stream().mapToDouble(Margin::now).min().orElse(1);
@@ -347,7 +353,7 @@ public final class MotionEvaluator {
       List<Margin> margins = any.conditions().stream().map(this::marginOf).toList();
       return () -> margins.stream().mapToDouble(Margin::now).max().orElse(-1);
     }
-    int plain = formula(condition);
-    return () -> ((Code.Truth) procedures[plain].code()).in(activations[plain]) ? 1 : -1;
+    int plain = frame.formula(condition);
+    return () -> frame.truth(plain) ? 1 : -1;
   }
 }

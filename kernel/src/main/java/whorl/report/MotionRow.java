@@ -53,8 +53,14 @@ final class MotionRow {
     return lines;
   }
 
+  /** A small fraction to one digit: {@code 4×10⁻¹⁴}. */
   private static String kept(double relative) {
-    return Figures.of(relative, 1).text();
+    int order = (int) Math.floor(Math.log10(relative));
+    long digit = Math.round(relative / Math.pow(10, order));
+    return (digit == 10 ? 1 : digit)
+        + "×10"
+        + Superscript.of(digit == 10 ? order + 1 : order)
+        + " of its size";
   }
 
   private String ending() {

@@ -12,6 +12,7 @@ import whorl.diagnostic.Source;
 final class TextTable implements Piece.Cases<String> {
   static final int PAGE_WIDTH = 108;
   private static final int GAP = 2;
+  private static final int GRID_MARGIN = 4;
 
   /** What a column is never narrowed below, in the order of the heads. */
   private static final int[] LEAST = {8, 22, 28, 24, 18};
@@ -58,6 +59,7 @@ final class TextTable implements Piece.Cases<String> {
     return TextWrap.plain(String.join("\n", text));
   }
 
+  /** A grid; one that is wider than the page in several parts, each with the first column. */
   private static List<String> grid(Grid grid) {
     List<List<String>> rows = new ArrayList<>();
     rows.add(
@@ -68,17 +70,38 @@ final class TextTable implements Piece.Cases<String> {
                         + (head.unit().isEmpty() ? "" : " in " + head.unit()))
             .toList());
     rows.addAll(grid.rows());
-    var lines = new ArrayList<String>();
+    int[] widths = new int[grid.heads().size()];
     for (List<String> row : rows) {
-      var line = new StringBuilder("  ");
-      for (int i = 0; i < row.size(); i++) {
-        int column = i;
-        int width = rows.stream().mapToInt(one -> TextWidth.of(one.get(column))).max().orElse(0);
-        line.append("  ").append(TextWidth.padded(width, row.get(i)));
+      for (int i = 0; i < widths.length; i++) {
+        widths[i] = Math.max(widths[i], TextWidth.of(row.get(i)));
       }
-      lines.add(line.toString().stripTrailing());
+    }
+    var lines = new ArrayList<String>();
+    int first = 1;
+    while (first < widths.length || lines.isEmpty()) {
+      int total = GRID_MARGIN + widths[0];
+      int end = first;
+      while (end < widths.length
+          && (end == first || total + GRID_MARGIN + widths[end] <= PAGE_WIDTH)) {
+        total += GRID_MARGIN + widths[end++];
+      }
+      if (!lines.isEmpty()) {
+        lines.add("");
+      }
+      for (List<String> row : rows) {
+        var line = new StringBuilder(column(row.get(0), widths[0]));
+        for (int i = first; i < end; i++) {
+          line.append(column(row.get(i), widths[i]));
+        }
+        lines.add(line.toString().stripTrailing());
+      }
+      first = end;
     }
     return lines;
+  }
+
+  private static String column(String text, int width) {
+    return " ".repeat(GRID_MARGIN) + TextWidth.padded(width, text);
   }
 
   private List<List<String>> cells(Row row, int numberWidth) {

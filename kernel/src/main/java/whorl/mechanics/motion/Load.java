@@ -48,17 +48,30 @@ public sealed interface Load {
     }
   }
 
-  /** A moment that depends on the time and on how the body moves. */
-  record Varying(Moment moment) implements Load {}
+  /** A force and a moment that depend on the time and on how the body moves. */
+  record Varying(Action action) implements Load {}
 
-  /** The moment of a {@link Varying} load. */
+  /**
+   * A force with its moment, both along the axes of the world.
+   *
+   * @param force in N
+   * @param moment about the pivot or the centre of mass, in N·m
+   */
+  record Wrench(Vector3D force, Vector3D moment) {
+    /** The sum of two. */
+    Wrench plus(Vector3D otherForce, Vector3D otherMoment) {
+      return new Wrench(force.add(otherForce), moment.add(otherMoment));
+    }
+  }
+
+  /** What a {@link Varying} load does. */
   @FunctionalInterface
-  interface Moment {
+  interface Action {
     /**
-     * The moment along the axes of the world, in N·m.
+     * The force and its moment.
      *
      * @param state as {@link RigidMotion} reads it
      */
-    Vector3D at(double time, double[] state);
+    Wrench at(double time, double[] state);
   }
 }

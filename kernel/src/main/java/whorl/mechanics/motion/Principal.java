@@ -50,13 +50,32 @@ record Principal(double first, double second, double third, Quaternion inBody) {
     return Math.abs(first - second) <= SAME * Math.max(first, second);
   }
 
+  /** Whether the body is a thin rod, with no moment of inertia about its axis of symmetry. */
+  boolean isThin() {
+    return isSymmetric() && third <= SAME * first;
+  }
+
+  /** Whether every axis has a moment of inertia, but for that of a thin rod. */
+  boolean isDetermined() {
+    double largest = Math.max(first, Math.max(second, third));
+    return Math.min(first, second) > SAME * largest && (isThin() || third > SAME * largest);
+  }
+
+  /** 1/I₃; 0 for a thin rod, which so never turns about its own axis. */
+  double perThird() {
+    return isThin() ? 0 : 1 / third;
+  }
+
+  /** The least moment of inertia that the body can turn with. */
   double least() {
-    return Math.min(first, Math.min(second, third));
+    double least = Math.min(first, second);
+    return isThin() ? least : Math.min(least, third);
   }
 
   /** The angular velocity with an angular momentum, both along the principal axes. */
   Vector3D rate(Vector3D momentum) {
-    return new Vector3D(momentum.getX() / first, momentum.getY() / second, momentum.getZ() / third);
+    return new Vector3D(
+        momentum.getX() / first, momentum.getY() / second, momentum.getZ() * perThird());
   }
 
   /** The angular momentum with an angular velocity, both along the principal axes. */

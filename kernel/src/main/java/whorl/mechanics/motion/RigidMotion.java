@@ -8,6 +8,7 @@ import org.jspecify.annotations.Nullable;
 import whorl.mechanics.Given;
 import whorl.mechanics.Refusal;
 import whorl.mechanics.body.Body;
+import whorl.mechanics.reference.Frame;
 import whorl.mechanics.reference.InertiaTensor;
 
 /**
@@ -61,18 +62,20 @@ public final class RigidMotion {
             : Vector3D.ZERO;
     InertiaTensor tensor = body.ownInertia().plus(InertiaTensor.ofPoint(body.mass(), fromPivot));
     this.principal = Principal.of(tensor);
-    demandSolid(principal);
+    demandInertia(principal, principal.inBody().fromWorld(body.frame().fromWorld(this.rate)));
     this.arm = principal.inBody().fromWorld(fromPivot);
   }
 
-  /** A body with no inertia about some axis, such as a thin rod, has no angular velocity there. */
-  private static void demandSolid(Principal principal) {
-    double largest = Math.max(principal.first(), Math.max(principal.second(), principal.third()));
-    if (!(principal.least() > 1e-12 * largest)) {
+  /** About an axis without inertia no turning is determined: a thin rod must not spin. */
+  private static void demandInertia(Principal principal, Vector3D rate) {
+    boolean spins = principal.isThin() && Math.abs(rate.getZ()) > 1e-9 * rate.getNorm();
+    if (spins || !principal.isDetermined()) {
       throw new Refusal(
           "body",
-          "The body has no moment of inertia about one of its axes, so its turning about that axis"
-              + " is not determined.",
+          "The body has no moment of inertia about "
+              + (spins
+                  ? "its own axis, about which it is to spin."
+                  : "one of its axes, so its" + " turning about that axis is not determined."),
           "Give it a thickness.");
     }
   }
@@ -119,7 +122,7 @@ public final class RigidMotion {
       return new SplitRun(this).run();
     }
     Motion motion = Motion.of(this::rates, start(), limit).polling(poll);
-    motion = isFree() ? motion.inGroups(3, 4, 3, 3) : motion.inGroups(3, 4);
+    motion = motion.inGroups(groups());
     for (Motion.Conserved quantity : conserved()) {
       motion = motion.keeping(quantity);
     }
@@ -159,8 +162,13 @@ public final class RigidMotion {
     return body.mass();
   }
 
+  /** Groups of states that are parts of one thing each, as {@link Motion#inGroups} takes them. */
+  public int[] groups() {
+    return isFree() ? new int[] {3, 4, 3, 3} : new int[] {3, 4};
+  }
+
   /** The states at the start. */
-  double[] start() {
+  public double[] start() {
     double[] start = new double[isFree() ? 13 : 7];
     Quaternion attitude = Quaternion.of(body.frame().attitude()).times(principal.inBody());
     put(start, MOMENTUM, attitude.toWorld(principal.momentum(attitude.fromWorld(rate))));
@@ -208,6 +216,13 @@ public final class RigidMotion {
     return new Rotation(q.w, -q.x, -q.y, -q.z, false);
   }
 
+  /** The body where it is, in a frame that moves and turns as it does. */
+  public Body body(double[] state) {
+    Frame frame =
+        Frame.in(Frame.WORLD, centre(state), attitude(state), rate(state), velocity(state));
+    return body.placed(frame);
+  }
+
   /** The direction of the body's own z axis, along the axes of the world. */
   public Vector3D axis(double[] state) {
     return toWorld(state, Vector3D.PLUS_K);
@@ -227,6 +242,11 @@ public final class RigidMotion {
   /** The angular momentum about the pivot or the centre of mass, in N·m·s. */
   public Vector3D momentum(double[] state) {
     return vector(state, MOMENTUM);
+  }
+
+  /** The point that angular momentum and moments are taken about, in m. */
+  public Vector3D point(double[] state) {
+    return support instanceof Support.Pivot pivot ? pivot.pivot().position() : centre(state);
   }
 
   /** The centre of mass, in m. */
@@ -290,30 +310,31 @@ public final class RigidMotion {
     return arm.add(principal.inBody().fromWorld(force.at()));
   }
 
-  private void rates(double time, double[] state, double[] rates) {
+  /** The rates of the states: {@code L' = M}, {@code q' = ω q/2}, {@code m v' = F}. */
+  public void rates(double time, double[] state, double[] rates) {
     Quaternion attitude = principalAttitude(state);
     Vector3D turning = attitude.toWorld(principal.rate(attitude.fromWorld(momentum(state))));
-    Vector3D moment = Vector3D.ZERO;
-    Vector3D force = Vector3D.ZERO;
+    var sum = new Load.Wrench(Vector3D.ZERO, Vector3D.ZERO);
     for (Load load : loads) {
       if (load instanceof Load.Weight weight) {
-        force = force.add(weight(weight));
-        moment = moment.add(attitude.toWorld(arm).crossProduct(weight(weight)));
+        Vector3D force = weight(weight);
+        sum = sum.plus(force, attitude.toWorld(arm).crossProduct(force));
       } else if (load instanceof Load.Force at) {
-        Vector3D acting = at.inBody() ? toWorld(state, at.force()) : at.force();
-        force = force.add(acting);
-        moment = moment.add(attitude.toWorld(from(at)).crossProduct(acting));
+        Vector3D force = at.inBody() ? toWorld(state, at.force()) : at.force();
+        sum = sum.plus(force, attitude.toWorld(from(at)).crossProduct(force));
       } else if (load instanceof Load.Couple couple) {
-        moment = moment.add(couple.inBody() ? toWorld(state, couple.moment()) : couple.moment());
+        Vector3D moment = couple.inBody() ? toWorld(state, couple.moment()) : couple.moment();
+        sum = sum.plus(Vector3D.ZERO, moment);
       } else if (load instanceof Load.Varying varying) {
-        moment = moment.add(varying.moment().at(time, state));
+        Load.Wrench wrench = varying.action().at(time, state);
+        sum = sum.plus(wrench.force(), wrench.moment());
       }
     }
-    put(rates, MOMENTUM, moment);
+    put(rates, MOMENTUM, sum.moment());
     putTurning(state, turning, rates);
     if (isFree()) {
       put(rates, CENTRE, vector(state, VELOCITY));
-      put(rates, VELOCITY, force.scalarMultiply(1 / mass()));
+      put(rates, VELOCITY, sum.force().scalarMultiply(1 / mass()));
     }
   }
 
@@ -368,11 +389,11 @@ public final class RigidMotion {
                       : momentum(state).dotProduct(along),
               size));
     }
-    if (onlySpaceForces && keepsSpin()) {
+    if (onlySpaceForces && keepsSpin() && !principal.isThin()) {
       conserved.add(
           new Motion.Conserved(
               "spin about the axis of symmetry",
-              (time, state) -> spinMomentum(state) / principal.third(),
+              (time, state) -> spinMomentum(state) * principal.perThird(),
               (time, state) -> rate(state).getNorm()));
     }
     return conserved;
@@ -410,7 +431,7 @@ public final class RigidMotion {
     }
     double energy = rate(start).dotProduct(momentum(start)) / 2 + fall;
     if (keepsSpin()) {
-      return Math.abs(spinMomentum(start)) / principal.third()
+      return Math.abs(spinMomentum(start)) * principal.perThird()
           + Math.sqrt(2 * energy / principal.first());
     }
     return Math.sqrt(2 * energy / principal.least());

@@ -61,7 +61,7 @@ final class SplitRun {
     }
     Principal principal = motion.principal();
     this.throughout = 1 / principal.first();
-    this.alongThird = 1 / principal.third() - throughout;
+    this.alongThird = principal.perThird() - throughout;
     this.alongSecond = principal.isSymmetric() ? 0 : 1 / principal.second() - throughout;
     this.state = motion.start();
   }

@@ -9,6 +9,7 @@ import java.util.SplittableRandom;
 import org.apache.commons.math3.geometry.euclidean.threed.Vector3D;
 import org.hipparchus.special.elliptic.jacobi.CopolarN;
 import org.hipparchus.special.elliptic.jacobi.JacobiEllipticBuilder;
+import org.hipparchus.special.elliptic.legendre.LegendreEllipticIntegral;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -350,7 +351,8 @@ class RigidMotionTest {
     var push = new Load.Force(new Vector3D(1, 0, 0), Vector3D.ZERO, false);
     RigidMotion straight = RigidMotion.of(body, new Support.Free(), Z, List.of(push), 2);
     assertEquals(2, straight.centre(straight.run().state(2)).getX(), 1e-11);
-    var varying = new Load.Varying((t, y) -> new Vector3D(0, 0, 3 * t));
+    var varying =
+        new Load.Varying((t, y) -> new Load.Wrench(Vector3D.ZERO, new Vector3D(0, 0, 3 * t)));
     RigidMotion driven =
         RigidMotion.of(body, new Support.AtCentre(), Vector3D.ZERO, List.of(varying), 2);
     assertEquals(3, driven.rate(driven.run().state(2)).getZ(), 1e-10);
@@ -366,10 +368,28 @@ class RigidMotionTest {
     assertEquals(-0.9, falling.axis(run.state(run.duration())).getZ(), 1e-12);
   }
 
+  /** The time of a pendulum at large swing: 4 √(I/(m g l)) K(sin²(α/2)) by the other library. */
+  @Test
+  void aThinRodSwingsAsAPendulum() {
+    Body rod =
+        Body.of(
+                new MassProperties(
+                    2, new Vector3D(0, 0, -0.5), InertiaTensor.diagonal(1 / 6.0, 1 / 6.0, 0)))
+            .turned(new Axis(Point.ORIGIN, X), 2);
+    RigidMotion motion = onPivot(rod, Vector3D.ZERO, 3);
+    MotionRun run = motion.run();
+    double quarter = run.firstTime((t, y) -> motion.centre(y).getY(), 0).orElseThrow();
+    double exact =
+        Math.sqrt(2 / 3.0 / (2 * Load.STANDARD_GRAVITY * 0.5))
+            * LegendreEllipticIntegral.bigK(Math.pow(Math.sin(1), 2));
+    assertEquals(exact, quarter, 1e-9);
+  }
+
   @Test
   void aBodyWithoutInertiaAboutAnAxisAndAPivotThatMovesAreRefused() {
     Body rod = body(1, 1, 1, 0);
     assertThrows(Refusal.class, () -> torqueFree(rod, Z, 1));
+    assertThrows(Refusal.class, () -> torqueFree(body(1, 0, 0, 0), X, 1));
     assertThrows(Refusal.class, () -> new Support.Pivot(new Point(Vector3D.ZERO, X)));
   }
 }
