@@ -24,7 +24,6 @@ final class MotionChecker implements Locals {
   private static final Kind ANGULAR_VELOCITY = Kind.named("angular_velocity");
   private static final Kind INERTIA = Kind.named("rotational_inertia");
 
-  private final Scope scope;
   private final Statement.Motion motion;
   private final Frame frame = new Frame(0);
   private final ExpressionChecker checker;
@@ -35,7 +34,6 @@ final class MotionChecker implements Locals {
   private final @Nullable RigidChecker rigid;
 
   MotionChecker(Scope scope, Statement.Motion motion) {
-    this.scope = scope;
     this.motion = motion;
     this.checker = new ExpressionChecker(scope, this, frame);
     this.fromSheet = new ExpressionChecker(scope, new NoLocals(), frame);
