@@ -120,15 +120,26 @@ final class Completer {
   private List<Candidate> parts(int dot) {
     List<Token> tokens = at.tokens();
     int last = dot - 1;
-    int first = tokens.get(last).is(Kind.CLOSE) ? Place.opening(tokens, last) : last;
-    if (first > 0 && tokens.get(first).is(Kind.OPEN) && tokens.get(first - 1).isFreeName()) {
-      first = tokens.get(first - 1).touches(tokens.get(first)) ? first - 1 : first;
+    int first = beginning(tokens, last);
+    while (first > 1 && tokens.get(first - 1).is(Kind.DOT)) {
+      first = beginning(tokens, first - 2);
     }
     if (first < 0) {
       return List.of();
     }
     String whole = at.between(tokens.get(first).span().start(), tokens.get(last).span().end());
     return partsOf(whole).stream().filter(part -> part.text().startsWith(at.typed())).toList();
+  }
+
+  /** Where the name, call or group begins that ends with a token; negative where there is none. */
+  private static int beginning(List<Token> tokens, int last) {
+    int first = tokens.get(last).is(Kind.CLOSE) ? Place.opening(tokens, last) : last;
+    boolean call =
+        first > 0
+            && tokens.get(first).is(Kind.OPEN)
+            && tokens.get(first - 1).isFreeName()
+            && tokens.get(first - 1).touches(tokens.get(first));
+    return call ? first - 1 : first;
   }
 
   private List<Candidate> partsOf(String whole) {

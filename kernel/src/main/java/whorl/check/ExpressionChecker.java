@@ -489,50 +489,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
 
   @Override
   public Typed sum(Expr.Sum sum) {
-    var reach = WrittenUnits.Reach.TERM;
-    List<Typed> checked = sum.terms().stream().map(term -> check(term.value(), reach)).toList();
-    if (checked.stream().anyMatch(term -> form(term) == Form.THING)) {
-      return new Space(this).sum(sum, checked);
-    }
-    Expr.Term first = sum.terms().get(0);
-    Typed total = checked.get(0);
-    var reals = new ArrayList<Operation.Term>();
-    var vectors = new ArrayList<Operation.VectorTerm>();
-    collect(first, total, reals, vectors);
-    for (int i = 1; i < sum.terms().size(); i++) {
-      Expr.Term term = sum.terms().get(i);
-      Typed next = checked.get(i);
-      if (form(next) != form(total)) {
-        throw CheckMessages.mixedCharacters(first.value().span(), total, term.value().span(), next);
-      }
-      collect(term, next, reals, vectors);
-      int terms = i;
-      total = Kinds.added(total, () -> upTo(sum, terms), term.subtracted(), next, term.value());
-    }
-    Operation whole =
-        vectors.isEmpty()
-            ? new Operation.Sum(sum.span(), reals)
-            : new Operation.VectorSum(sum.span(), vectors);
-    return new Typed(whole, total.type(), total.literal());
-  }
-
-  /** The first terms of a sum. */
-  static Expr upTo(Expr.Sum sum, int count) {
-    Expr first = sum.terms().get(0).value();
-    Expr last = sum.terms().get(count - 1).value();
-    return count == 1
-        ? first
-        : new Expr.Sum(first.span().to(last.span()), sum.terms().subList(0, count));
-  }
-
-  private static void collect(
-      Expr.Term term, Typed typed, List<Operation.Term> reals, List<Operation.VectorTerm> vectors) {
-    switch (form(typed)) {
-      case REAL -> reals.add(new Operation.Term(term.subtracted(), real(typed)));
-      case VECTOR -> vectors.add(new Operation.VectorTerm(term.subtracted(), vector(typed)));
-      case TRUTH -> throw CheckMessages.conditionForNumber(term.value());
-      case THING -> throw SpaceMessages.thingForNumber(term.value(), typed.type());
-    }
+    return new SumChecker(this, sum).typed();
   }
 
   @Override
@@ -622,47 +579,7 @@ final class ExpressionChecker implements Expr.Cases<Typed> {
   public Typed choice(Expr.Choice choice) {
     Operation.Truth condition = condition(choice.condition());
     choices.add(condition);
-    Typed then = check(choice.then(), WrittenUnits.Reach.TERM);
-    Typed otherwise = check(choice.otherwise(), WrittenUnits.Reach.TERM);
-    if (form(then) != form(otherwise)) {
-      throw CheckMessages.mixedCharacters(
-          choice.then().span(), then, choice.otherwise().span(), otherwise);
-    }
-    Span span = choice.span();
-    if (then.operation() instanceof Operation.Truth one
-        && otherwise.operation() instanceof Operation.Truth other) {
-      return Typed.of(new Operation.TruthChoice(span, condition, one, other));
-    }
-    if (then.operation() instanceof Operation.Thing one
-        && otherwise.operation() instanceof Operation.Thing other) {
-      return thing(choice, condition, then, one, otherwise, other);
-    }
-    Typed met =
-        Kinds.meet(Kinds.Together.BRANCHES, then, choice.then(), otherwise, choice.otherwise());
-    return new Typed(
-        form(then) == Form.VECTOR
-            ? new Operation.VectorChoice(span, condition, vector(then), vector(otherwise))
-            : new Operation.Choice(span, condition, real(then), real(otherwise)),
-        met.type(),
-        null);
-  }
-
-  private static Typed thing(
-      Expr.Choice choice,
-      Operation.Truth condition,
-      Typed then,
-      Operation.Thing one,
-      Typed otherwise,
-      Operation.Thing other) {
-    if (one.sort() != other.sort()) {
-      throw SpaceMessages.mixedThings(choice, one.sort(), other.sort());
-    }
-    Typed typed = Typed.of(new Operation.ThingChoice(choice.span(), condition, one, other));
-    return then.type() instanceof Type.Tensor tensor
-        ? typed
-            .about(References.shared(then, choice::then, otherwise, choice.otherwise()))
-            .seenFrom(tensor.frame())
-        : typed;
+    return new ChoiceChecker(this, choice).typed(condition);
   }
 
   @Override

@@ -213,7 +213,7 @@ final class Space {
     }
     for (int i = 1; i < terms.size(); i++) {
       Expr.Term term = sum.terms().get(i);
-      Expr before = ExpressionChecker.upTo(sum, i);
+      Expr before = SumChecker.upTo(sum, i);
       total = added(total, before, term, terms.get(i), before.span().to(term.value().span()));
     }
     return total;

@@ -77,6 +77,12 @@ record Typed(Operation operation, Type type, @Nullable Rational literal, List<Po
     return new Typed(other, read, operand.literal());
   }
 
+  /** Whether both are numbers, or both vectors. */
+  boolean isLike(Typed other) {
+    return (operation instanceof Operation.Real && other.operation instanceof Operation.Real)
+        || (operation instanceof Operation.Vector && other.operation instanceof Operation.Vector);
+  }
+
   /** The same worked out otherwise, by an operation of the same character. */
   Typed with(Operation other) {
     return new Typed(other, type, null);
