@@ -98,7 +98,7 @@ def a_note_becomes_a_page_in_html(folder):
     )
     page = (folder / demo.with_suffix(".html").name).read_text(encoding="utf-8")
     # Steps are tables of ours, not their text forms; a motion has tables of its own among them.
-    heads = page.count(">quantity</th>")
+    heads = page.count(">quantity</span></th>")
     assert heads == len(recorded(read(demo))), heads
     assert "holds" in page and "output_error" not in page
 
