@@ -81,7 +81,19 @@ final class KindMessages {
           case PARTS -> "The parts of a vector must be of one kind; here stand " + both + ".";
           case BRANCHES -> "Both choices must be of one kind; here stand " + both + ".";
         };
-    return new Explanation(problem, explanation.reason(), explanation.fix());
+    String fix =
+        together == Kinds.Together.EQUATED && explanation.fix().isEmpty()
+            ? missingInertia(left.typed().operand().readings(), right.typed().operand().readings())
+            : explanation.fix();
+    return new Explanation(problem, explanation.reason(), fix);
+  }
+
+  /** What to do where a torque stands for the rate that it gives; else nothing. */
+  private static String missingInertia(Readings rate, Readings cause) {
+    // One unknown factor may be an inertia or a couple unbalance, so the general rule is silent.
+    return rate.canBe(Kind.named("angular_acceleration")) && cause.canBe(Kind.named("torque"))
+        ? "A torque gives an angular acceleration through the moment of inertia: divide by it."
+        : "";
   }
 
   /** Whether a part is a bare number beside a quantity with a unit. */
